@@ -1,0 +1,6 @@
+export * from './fields';
+export * from './makers';
+export * from './readings';
+export * from './rows';
+export * from './tables';
+export * from './values';

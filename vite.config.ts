@@ -1,0 +1,59 @@
+import tailwindcss from '@tailwindcss/vite';
+import { sveltekit } from '@sveltejs/kit/vite';
+import { defineConfig } from 'vitest/config';
+
+export default defineConfig({
+	plugins: [tailwindcss(), sveltekit()],
+	build: {
+		// Fonts under 4 kB would become data: addresses, which the policy refuses.
+		assetsInlineLimit: 0
+	},
+	test: {
+		projects: [
+			{
+				extends: true,
+				test: {
+					name: 'unit',
+					include: ['src/**/*.test.ts', 'scripts/**/*.test.ts', 'tests/published/**/*.test.ts']
+				}
+			},
+			{
+				extends: true,
+				test: {
+					name: 'integration',
+					include: ['tests/integration/**/*.test.ts'],
+					testTimeout: 30_000,
+					hookTimeout: 60_000,
+					fileParallelism: false
+				}
+			},
+			{
+				extends: true,
+				test: {
+					name: 'e2e',
+					include: ['tests/e2e/**/*.test.ts'],
+					testTimeout: 60_000,
+					hookTimeout: 120_000,
+					fileParallelism: false
+				}
+			},
+			{
+				extends: true,
+				test: {
+					name: 'deep',
+					include: ['tests/deep/**/*.test.ts'],
+					testTimeout: 1_200_000,
+					hookTimeout: 120_000,
+					fileParallelism: false
+				}
+			}
+		],
+		coverage: {
+			provider: 'v8',
+			include: ['src/lib/decoder/**/*.ts'],
+			exclude: ['**/*.test.ts'],
+			reporter: ['text-summary', 'json-summary'],
+			reportsDirectory: '.local/coverage'
+		}
+	}
+});
