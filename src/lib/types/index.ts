@@ -1,3 +1,4 @@
+export * from './api';
 export * from './fields';
 export * from './makers';
 export * from './readings';

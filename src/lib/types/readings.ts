@@ -109,15 +109,25 @@ export interface Problem {
 	readonly offers: readonly Offer[];
 }
 export interface ReadResult {
-	readonly input: { readonly kind: StampKind | null; readonly text: string; readonly normalised: string };
+	readonly input: {
+		readonly kind: StampKind | null;
+		readonly text: string;
+		readonly normalised: string;
+	};
 	/** At most 24. */
 	readonly readings: readonly Reading[];
 	/** How many further readings there are. */
 	readonly more: number;
 	readonly problems: readonly Problem[];
 }
+/** A reading as answered: the corporation by its full name, and by its key as in addresses. */
+export interface AnsweredReading extends Omit<Reading, 'maker'> {
+	readonly maker: string | null;
+	readonly maker_key: Maker | null;
+}
 /** What the interface answers: the result and what it is a function of. */
-export interface ReadAnswer extends ReadResult {
+export interface ReadAnswer extends Omit<ReadResult, 'readings'> {
+	readonly readings: readonly AnsweredReading[];
 	readonly edition: number;
 	readonly digest: string;
 	readonly reader: string;
