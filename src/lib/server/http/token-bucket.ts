@@ -1,0 +1,74 @@
+/** Who is counted as one: an IPv4 address, or the first half of an IPv6 address. */
+export function accountOf(address: string): string {
+	if (!address.includes(':')) return address;
+	if (address.startsWith('::ffff:') && address.includes('.')) return address.slice(7);
+	const [head = '', tail] = address.split('::');
+	const left = head === '' ? [] : head.split(':');
+	const right = tail === undefined || tail === '' ? [] : tail.split(':');
+	const gap = tail === undefined ? [] : Array<string>(8 - left.length - right.length).fill('0');
+	return [...left, ...gap, ...right].slice(0, 4).join(':');
+}
+
+interface Bucket {
+	tokens: number;
+	at: number;
+}
+
+/**
+ * Token buckets by address, in this process alone. A bucket holds a minute's tokens and fills evenly.
+ * Bounded: beyond `most` addresses the full buckets go first, then the oldest.
+ */
+export class TokenBuckets {
+	readonly #perMinute: number;
+	readonly #now: () => number;
+	readonly #most: number;
+	readonly #buckets = new Map<string, Bucket>();
+
+	/** @param now milliseconds that only grow */
+	constructor(perMinute: number, now: () => number = () => performance.now(), most = 50_000) {
+		this.#perMinute = perMinute;
+		this.#now = now;
+		this.#most = most;
+	}
+
+	get size(): number {
+		return this.#buckets.size;
+	}
+
+	/** Takes tokens. Answers 0 when they were there, else the whole seconds to wait. */
+	take(address: string, cost = 1): number {
+		const now = this.#now();
+		const account = accountOf(address);
+		let bucket = this.#buckets.get(account);
+		if (bucket === undefined) {
+			if (this.#buckets.size >= this.#most) this.#forget(now);
+			bucket = { tokens: this.#perMinute, at: now };
+			this.#buckets.set(account, bucket);
+		} else {
+			this.#fill(bucket, now);
+		}
+		const price = Math.min(cost, this.#perMinute);
+		if (bucket.tokens >= price) {
+			bucket.tokens -= price;
+			return 0;
+		}
+		return Math.max(1, Math.ceil(((price - bucket.tokens) * 60) / this.#perMinute));
+	}
+
+	#fill(bucket: Bucket, now: number): void {
+		const gained = ((now - bucket.at) * this.#perMinute) / 60_000;
+		bucket.tokens = Math.min(this.#perMinute, bucket.tokens + gained);
+		bucket.at = now;
+	}
+
+	#forget(now: number): void {
+		for (const [account, bucket] of this.#buckets) {
+			this.#fill(bucket, now);
+			if (bucket.tokens >= this.#perMinute) this.#buckets.delete(account);
+		}
+		for (const account of this.#buckets.keys()) {
+			if (this.#buckets.size < this.#most) break;
+			this.#buckets.delete(account);
+		}
+	}
+}
