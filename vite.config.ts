@@ -1,9 +1,10 @@
 import tailwindcss from '@tailwindcss/vite';
 import { sveltekit } from '@sveltejs/kit/vite';
 import { defineConfig } from 'vitest/config';
+import { readerPlugin } from './scripts/vite/reader.ts';
 
 export default defineConfig({
-	plugins: [tailwindcss(), sveltekit()],
+	plugins: [readerPlugin(), tailwindcss(), sveltekit()],
 	build: {
 		// Fonts under 4 kB would become data: addresses, which the policy refuses.
 		assetsInlineLimit: 0

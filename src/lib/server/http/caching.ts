@@ -1,25 +1,24 @@
-/** What an answer is a function of, beside its address. */
-export interface Basis {
-	/** SHA-256 of the edition's content, in hexadecimal. */
-	readonly digest: string;
-	/** The reader's digest; empty where no reading is made. */
-	readonly reader: string;
-}
+/** Built in from all code that shapes an answer (scripts/vite/reader.ts). */
+declare const __ANSWER_DIGEST__: string;
 
-/** FNV-1a over UTF-16 units. */
-function hash(text: string): string {
-	let value = 0x811c9dc5;
+/** FNV-1a over UTF-16 units, going on from a value. */
+function hash(text: string, from: number): number {
+	let value = from;
 	for (let index = 0; index < text.length; index += 1)
 		value = Math.imul(value ^ text.charCodeAt(index), 0x01000193);
-	return (value >>> 0).toString(36);
+	return value;
 }
+const CODE = hash(__ANSWER_DIGEST__, 0x811c9dc5);
 
 /**
- * The validator of an answer. Weak, because the same answer may be sent compressed.
- * @param query the address’s query, and the type where an address has several
+ * The validator of an answer, made before the answer is. Weak, because the same answer may be sent
+ * compressed. Changes with edition, reader, question, and the code that shapes answers.
+ * @param digest of the edition, in hexadecimal; empty where no edition is asked
+ * @param reader the reader’s short digest; empty where nothing is read
+ * @param question path and query, and the media type where an address has several
  */
-export const etagOf = (basis: Basis, query: string): string =>
-	`W/"${basis.digest.slice(0, 12)}-${basis.reader || 'x'}-${hash(query)}"`;
+export const etagOf = (digest: string, reader: string, question: string): string =>
+	`W/"${digest.slice(0, 12)}-${reader}-${(hash(question, CODE) >>> 0).toString(36)}"`;
 
 const opaque = (tag: string): string => tag.trim().replace(/^W\//, '');
 

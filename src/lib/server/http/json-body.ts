@@ -4,8 +4,11 @@ import { fault, malformed, Refusal } from './refusal';
 /** Largest JSON body: many times the longest stamp with every context beside it. */
 export const MOST_BYTES = 65_536;
 
+/** The connection closes with it: the rest of the body is not worth reading. */
 const tooLarge = () =>
-	new Refusal(413, [fault('body', 'too_large', interfaceText.tooLarge(MOST_BYTES))]);
+	new Refusal(413, [fault('body', 'too_large', interfaceText.tooLarge(MOST_BYTES))], {
+		connection: 'close'
+	});
 const mediaType = () =>
 	new Refusal(415, [
 		fault('Content-Type', 'media_type', interfaceText.mediaType, ['application/json'])
@@ -15,15 +18,18 @@ const mediaType = () =>
 const saysTooLarge = (error: unknown): boolean =>
 	error instanceof Error && 'status' in error && error.status === 413;
 
+/** Cancelling the stream would destroy the connection before the refusal is sent, so it is left as it stands. */
 async function readBytes(body: ReadableStream<Uint8Array>): Promise<Uint8Array> {
 	const chunks: Uint8Array[] = [];
+	const reader = body.getReader();
 	let size = 0;
-	for await (const chunk of body) {
-		size += chunk.byteLength;
+	for (;;) {
+		const { done, value } = await reader.read();
+		if (done) return Buffer.concat(chunks);
+		size += value.byteLength;
 		if (size > MOST_BYTES) throw tooLarge();
-		chunks.push(chunk);
+		chunks.push(value);
 	}
-	return Buffer.concat(chunks);
 }
 
 function parse(bytes: Uint8Array): unknown {

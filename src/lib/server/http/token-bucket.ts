@@ -16,7 +16,7 @@ interface Bucket {
 
 /**
  * Token buckets by address, in this process alone. A bucket holds a minute's tokens and fills evenly.
- * Bounded: beyond `most` addresses the full buckets go first, then the oldest.
+ * Bounded: beyond `most` addresses the full buckets go first, then the oldest tenth.
  */
 export class TokenBuckets {
 	readonly #perMinute: number;
@@ -67,7 +67,7 @@ export class TokenBuckets {
 			if (bucket.tokens >= this.#perMinute) this.#buckets.delete(account);
 		}
 		for (const account of this.#buckets.keys()) {
-			if (this.#buckets.size < this.#most) break;
+			if (this.#buckets.size <= this.#most * 0.9) break;
 			this.#buckets.delete(account);
 		}
 	}

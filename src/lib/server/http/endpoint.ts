@@ -1,0 +1,79 @@
+import { config } from '../config';
+import { interfaceText } from '../../text/en/interface';
+import { refuse } from './problem';
+import { fault, Refusal } from './refusal';
+import { TokenBuckets } from './token-bucket';
+
+/** What an endpoint needs to know of a request. */
+export interface Asked {
+	readonly url: URL;
+	readonly request: Request;
+	getClientAddress(): string;
+}
+type Answer = Response | Promise<Response>;
+
+let buckets: TokenBuckets | undefined;
+
+/**
+ * Counts a request against its address, in this process alone; no database.
+ * @param cost tokens: 1 for a reading or a list, more for a search
+ * @throws {Refusal} 429 with Retry-After
+ */
+export function admit(address: string, cost = 1): void {
+	buckets ??= new TokenBuckets(config().readingsPerMinute);
+	const seconds = buckets.take(address, cost);
+	if (seconds === 0) return;
+	throw new Refusal(429, [fault('address', 'too_many', interfaceText.tooMany(seconds))], {
+		'retry-after': String(seconds)
+	});
+}
+
+/**
+ * An endpoint of the interface: counts the request, and turns a refusal into problem details.
+ * Anything else that goes wrong is thrown on to the hooks. Stays synchronous where the answer is.
+ */
+export function answering<Event extends Asked>(answer: (event: Event) => Answer) {
+	return (event: Event): Answer => {
+		try {
+			admit(event.getClientAddress());
+			const response = answer(event);
+			return response instanceof Response ? response : response.catch(asRefusal);
+		} catch (error) {
+			return asRefusal(error);
+		}
+	};
+}
+
+function asRefusal(error: unknown): Response {
+	if (error instanceof Refusal) return refuse(error);
+	throw error;
+}
+
+/** Methods beside those of an endpoint: OPTIONS is answered, for other origins too; the rest is refused. */
+export function otherMethods(...methods: readonly ('GET' | 'POST')[]) {
+	const allowed = methods.flatMap((method) => (method === 'GET' ? ['GET', 'HEAD'] : [method]));
+	allowed.push('OPTIONS');
+	const allow = allowed.join(', ');
+	return ({ request }: { request: Request }): Response => {
+		if (request.method === 'OPTIONS') return preflight(allow, methods.includes('GET'));
+		const message = interfaceText.method(request.method, allowed);
+		return refuse(
+			new Refusal(405, [fault('method', 'method_not_allowed', message, allowed)], { allow })
+		);
+	};
+}
+
+/** Any origin may GET, without credentials; what writes is for our own pages and tokens. */
+const preflight = (allow: string, readable: boolean): Response =>
+	new Response(null, {
+		status: 204,
+		headers: {
+			allow,
+			...(readable && {
+				'access-control-allow-origin': '*',
+				'access-control-allow-methods': 'GET, HEAD, OPTIONS',
+				'access-control-allow-headers': 'Accept, If-None-Match',
+				'access-control-max-age': '86400'
+			})
+		}
+	});

@@ -1,0 +1,181 @@
+import { interfaceText } from '../../text/en/interface';
+import {
+	ALL_DIVISIONS,
+	FIELD_NAMES,
+	FIRST_YEAR,
+	LAST_YEAR,
+	MAKER_NAMES,
+	STAMP_KINDS,
+	type FieldError,
+	type FieldName,
+	type ReadContext,
+	type StampKind
+} from '../../types';
+import { examineText } from '../../decoder';
+import { fault, malformed, invalid, type Parameters } from '../http';
+import { ACCEPTED_MAKERS, divisionNamed, makerNamed, type Named } from './aliases';
+
+/** Kinds that the engine reads. The others are refused by name until it does. */
+export const AVAILABLE_KINDS: readonly StampKind[] = ['serial', 'code'];
+
+/** Parameters of a reading, as the permanent address and the interface have them. */
+export const READING_PARAMETERS = [
+	'text',
+	'kind',
+	'field',
+	'maker',
+	'division',
+	'year',
+	'plant',
+	'edition',
+	'reader',
+	'explain'
+] as const;
+export type ReadingParameter = (typeof READING_PARAMETERS)[number];
+
+/** What is to be read, checked: against which edition, and what is known beside it. */
+export interface ReadRequest {
+	readonly text: string;
+	/** Left out: every kind that is available, ranked. */
+	readonly kind?: StampKind;
+	readonly context: ReadContext;
+	/** Left out: the present edition. */
+	readonly edition?: number;
+	/** The reader that the address names; it only decides how long an answer may be kept. */
+	readonly reader?: string;
+	/** Whether each field tells what it looked up. */
+	readonly explain: boolean;
+}
+
+type Faults = FieldError[];
+const ON = ['1', 'true', 'yes', 'on'];
+const OFF = ['0', 'false', 'no', 'off'];
+
+function readKind(value: string | undefined, faults: Faults): StampKind | undefined {
+	if (value === undefined) return undefined;
+	const folded = value
+		.trim()
+		.toLowerCase()
+		.replace(/[\s-]+/g, '_');
+	const kind = STAMP_KINDS.find((one) => one === folded);
+	if (kind !== undefined && AVAILABLE_KINDS.includes(kind)) return kind;
+	faults.push(
+		kind === undefined
+			? fault(
+					'kind',
+					'unknown_kind',
+					interfaceText.invalid.kind(value, AVAILABLE_KINDS),
+					AVAILABLE_KINDS
+				)
+			: fault(
+					'kind',
+					'kind_not_available',
+					interfaceText.invalid.kindNotAvailable(kind, AVAILABLE_KINDS),
+					AVAILABLE_KINDS
+				)
+	);
+	return undefined;
+}
+
+function readField(value: string | undefined, faults: Faults): FieldName | undefined {
+	if (value === undefined) return undefined;
+	const folded = value
+		.trim()
+		.toLowerCase()
+		.replace(/[\s-]+/g, '_');
+	const field = FIELD_NAMES.find((one) => one === folded);
+	if (field === undefined)
+		faults.push(fault('field', 'unknown_field', interfaceText.invalid.field(value), FIELD_NAMES));
+	return field;
+}
+
+function readMaker(
+	maker: string | undefined,
+	division: string | undefined,
+	faults: Faults
+): Partial<Named> {
+	const byMaker = maker === undefined ? undefined : makerNamed(maker);
+	const byDivision = division === undefined ? undefined : divisionNamed(division);
+	if (byMaker === null)
+		faults.push(
+			fault('maker', 'unknown_maker', interfaceText.invalid.maker(maker!), ACCEPTED_MAKERS)
+		);
+	if (byDivision === null)
+		faults.push(
+			fault(
+				'division',
+				'unknown_division',
+				interfaceText.invalid.division(division!),
+				ALL_DIVISIONS
+			)
+		);
+	if (!byDivision) return byMaker ?? {};
+	if (byMaker && (byMaker.maker !== byDivision.maker || clash(byMaker, byDivision))) {
+		const other = byMaker.division ?? MAKER_NAMES[byMaker.maker];
+		const message = interfaceText.invalid.divisionOfMaker(byDivision.division, other);
+		faults.push(fault('division', 'division_of_other_maker', message));
+	}
+	return byDivision;
+}
+
+const clash = (a: Named, b: Named): boolean =>
+	a.division !== undefined && a.division !== b.division;
+
+function readYear(value: string | undefined, faults: Faults): number | undefined {
+	if (value === undefined) return undefined;
+	const text = value.trim();
+	const year = /^\d{4}$/.test(text) ? Number(text) : 0;
+	if (year >= FIRST_YEAR && year <= LAST_YEAR) return year;
+	faults.push(fault('year', 'year_out_of_range', interfaceText.invalid.year));
+	return undefined;
+}
+
+function readPlant(value: string | undefined, faults: Faults): string | undefined {
+	const plant = value?.trim().toUpperCase();
+	if (plant === undefined || [...plant].length <= 3) return plant;
+	faults.push(fault('plant', 'plant_too_long', interfaceText.invalid.plant));
+	return undefined;
+}
+
+/**
+ * An edition's number as an address has it.
+ * @throws {Refusal} 400 unless a whole number
+ */
+export function readEdition(value: string | undefined): number | undefined {
+	if (value === undefined) return undefined;
+	const text = value.trim();
+	if (/^\d{1,9}$/.test(text)) return Number(text);
+	throw malformed(fault('edition', 'edition_invalid', interfaceText.malformed.edition));
+}
+
+function readSwitch(name: string, value: string | undefined): boolean {
+	const text = value?.trim().toLowerCase();
+	if (text === undefined || OFF.includes(text)) return false;
+	if (ON.includes(text)) return true;
+	const accepted = [ON[0]!, OFF[0]!];
+	throw malformed(
+		fault(name, 'no_switch', interfaceText.malformed.choice(name, accepted), accepted)
+	);
+}
+
+/**
+ * Checks what an address or a form gives. Forgiving about case and space; what is blank counts as absent.
+ * @throws {Refusal} 400 for an edition or switch that cannot be one; 422 naming everything else that is wrong
+ */
+export function readRequest(given: Parameters<ReadingParameter>): ReadRequest {
+	const edition = readEdition(given.edition);
+	const explain = readSwitch('explain', given.explain);
+	const faults: Faults = [];
+	const kind = readKind(given.kind, faults);
+	const text = given.text ?? '';
+	const unreadable = examineText(text, kind);
+	if (unreadable) faults.push(fault('text', unreadable.code, unreadable.message));
+	const context: ReadContext = {
+		...readMaker(given.maker, given.division, faults),
+		year: readYear(given.year, faults),
+		plant: readPlant(given.plant, faults),
+		field: readField(given.field, faults)
+	};
+	if (faults.length > 0) throw invalid(...faults);
+	return { text, kind, context, edition, reader: given.reader, explain };
+}

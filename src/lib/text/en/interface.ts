@@ -1,0 +1,62 @@
+/** Every word with which the interface refuses a request. The pages show the same words beside the field. */
+import { FIRST_YEAR, LAST_YEAR } from '../../types';
+
+const listed = (values: readonly string[]): string => values.join(', ');
+/** What a visitor wrote, cut short so that a message stays a message. */
+const quoted = (value: string): string =>
+	`“${value.length > 40 ? `${value.slice(0, 40)}…` : value}”`;
+
+export const interfaceText = {
+	malformed: {
+		query: 'The address cannot be read: a % must be followed by two hexadecimal figures.',
+		unknown: (name: string, accepted: readonly string[]) =>
+			accepted.length === 0
+				? `There is no parameter ${quoted(name)} here; none is taken.`
+				: `There is no parameter ${quoted(name)} here. Taken: ${listed(accepted)}.`,
+		repeated: (name: string) => `${name} is given more than once.`,
+		json: 'The body is no JSON.',
+		notAnObject: 'The body must be one JSON object.',
+		contextObject: 'context must be an object.',
+		notText: (name: string) => `${name} must be a text.`,
+		limit: (most: number) => `limit is a whole number from 1 to ${most}.`,
+		cursor: 'The cursor is none of ours, or belongs to another list or other filters.',
+		cursorEdition: (edition: number) => `The cursor belongs to edition ${edition}.`,
+		edition: 'An edition is a whole number.',
+		choice: (name: string, accepted: readonly string[]) => `${name} is one of ${listed(accepted)}.`
+	},
+	invalid: {
+		kind: (value: string, accepted: readonly string[]) =>
+			`${quoted(value)} is no kind of stamp. Taken: ${listed(accepted)}.`,
+		kindNotAvailable: (kind: string, accepted: readonly string[]) =>
+			`Stamps of kind ${kind} cannot be read yet. Taken: ${listed(accepted)}.`,
+		tagFields: 'Body tags cannot be read yet, and so no fields of one.',
+		contextSerial: 'A serial cannot be taken as context yet. Give maker, division and year.',
+		field: (value: string) => `${quoted(value)} is no field of a reading.`,
+		maker: (value: string) => `We know no maker by the name of ${quoted(value)}.`,
+		division: (value: string) => `We know no division by the name of ${quoted(value)}.`,
+		divisionOfMaker: (division: string, maker: string) => `${division} is no division of ${maker}.`,
+		year: `A model year is a whole number from ${FIRST_YEAR} to ${LAST_YEAR}.`,
+		plant: 'A plant code has 3 characters at most.',
+		search: (most: number) => `A search has ${most} characters at most.`,
+		twice: (name: string) => `${name} is given both beside the text and in context.`
+	},
+	unknown: {
+		path: 'Nothing stands at this address. /api/v1/openapi.json lists what does.',
+		edition: (number: number) => `There is no edition ${number}.`,
+		maker: (value: string) => `We keep no tables of ${quoted(value)}.`,
+		table: (value: string) => `There is no table ${quoted(value)}.`,
+		tableOfMaker: (table: string, maker: string) => `${maker} has no rows in table ${table}.`,
+		row: (key: string, edition: number) => `Edition ${edition} has no row ${quoted(key)}.`,
+		rowEver: (key: string) => `No edition has a row ${quoted(key)}.`,
+		source: (key: string, edition: number) => `Edition ${edition} has no source ${quoted(key)}.`
+	},
+	method: (method: string, allowed: readonly string[]) =>
+		`${quoted(method)} is not answered here. Taken: ${listed(allowed)}.`,
+	notAcceptable: (types: readonly string[]) => `We can answer in ${listed(types)}.`,
+	tooLarge: (most: number) => `The body may hold ${most.toLocaleString('en-US')} bytes.`,
+	mediaType: 'The body must be application/json, in UTF-8, not compressed.',
+	tooMany: (seconds: number) =>
+		`Too many requests from this address. Ask again in ${seconds} ${seconds === 1 ? 'second' : 'seconds'}.`,
+	unavailable: 'The tables are not in memory yet. Ask again in a moment.',
+	internal: (id: string) => `Something broke on our side. Error ${id}.`
+} as const;
