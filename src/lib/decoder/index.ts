@@ -2,5 +2,20 @@
  * The decoder's public face: pure functions over tables that come in as an argument.
  * No I/O, no framework; would run unchanged in a browser.
  */
-export type { CompiledRow, CompiledTable, TableSet } from './engine/table-set';
-export { tableId } from './engine/table-set';
+export { examineText, normalise, type TextFault } from './engine/characters';
+export { checkDigitOf } from './engine/check-digit';
+export { compareRows, overlaps, saysTheSame } from './engine/compare';
+export { compile, compileInSteps } from './engine/compile';
+export { scopeText } from './engine/field';
+export type { Layout } from './engine/layout';
+export { strengthOf } from './engine/strength';
+export {
+	rowsInYear,
+	tableId,
+	type CodeEntry,
+	type CompiledRow,
+	type CompiledTable,
+	type TableSet
+} from './engine/table-set';
+export { LAYOUTS } from './layouts';
+export { candidatesOf, read, type ReadRequest } from './read';

@@ -52,6 +52,8 @@ export interface Possible {
 	readonly code?: string;
 	readonly meaning: string;
 	readonly values: RowValues;
+	/** Where this meaning holds, in words: "Chevrolet, Camaro, 1967–69". */
+	readonly scope?: string;
 }
 /** A question that the reader put to the tables; `row_key` is null for a miss. */
 export interface Lookup {

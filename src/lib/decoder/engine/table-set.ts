@@ -8,6 +8,7 @@ import type {
 	Strength,
 	TableName
 } from '../../types';
+import { FIRST_YEAR } from '../../types';
 
 /** A row with all that an edition fixes about it: strength, the sentence behind it, its sources. */
 export interface CompiledRow extends ReferenceRow {
@@ -17,6 +18,17 @@ export interface CompiledRow extends ReferenceRow {
 	readonly citations: readonly Citation[];
 	/** Keys of the live rows that say something else of the same code and scope. */
 	readonly contested_by: readonly string[];
+	/** Whether a citation above memory and common practice speaks for it. */
+	readonly cited: boolean;
+	/** Scope columns that are set: a narrower row stands before a wider one. */
+	readonly narrowness: number;
+}
+
+/** Rows of one code: all of them, and those of each model year (`years[year - 1955]`). */
+export interface CodeEntry {
+	readonly code: string;
+	readonly all: readonly CompiledRow[];
+	readonly years: readonly (readonly CompiledRow[] | undefined)[];
 }
 
 /** The rows of one maker and table, in canonical order. */
@@ -24,9 +36,10 @@ export interface CompiledTable {
 	readonly maker: Maker;
 	readonly table: TableName;
 	readonly rows: readonly CompiledRow[];
-	/** Rows by code and, within it, by model year; `years[y - 1955]`. Frozen by convention, never changed. */
-	readonly byCode: ReadonlyMap<string, readonly (readonly CompiledRow[] | undefined)[]>;
+	readonly byCode: ReadonlyMap<string, CodeEntry>;
 	readonly claims: readonly Claim[];
+	/** Equal fingerprints: the table is the same and is shared between editions. */
+	readonly fingerprint: string;
 }
 
 /** Everything one edition says, compiled once and immutable. Unchanged tables are shared between editions. */
@@ -38,3 +51,10 @@ export interface TableSet {
 }
 
 export const tableId = (maker: Maker, table: TableName): string => `${maker}/${table}`;
+
+const NO_ROWS: readonly CompiledRow[] = [];
+
+/** Rows of an entry that hold in a model year; all of them when the year is open. */
+export function rowsInYear(entry: CodeEntry, year: number | null): readonly CompiledRow[] {
+	return year === null ? entry.all : (entry.years[year - FIRST_YEAR] ?? NO_ROWS);
+}

@@ -1,0 +1,19 @@
+/** Every layout that readings try, and nothing else: adding one here adds it to the product. */
+import { prepare, type PreparedLayout } from '../engine/fit';
+import type { Layout } from '../engine/layout';
+import { chrysler1966 } from './chrysler-1966-1980';
+import { ford1960 } from './ford-1960-1980';
+import { gm1965 } from './gm-1965-1971';
+import { gm1972 } from './gm-1972-1980';
+import { iso17, iso17FewVehicles } from './iso-17';
+
+export const LAYOUTS: readonly Layout[] = [
+	gm1965,
+	gm1972,
+	chrysler1966,
+	ford1960,
+	iso17,
+	iso17FewVehicles
+];
+
+export const PREPARED: readonly PreparedLayout[] = LAYOUTS.map(prepare);
