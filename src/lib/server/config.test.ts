@@ -30,7 +30,8 @@ describe('readConfig', () => {
 	});
 
 	it('makes the origin from host and port, and brackets an IPv6 address', () => {
-		expect(read({ HOST: '::1', PORT: '80' }).origin).toBe('http://[::1]:80');
+		expect(read({ HOST: '::1', PORT: '8080' }).origin).toBe('http://[::1]:8080');
+		expect(read({ HOST: '0.0.0.0', PORT: '8080' }).origin).toBe('http://127.0.0.1:8080');
 	});
 
 	it('takes an origin without its closing slash', () => {

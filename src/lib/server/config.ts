@@ -90,6 +90,12 @@ export class ConfigurationError extends Error {
 	override readonly name = 'ConfigurationError';
 }
 
+/** The name to open; every address of the machine has loopback among them. */
+const shownHost = (host: string) => {
+	if (host === '0.0.0.0' || host === '::') return '127.0.0.1';
+	return host.includes(':') ? `[${host}]` : host;
+};
+
 type Environment = Readonly<Record<string, string | undefined>>;
 
 const complaint = (name: string, expected: string, environment: Environment) => {
@@ -116,12 +122,11 @@ export function readConfig(environment: Environment): Config {
 		throw new ConfigurationError([...new Set(lines)].join('\n'));
 	}
 	const { data } = parsed;
-	const shownHost = data.HOST.includes(':') ? `[${data.HOST}]` : data.HOST;
 	return Object.freeze({
 		databaseUrl: data.DATABASE_URL,
 		host: data.HOST,
 		port: data.PORT,
-		origin: data.ORIGIN ?? `http://${shownHost}:${data.PORT}`,
+		origin: data.ORIGIN ?? `http://${shownHost(data.HOST)}:${data.PORT}`,
 		demo: data.DEMO === 'on',
 		logLevel: data.LOG_LEVEL,
 		readingsPerMinute: data.READINGS_PER_MINUTE,

@@ -1,0 +1,33 @@
+// The built application, as the server takes it in.
+import { existsSync } from 'node:fs';
+import { join } from 'node:path';
+import { pathToFileURL } from 'node:url';
+import { VISITOR_HEADERS } from './visitor.mjs';
+
+/**
+ * What the application hands over once it is loaded (src/lib/server/handover.ts).
+ * @typedef {import('../../src/lib/server/handover').Handover} Handover
+ * @typedef {import('./create-server.mjs').Handler} Handler
+ */
+
+/** Known on both sides of the bundle's border. */
+const HANDOVER = Symbol.for('tallyplate.handover');
+
+/**
+ * Loads the build. Its configuration is read from the environment and checked on the way.
+ * @param {string} build
+ * @returns {Promise<Handover & { handler: Handler }>}
+ */
+export async function loadApplication(build) {
+	const entry = join(build, 'handler.js');
+	if (!existsSync(entry)) throw new Error(`There is no build in ${build}. Run: npm run build`);
+	// The adapter takes these from where the server leaves them.
+	process.env.ADDRESS_HEADER = VISITOR_HEADERS.address;
+	process.env.PROTOCOL_HEADER = VISITOR_HEADERS.protocol;
+	process.env.HOST_HEADER = VISITOR_HEADERS.host;
+	const { handler } = await import(pathToFileURL(entry).href);
+	/** @type {Handover | undefined} */
+	const handover = /** @type {any} */ (globalThis)[HANDOVER];
+	if (!handover) throw new Error('The build does not hand over its configuration.');
+	return { ...handover, handler };
+}

@@ -1,0 +1,148 @@
+// The product's own HTTP server, around the handler that the build made.
+import { randomBytes } from 'node:crypto';
+import { createServer as createHttpServer } from 'node:http';
+import { chooseEncoding } from './compression.mjs';
+import { FixedReadings, keyOf } from './fixed-readings.mjs';
+import { GuardedResponse, splitAddress } from './guarded-response.mjs';
+import { answerClientError, refuseEarly } from './refusals.mjs';
+import { introduce, originsOf, visitorAddress } from './visitor.mjs';
+
+/**
+ * @typedef {import('node:http').IncomingMessage} Request
+ * @typedef {(request: Request, response: import('node:http').ServerResponse, next: () => void) => unknown} Handler
+ *
+ * @typedef {object} Settings
+ * @property {string} origin
+ * @property {number} trustProxy how many proxies stand in front
+ * @property {number} bodyLimit bytes
+ *
+ * @typedef {object} Events what becomes of each request, for the log
+ * @property {((request: Request, response: GuardedResponse, started: number) => void) | null} answered
+ * @property {(error: unknown, requestId: string) => void} failed
+ *
+ * @typedef {object} Options
+ * @property {Handler} handler
+ * @property {Settings} settings
+ * @property {Events} [events]
+ * @property {import('./client-files.mjs').ClientFiles} [files]
+ * @property {FixedReadings} [readings]
+ */
+
+const MAX_HEADER_BYTES = 64 * 1024;
+/** A little longer than the balancers in front keep theirs, so that it is they who close. */
+const KEEP_ALIVE_MS = 65_000;
+const HEADERS_TIMEOUT_MS = 20_000;
+const REQUEST_TIMEOUT_MS = 60_000;
+
+/** @type {import('./client-files.mjs').ClientFiles} */
+const NO_FILES = { paths: new Set(), policies: new Map() };
+
+/** @type {Events} */
+const UNHEARD = {
+	answered: null,
+	failed: (error) => {
+		throw error;
+	}
+};
+
+/** Ids that are told apart within and between processes. */
+function requestIds() {
+	const start = randomBytes(6).toString('hex');
+	let count = 0;
+	return () => `${start}-${(count++).toString(36)}`;
+}
+
+const PASSED_ID = /^[\w-]{8,64}$/;
+
+/**
+ * Makes a server that does not listen yet.
+ * @param {Options} options
+ * @returns {{ server: import('node:http').Server, drain: () => void }} `drain`: /readyz says so from
+ *   now on, and connections close after their answer
+ */
+export function createServer({
+	handler,
+	settings,
+	events = UNHEARD,
+	files = NO_FILES,
+	readings = new FixedReadings()
+}) {
+	const { origin, trustProxy, bodyLimit } = settings;
+	const secure = origin.startsWith('https:');
+	const originOf = originsOf(origin);
+	const nextId = requestIds();
+	const isFile = (/** @type {string} */ path) => files.paths.has(path);
+	let draining = false;
+
+	const surroundings = {
+		secure,
+		pagePolicy: (/** @type {string} */ path) => files.policies.get(path),
+		isDraining: () => draining
+	};
+	class Response extends GuardedResponse {
+		/** @override */
+		get surroundings() {
+			return surroundings;
+		}
+	}
+
+	/** @param {Request} request @param {GuardedResponse} response */
+	async function answer(request, response) {
+		const passed = request.headers['x-request-id'];
+		const id =
+			trustProxy > 0 && typeof passed === 'string' && PASSED_ID.test(passed) ? passed : nextId();
+		response.requestId = id;
+		if (events.answered) {
+			const started = performance.now();
+			response.once('close', () => events.answered?.(request, response, started));
+		}
+		try {
+			const key = keyOf(request);
+			if (key !== null && (await sendKept(key, request, response))) return;
+			if (draining && splitAddress(request.url)[0] === '/readyz') return sayDraining(response);
+			if (refuseEarly(request, response, { bodyLimit, isFile })) return;
+			request.headers['x-request-id'] = id;
+			introduce(request, originOf(request.headers.host), visitorAddress(request, trustProxy));
+			if (key !== null) response.keep = (...answered) => void readings.keep(key, ...answered);
+			await handler(request, response, () => response.writeHead(404).end());
+		} catch (error) {
+			if (response.headersSent) response.destroy();
+			else response.writeHead(500).end();
+			events.failed(error, id);
+		}
+	}
+
+	/** @param {string} key @param {Request} request @param {GuardedResponse} response */
+	async function sendKept(key, request, response) {
+		const entry = readings.get(key);
+		if (!entry) return false;
+		const encoding = chooseEncoding(request.headers['accept-encoding']) ?? 'identity';
+		const form = entry.forms.get(encoding) ?? (await readings.formOf(entry, encoding));
+		response.sendReady(isKnown(request.headers['if-none-match'], entry.etag), form);
+		return true;
+	}
+
+	const server = createHttpServer(
+		{
+			ServerResponse: Response,
+			maxHeaderSize: MAX_HEADER_BYTES,
+			keepAliveTimeout: KEEP_ALIVE_MS,
+			headersTimeout: HEADERS_TIMEOUT_MS,
+			requestTimeout: REQUEST_TIMEOUT_MS
+		},
+		(request, response) => void answer(request, response)
+	);
+	server.on('clientError', (error, socket) => answerClientError(error, socket, secure));
+	return { server: /** @type {any} */ (server), drain: () => void (draining = true) };
+}
+
+/** Whether the asker has what a tag names. @param {string | undefined} asked @param {string | undefined} tag */
+const isKnown = (asked, tag) =>
+	asked !== undefined && tag !== undefined && asked.includes(tag.replace(/^W\//, ''));
+
+/** @param {GuardedResponse} response */
+function sayDraining(response) {
+	response.setHeader('content-type', 'application/json');
+	response.setHeader('cache-control', 'no-store');
+	response.writeHead(503).end(JSON.stringify({ status: 'draining' }));
+}

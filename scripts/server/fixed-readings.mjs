@@ -1,0 +1,156 @@
+// Readings that can never change, kept ready: those that name both edition and reader.
+import { compressWhole, SMALLEST, weakTag } from './compression.mjs';
+
+const READINGS = '/api/v1/readings?';
+/** Larger answers are rare, and would push out many small ones. */
+const LARGEST = 256 * 1024;
+/** What an entry costs beside its bodies: key, headers, bookkeeping. */
+const OVERHEAD = 1024;
+
+/**
+ * @typedef {'identity' | import('./compression.mjs').Encoding} Form
+ *
+ * @typedef {object} Entry
+ * @property {[name: string, value: string][]} headers as the application and the server set them
+ * @property {string | undefined} etag
+ * @property {Map<Form, { body: Buffer, head: string[] }>} forms ready to be sent
+ * @property {number} bytes
+ * @property {boolean} held false once pushed out, perhaps while a form is being made
+ */
+
+/**
+ * The key of a request whose answer could be kept, or null.
+ * @param {import('node:http').IncomingMessage} request
+ * @returns {string | null} parameters in order of their names, decoded
+ */
+export function keyOf(request) {
+	const { method, url = '', headers } = request;
+	if (method !== 'GET' || !url.startsWith(READINGS)) return null;
+	if (headers.cookie !== undefined || headers.authorization !== undefined) return null;
+	const { accept } = headers;
+	if (accept !== undefined && !/\*\/\*|application\/(?:json|\*)/.test(accept)) return null;
+	const query = url.slice(READINGS.length);
+	if (!query.includes('edition=') || !query.includes('reader=')) return null;
+	const parameters = [...new URLSearchParams(query)];
+	// Order of equal names is kept: which of them counts is the application's decision.
+	parameters.sort(([a], [b]) => (a < b ? -1 : a > b ? 1 : 0));
+	return JSON.stringify(parameters);
+}
+
+/** Headers that belong to one answer and not to what is kept. */
+const OWN_TO_ONE = new Set(['connection', 'content-length', 'date', 'x-request-id']);
+
+/** A bounded store; what was not asked for longest goes first. */
+export class FixedReadings {
+	/** @type {Map<string, Entry>} oldest use first */
+	#entries = new Map();
+	#bytes = 0;
+	#most;
+	#mostBytes;
+
+	/** @param {{ most?: number, mostBytes?: number }} [bounds] */
+	constructor({ most = 20_000, mostBytes = 64 * 1024 * 1024 } = {}) {
+		this.#most = most;
+		this.#mostBytes = mostBytes;
+	}
+
+	get size() {
+		return this.#entries.size;
+	}
+
+	get bytes() {
+		return this.#bytes;
+	}
+
+	/** @param {string} key @returns {Entry | undefined} */
+	get(key) {
+		const entry = this.#entries.get(key);
+		if (entry) {
+			this.#entries.delete(key);
+			this.#entries.set(key, entry);
+		}
+		return entry;
+	}
+
+	/**
+	 * Keeps an answer when it says of itself that it cannot change.
+	 * @param {string} key
+	 * @param {number} status
+	 * @param {import('node:http').OutgoingHttpHeaders} headers
+	 * @param {Buffer} body as it was before compression
+	 * @returns {boolean} whether it was kept
+	 */
+	keep(key, status, headers, body) {
+		if (!isFixed(status, headers) || body.length > LARGEST) return false;
+		/** @type {[string, string][]} */
+		const kept = [];
+		for (const [name, value] of Object.entries(headers)) {
+			if (!OWN_TO_ONE.has(name) && value !== undefined) kept.push([name, String(value)]);
+		}
+		const etag = headers.etag === undefined ? undefined : String(headers.etag);
+		/** @type {Entry} */
+		const entry = { headers: kept, etag, forms: new Map(), bytes: OVERHEAD, held: true };
+		this.#drop(key);
+		this.#entries.set(key, entry);
+		this.#bytes += entry.bytes;
+		this.#addForm(entry, 'identity', body);
+		return true;
+	}
+
+	/**
+	 * The body in a form, made at the first request for it.
+	 * @param {Entry} entry @param {Form} form
+	 */
+	async formOf(entry, form) {
+		const ready = entry.forms.get(form);
+		if (ready) return ready;
+		const plain = entry.forms.get('identity');
+		if (!plain) throw new Error('a kept reading has no body');
+		if (form === 'identity' || plain.body.length < SMALLEST) return plain;
+		return this.#addForm(entry, form, await compressWhole(plain.body, form));
+	}
+
+	/** @param {Entry} entry @param {Form} form @param {Buffer} body */
+	#addForm(entry, form, body) {
+		// Two first requests may have compressed at the same time.
+		const ready = entry.forms.get(form);
+		if (ready) return ready;
+		const head = entry.headers.flatMap(([name, value]) => [
+			name,
+			name === 'etag' && form !== 'identity' ? weakTag(value) : value
+		]);
+		if (form !== 'identity') head.push('content-encoding', form);
+		head.push('content-length', String(body.length));
+		const made = { body, head };
+		entry.forms.set(form, made);
+		entry.bytes += body.length;
+		if (entry.held) this.#bytes += body.length;
+		this.#shrink();
+		return made;
+	}
+
+	#shrink() {
+		for (const key of this.#entries.keys()) {
+			if (this.#entries.size <= this.#most && this.#bytes <= this.#mostBytes) return;
+			this.#drop(key);
+		}
+	}
+
+	/** @param {string} key */
+	#drop(key) {
+		const entry = this.#entries.get(key);
+		if (!entry) return;
+		this.#entries.delete(key);
+		entry.held = false;
+		this.#bytes -= entry.bytes;
+	}
+}
+
+/**
+ * Whether an answer says of itself that it will never change.
+ * @param {number} status @param {import('node:http').OutgoingHttpHeaders} headers
+ */
+export const isFixed = (status, headers) =>
+	status === 200 &&
+	/\bimmutable\b/.test(String(headers['cache-control'] ?? '')) &&
+	headers['set-cookie'] === undefined;
