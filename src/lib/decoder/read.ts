@@ -23,10 +23,13 @@ export interface ReadRequest {
 	readonly context?: ReadContext;
 	/** Whether fields carry the questions that they put to the tables. */
 	readonly lookups?: boolean;
+	/** The layouts to try: those of the product when left out. */
+	readonly layouts?: readonly PreparedLayout[];
 }
 
 /** Shortest serial; what is shorter is read as a beginning. */
-const SHORTEST = Math.min(...PREPARED.map(({ layout }) => layout.length));
+const shortest = (layouts: readonly PreparedLayout[]): number =>
+	Math.min(...layouts.map(({ layout }) => layout.length));
 /** Up to so many characters, a text without a kind is first taken as a bare code. */
 const LIKELY_CODE = 3;
 
@@ -41,11 +44,11 @@ export interface Candidate {
  */
 export function candidatesOf(
 	cells: readonly Cell[],
-	prepared: readonly PreparedLayout[] = PREPARED
+	layouts: readonly PreparedLayout[] = PREPARED
 ): Candidate[] {
-	const partial = cells.length < SHORTEST;
+	const partial = cells.length < shortest(layouts);
 	const found: Candidate[] = [];
-	for (const own of prepared) {
+	for (const own of layouts) {
 		if (partial ? cells.length > own.layout.length : cells.length !== own.layout.length) continue;
 		if (!fits(own, cells)) continue;
 		const missing = own.layout.length - cells.length;
@@ -88,18 +91,19 @@ function readSerial(
 	characters: Characters,
 	tables: TableSet,
 	context: ReadContext,
-	lookups: boolean
+	lookups: boolean,
+	layouts: readonly PreparedLayout[]
 ): Serial {
 	const { cells } = characters;
-	const candidates = candidatesOf(cells);
+	const candidates = candidatesOf(cells, layouts);
 	const drafts: Draft[] = [];
 	for (const { prepared, years } of candidates)
 		for (const year of years) drafts.push(...draftsOf(prepared, cells, year, tables, context));
 	const { readings, more } = ranked(drafts, context, lookups);
 	const [first] = readings;
-	if (first === undefined) return { readings, more, problems: [misfit(PREPARED, cells)] };
+	if (first === undefined) return { readings, more, problems: [misfit(layouts, cells)] };
 	const own = candidates.find(({ prepared }) => prepared.layout.id === first.layout) as Candidate;
-	const bare = bareSequence(PREPARED, cells);
+	const bare = bareSequence(layouts, cells);
 	return {
 		readings,
 		more,
@@ -116,7 +120,7 @@ function readSerial(
  * @example read(tables, { text: 'RM23N0Gxxxxxx' }).readings[0]?.model_year // 1970
  */
 export function read(tables: TableSet, request: ReadRequest): ReadResult {
-	const { text, kind, context = {}, lookups = false } = request;
+	const { text, kind, context = {}, lookups = false, layouts = PREPARED } = request;
 	const characters = normalise(text);
 	const { normalised, cells } = characters;
 	const input = (own: StampKind | null) => ({ kind: own, text, normalised });
@@ -124,12 +128,12 @@ export function read(tables: TableSet, request: ReadRequest): ReadResult {
 		return { input: input(kind ?? null), readings: [], more: 0, problems: [] };
 	const foreign = normalised === text ? [] : foreignLetters(text, characters);
 	const asCode =
-		kind === 'code' || (kind === undefined && cells.length < SHORTEST)
+		kind === 'code' || (kind === undefined && cells.length < shortest(layouts))
 			? readCode(characters, tables, context, lookups)
 			: null;
 	if (kind === 'code' && asCode !== null)
 		return { input: input('code'), ...asCode, problems: [...foreign, ...asCode.problems] };
-	const serial = readSerial(characters, tables, context, lookups);
+	const serial = readSerial(characters, tables, context, lookups, layouts);
 	if (asCode === null || asCode.readings.length === 0)
 		return { input: input('serial'), ...serial, problems: [...foreign, ...serial.problems] };
 	const codeFirst = cells.length <= LIKELY_CODE || serial.readings.length === 0;

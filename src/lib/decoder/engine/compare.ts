@@ -15,7 +15,8 @@ export function compareRows(a: ReferenceRow, b: ReferenceRow): number {
 	);
 }
 
-function canonical(value: unknown): string {
+/** JSON with the keys of every object sorted by code unit: one text for one content. */
+export function canonicalJson(value: unknown): string {
 	return JSON.stringify(value, (_, inner: unknown) =>
 		typeof inner === 'object' && inner !== null && !Array.isArray(inner)
 			? Object.fromEntries(Object.entries(inner).sort(([a], [b]) => byUnit(a, b)))
@@ -27,7 +28,7 @@ function canonical(value: unknown): string {
 export const saysTheSame = (
 	a: Pick<ReferenceRow, 'meaning' | 'values'>,
 	b: Pick<ReferenceRow, 'meaning' | 'values'>
-): boolean => a.meaning === b.meaning && canonical(a.values) === canonical(b.values);
+): boolean => a.meaning === b.meaning && canonicalJson(a.values) === canonicalJson(b.values);
 
 /**
  * Whether two rows of one code hold for the same cars: their years meet, and each scope column is either

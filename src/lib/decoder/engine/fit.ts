@@ -1,5 +1,5 @@
 /** Which layouts a text fits, and how the nearest one fails. */
-import { ANY, DIGITS, isRead, LETTERS, UNREAD, type Cell } from './characters';
+import { DIGITS, LETTERS, UNREAD, type Cell } from './characters';
 import type { Layout } from './layout';
 
 /** A layout with a table of the characters that each place allows, made once. */
@@ -82,16 +82,6 @@ export type Expected = 'figure' | 'letter' | 'one_of';
 /** How to name a set of allowed characters. */
 export function expectedOf(allowed: string): Expected {
 	const only = (set: string): boolean => [...allowed].every((character) => set.includes(character));
-	if (allowed.length < 9) return 'one_of';
-	if (only(DIGITS)) return 'figure';
-	return only(LETTERS) ? 'letter' : 'one_of';
-}
-
-/** The cells restricted to what each place allows: an unread place in a figures-only field is a figure. */
-export function restrict(prepared: PreparedLayout, cells: readonly Cell[]): Cell[] {
-	return cells.map((cell, index) => {
-		if (cell === UNREAD || isRead(cell)) return cell;
-		const allowed = prepared.allowed[index] ?? ANY;
-		return [...cell].filter((character) => allowed.includes(character)).join('');
-	});
+	if (allowed.length > 6 && only(DIGITS)) return 'figure';
+	return allowed.length > 6 && only(LETTERS) ? 'letter' : 'one_of';
 }

@@ -91,7 +91,8 @@ export function choose(candidates: readonly CompiledRow[], scope: Scope): Answer
 	const sure = unbound.length > 0 ? unbound : holding;
 	if (open.length === 0) return sure.length === 0 ? MISSING : settle(sure);
 	const all = [...sure, ...open];
-	if (groupByMeaning(all).length === 1) return { kind: 'found', rows: all };
+	// Only a row that surely holds can carry those that may: alone, they name a line or plant that nobody has read.
+	if (sure.length > 0 && groupByMeaning(all).length === 1) return { kind: 'found', rows: all };
 	return { kind: 'depends', on, rows: all };
 }
 

@@ -6,11 +6,11 @@ import { fieldsOf, type Draft } from './reading';
 /** At most so many readings come back; the rest is counted. */
 export const MOST_READINGS = 24;
 
-/** What speaks for a reading, strongest argument first; smaller is better. */
+/** What speaks for and against a reading, strongest argument first. */
 interface Key {
 	readonly notUsed: number;
 	readonly hintsMissed: number;
-	readonly notFound: number;
+	readonly found: number;
 	readonly thin: number;
 }
 
@@ -31,21 +31,22 @@ function hintsMissed(draft: Draft, context: ReadContext): number {
 
 function keyOf(draft: Draft, context: ReadContext): Key {
 	let notUsed = 0;
-	let notFound = 0;
+	let found = 0;
 	let thin = 0;
 	for (const { field, counts } of draft.results) {
 		if (field.outcome === 'not_used') notUsed += 1;
 		if (field.derived_from !== undefined || GIVEN_BY_LAYOUT.has(field.name)) continue;
-		if (!counts) notFound += 1;
-		else if (field.strength === 'thin') thin += 1;
+		if (!counts) continue;
+		found += 1;
+		if (field.strength === 'thin') thin += 1;
 	}
-	return { notUsed, hintsMissed: hintsMissed(draft, context), notFound, thin };
+	return { notUsed, hintsMissed: hintsMissed(draft, context), found, thin };
 }
 
 const compareKeys = (a: Key, b: Key): number =>
 	Math.sign(a.notUsed) - Math.sign(b.notUsed) ||
 	a.hintsMissed - b.hintsMissed ||
-	a.notFound - b.notFound ||
+	b.found - a.found ||
 	a.thin - b.thin;
 
 function whyOf(draft: Draft, key: Key, first: Key, alone: boolean): string {
@@ -62,7 +63,7 @@ function whyOf(draft: Draft, key: Key, first: Key, alone: boolean): string {
 	if (alone) return parts.join(' ');
 	if (compareKeys(key, first) === 0) parts.push(words.equal);
 	else if (key.hintsMissed > first.hintsMissed) parts.push(words.fewerHints);
-	else if (key.notFound > first.notFound) parts.push(words.fewerFound);
+	else if (key.found < first.found) parts.push(words.fewerFound);
 	else if (key.thin > first.thin) parts.push(words.thinner);
 	return parts.join(' ');
 }
