@@ -77,6 +77,19 @@ function servesFolder(pid, dir) {
 	return !existsSync(commandLine) || readFileSync(commandLine, 'utf8').includes(dir);
 }
 
+/**
+ * Port and passwords of the server that runs in a folder; undefined when none does.
+ * @param {string} dir
+ * @returns {Access | undefined}
+ */
+export function runningAccess(dir) {
+	const file = join(dir, 'owner.json');
+	if (!existsSync(file)) return undefined;
+	const { server } = JSON.parse(readFileSync(file, 'utf8'));
+	if (!server || !servesFolder(server, dir)) return undefined;
+	return JSON.parse(readFileSync(join(dir, 'access.json'), 'utf8'));
+}
+
 /** @param {number} pid @param {number} timeoutMs */
 async function gone(pid, timeoutMs) {
 	for (const until = Date.now() + timeoutMs; isAlive(pid) && Date.now() < until;) await pause(25);

@@ -1,0 +1,82 @@
+// npm start: from a fresh clone to a running product. Node built-ins only, until packages are there.
+import { endCommands } from './lib/commands.mjs';
+import { ensureBuild } from './lib/build.mjs';
+import { fillDatabase, openDatabase } from './lib/own-database.mjs';
+import { ensurePackages, packagesAreThere } from './lib/packages.mjs';
+import { BUILD } from './lib/project.mjs';
+import { sayError } from './lib/say-error.mjs';
+import { authSecret } from './lib/secrets.mjs';
+import { announce, seconds, step } from './lib/steps.mjs';
+import { checkPort, serve } from './server/serve.mjs';
+
+const LOOPBACK = /^(?:localhost|127(?:\.\d+){3}|::1)$/;
+
+/** What was started, last first, and how to stop it. @type {(() => Promise<void>)[]} */
+const toStop = [];
+let stopping = false;
+
+/** @param {number} code */
+async function stopAll(code) {
+	if (stopping) return;
+	stopping = true;
+	endCommands();
+	for (const stop of toStop.splice(0).reverse()) await stop();
+	process.exit(code);
+}
+
+const SIGNAL_CODES = { SIGINT: 130, SIGTERM: 143, SIGHUP: 129 };
+let open = false;
+for (const [signal, code] of Object.entries(SIGNAL_CODES))
+	process.on(signal, () => {
+		if (!stopping) console.log('\n  Stopping …');
+		void stopAll(open ? 0 : code);
+	});
+
+async function start() {
+	const started = performance.now();
+	const host = process.env.HOST || '127.0.0.1';
+	// Before the long steps, so that nobody waits for a build to hear that the port is taken. What is
+	// no port at all, the configuration says later, as of every other variable.
+	const port = Number(process.env.PORT || 3000);
+	if (Number.isInteger(port) && port >= 0 && port < 65_536) await checkPort(host, port);
+
+	console.log('Tallyplate');
+	if (!packagesAreThere()) announce('Installing packages');
+	await step('Packages', async (say) => say((await ensurePackages()) ? 'installed' : 'in place'));
+	const database = await openDatabase();
+	toStop.push(database.stop);
+	// One waits for the disk, the other for the processor.
+	await Promise.all([
+		fillDatabase(database),
+		step('Build', async (say) => say((await ensureBuild()) ? 'built' : 'in place'))
+	]);
+	const running = await step('Server', async (say) => {
+		process.env.NODE_ENV = 'production';
+		process.env.DATABASE_URL = database.url;
+		process.env.AUTH_SECRET ||= authSecret();
+		// Made-up people only where nobody but this machine's user can meet them.
+		process.env.DEMO ||= database.own && LOOPBACK.test(host) ? 'on' : 'off';
+		// The terminal is for people; LOG_LEVEL=info shows each request.
+		process.env.LOG_LEVEL ||= 'warn';
+		const running = await serve({ build: BUILD });
+		say(`listening on ${host}:${running.port}`);
+		return running;
+	});
+	toStop.push(() => running.close('stop'));
+	open = true;
+	console.log(`\nOpen ${running.origin}`);
+	console.log(
+		`Ready after ${seconds(performance.now() - started)}. Ctrl-C stops all that was started.`
+	);
+}
+
+try {
+	await start();
+} catch (error) {
+	// A signal that ends a step is no failure of that step.
+	if (!stopping) {
+		console.log();
+		sayError(error);
+		await stopAll(1);
+	}
+}
