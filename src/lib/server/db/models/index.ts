@@ -1,0 +1,31 @@
+import type { Sequelize } from 'sequelize';
+import { defineCitation } from './citation';
+import { defineClaim } from './claim';
+import { defineEdition } from './edition';
+import { defineEditionCounter } from './edition-counter';
+import { defineReferenceRow } from './reference-row';
+import { defineReleaseConflict } from './release-conflict';
+import { defineReleaseLoad } from './release-load';
+import { defineSource } from './source';
+
+export type { CitationRecord } from './citation';
+export type { ClaimRecord } from './claim';
+export type { EditionRecord } from './edition';
+export type { ReferenceRowRecord } from './reference-row';
+export type { ReleaseConflictRecord } from './release-conflict';
+export type { ReleaseLoadRecord } from './release-load';
+export type { SourceRecord } from './source';
+export type { Versioned } from './versioned';
+
+/** Models are defined on a connection, so that several databases can be open at once. */
+export const defineModels = (sequelize: Sequelize) => ({
+	citations: defineCitation(sequelize),
+	claims: defineClaim(sequelize),
+	editionCounter: defineEditionCounter(sequelize),
+	editions: defineEdition(sequelize),
+	referenceRows: defineReferenceRow(sequelize),
+	releaseConflicts: defineReleaseConflict(sequelize),
+	releaseLoads: defineReleaseLoad(sequelize),
+	sources: defineSource(sequelize)
+});
+export type Models = ReturnType<typeof defineModels>;

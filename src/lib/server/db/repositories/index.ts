@@ -1,0 +1,6 @@
+export * as claims from './claims';
+export * as editions from './editions';
+export * as referenceRows from './reference-rows';
+export * as releases from './releases';
+export * as sources from './sources';
+export type { RowEntry, RowVersion } from './reference-rows';

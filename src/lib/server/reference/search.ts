@@ -1,0 +1,102 @@
+import Fuse from 'fuse.js';
+import { compareRows, type CompiledRow, type CompiledTable, type TableSet } from '../../decoder';
+import { MAKERS, TABLE_NAMES, type Maker, type Strength, type TableName } from '../../types';
+
+/** What is searched for. Everything is optional; a row that is open in a column fits every value of it. */
+export interface RowSearch {
+	/** Words, all of which a row has to have somewhere. */
+	readonly q?: string;
+	readonly maker?: Maker;
+	readonly table?: TableName;
+	/** A division's full name. */
+	readonly division?: string;
+	/** A model year. */
+	readonly year?: number;
+	readonly strength?: Strength;
+}
+/** Words of a query that are heeded, and characters of one: a longer one only costs time. */
+const MOST_WORDS = 6;
+const LONGEST_WORD = 32;
+
+const KEYS = [
+	{ name: 'code', weight: 3 },
+	{ name: 'meaning', weight: 2 },
+	{ name: 'line', weight: 1 },
+	{ name: 'division', weight: 1 },
+	{ name: 'note', weight: 0.5 }
+];
+
+/** Built when a table is first searched; a table that two editions share is indexed once. */
+const indexes = new WeakMap<CompiledTable, Fuse<CompiledRow>>();
+
+function indexOf(table: CompiledTable): Fuse<CompiledRow> {
+	let index = indexes.get(table);
+	if (!index) {
+		index = new Fuse(table.rows, {
+			keys: KEYS,
+			threshold: 0.3,
+			ignoreLocation: true,
+			ignoreDiacritics: true,
+			includeScore: true
+		});
+		indexes.set(table, index);
+	}
+	return index;
+}
+
+const wordsOf = (query: string): string[] =>
+	query
+		.trim()
+		.split(/\s+/)
+		.filter(Boolean)
+		.slice(0, MOST_WORDS)
+		.map((word) => word.slice(0, LONGEST_WORD));
+
+/** Rows of one table that have every word somewhere, the best first; a code typed exactly before all. */
+function find(
+	table: CompiledTable,
+	words: readonly string[]
+): { row: CompiledRow; score: number }[] {
+	const exact = words.length === 1 ? words[0]?.toUpperCase() : undefined;
+	const found = indexOf(table).search({
+		$and: words.map((word) => ({ $or: KEYS.map(({ name }) => ({ [name]: word })) }))
+	});
+	return found.map(({ item, score }) => ({
+		row: item,
+		score: item.code === exact ? -1 : (score ?? 1)
+	}));
+}
+
+function fits(row: CompiledRow, { division, year, strength }: RowSearch): boolean {
+	if (strength !== undefined && row.strength !== strength) return false;
+	if (division !== undefined && row.division.length > 0 && !row.division.includes(division))
+		return false;
+	if (year === undefined || row.years_from === null || row.years_to === null) return true;
+	return row.years_from <= year && year <= row.years_to;
+}
+
+/** The tables of a set by maker and then in the order of their definitions. */
+export const tablesInOrder = (tables: TableSet, search: RowSearch = {}): CompiledTable[] =>
+	[...tables.tables.values()]
+		.filter(({ maker }) => search.maker === undefined || maker === search.maker)
+		.filter(({ table }) => search.table === undefined || table === search.table)
+		.sort(
+			(a, b) =>
+				MAKERS.indexOf(a.maker) - MAKERS.indexOf(b.maker) ||
+				TABLE_NAMES.indexOf(a.table) - TABLE_NAMES.indexOf(b.table)
+		);
+
+/**
+ * Rows that fit and have every word of the query, by how well they match; without a query all that fit,
+ * in the order of the tables. Slips of spelling are forgiven.
+ */
+export function searchRows(tables: TableSet, search: RowSearch): CompiledRow[] {
+	const words = wordsOf(search.q ?? '');
+	const searched = tablesInOrder(tables, search);
+	if (words.length === 0)
+		return searched.flatMap((table) => table.rows.filter((row) => fits(row, search)));
+	return searched
+		.flatMap((table) => find(table, words).filter(({ row }) => fits(row, search)))
+		.sort((a, b) => a.score - b.score || compareRows(a.row, b.row))
+		.map(({ row }) => row);
+}
