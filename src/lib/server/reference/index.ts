@@ -34,7 +34,7 @@ export {
 	UnknownSourceError
 } from './errors';
 export { loadRelease, type LoadReport } from './load';
-export { searchRows, tablesInOrder, type RowSearch } from './search';
+export { searchRows, tablesInOrder, type RowFilters, type RowPage } from './search';
 export {
 	sourcesList,
 	sourceWithRows,
@@ -84,10 +84,14 @@ export const refresh = (): Promise<void> => started().edition.look();
  * An edition with its tables: from memory, or compiled, which takes its time.
  * @throws {UnknownEditionError} @throws {DatabaseAwayError} @throws {ServiceBusyError}
  */
-export async function tablesAt(number: number): Promise<CompiledEdition> {
+export async function editionAt(number: number): Promise<CompiledEdition> {
 	const { edition } = started();
 	return number === edition.status().tables ? edition.get() : edition.compiled.get(number);
 }
+
+/** The tables of an edition; see `editionAt`. */
+export const tablesAt = async (number: number): Promise<TableSet> =>
+	(await editionAt(number)).tables;
 
 /** Heads of editions, newest first, beginning below a number when one is given. @throws {DatabaseAwayError} */
 export const editions = (page: { below?: number; limit?: number } = {}): Promise<EditionHead[]> =>

@@ -2,10 +2,8 @@ import Fuse from 'fuse.js';
 import { compareRows, type CompiledRow, type CompiledTable, type TableSet } from '../../decoder';
 import { MAKERS, TABLE_NAMES, type Maker, type Strength, type TableName } from '../../types';
 
-/** What is searched for. Everything is optional; a row that is open in a column fits every value of it. */
-export interface RowSearch {
-	/** Words, all of which a row has to have somewhere. */
-	readonly q?: string;
+/** What narrows a search. Everything is optional; a row that is open in a column fits every value of it. */
+export interface RowFilters {
 	readonly maker?: Maker;
 	readonly table?: TableName;
 	/** A division's full name. */
@@ -14,6 +12,14 @@ export interface RowSearch {
 	readonly year?: number;
 	readonly strength?: Strength;
 }
+export interface RowPage {
+	readonly items: readonly CompiledRow[];
+	/** How many rows fit in all. */
+	readonly total: number;
+	/** Where the next page begins; null after the last. */
+	readonly next: number | null;
+}
+
 /** Words of a query that are heeded, and characters of one: a longer one only costs time. */
 const MOST_WORDS = 6;
 const LONGEST_WORD = 32;
@@ -67,7 +73,7 @@ function find(
 	}));
 }
 
-function fits(row: CompiledRow, { division, year, strength }: RowSearch): boolean {
+function fits(row: CompiledRow, { division, year, strength }: RowFilters): boolean {
 	if (strength !== undefined && row.strength !== strength) return false;
 	if (division !== undefined && row.division.length > 0 && !row.division.includes(division))
 		return false;
@@ -76,7 +82,7 @@ function fits(row: CompiledRow, { division, year, strength }: RowSearch): boolea
 }
 
 /** The tables of a set by maker and then in the order of their definitions. */
-export const tablesInOrder = (tables: TableSet, search: RowSearch = {}): CompiledTable[] =>
+export const tablesInOrder = (tables: TableSet, search: RowFilters = {}): CompiledTable[] =>
 	[...tables.tables.values()]
 		.filter(({ maker }) => search.maker === undefined || maker === search.maker)
 		.filter(({ table }) => search.table === undefined || table === search.table)
@@ -87,16 +93,29 @@ export const tablesInOrder = (tables: TableSet, search: RowSearch = {}): Compile
 		);
 
 /**
- * Rows that fit and have every word of the query, by how well they match; without a query all that fit,
- * in the order of the tables. Slips of spelling are forgiven.
+ * Rows that fit the filters and have every word of the query, by how well they match; without a query all
+ * that fit, in the order of the tables. Slips of spelling are forgiven.
+ * @param page where to begin and how many to answer at most; all of them unless told
  */
-export function searchRows(tables: TableSet, search: RowSearch): CompiledRow[] {
-	const words = wordsOf(search.q ?? '');
-	const searched = tablesInOrder(tables, search);
-	if (words.length === 0)
-		return searched.flatMap((table) => table.rows.filter((row) => fits(row, search)));
-	return searched
-		.flatMap((table) => find(table, words).filter(({ row }) => fits(row, search)))
-		.sort((a, b) => a.score - b.score || compareRows(a.row, b.row))
-		.map(({ row }) => row);
+export function searchRows(
+	tables: TableSet,
+	query: string,
+	filters: RowFilters = {},
+	{ offset = 0, limit = Infinity }: { offset?: number; limit?: number } = {}
+): RowPage {
+	const words = wordsOf(query);
+	const searched = tablesInOrder(tables, filters);
+	const rows =
+		words.length === 0
+			? searched.flatMap((table) => table.rows.filter((row) => fits(row, filters)))
+			: searched
+					.flatMap((table) => find(table, words).filter(({ row }) => fits(row, filters)))
+					.sort((a, b) => a.score - b.score || compareRows(a.row, b.row))
+					.map(({ row }) => row);
+	const end = offset + limit;
+	return {
+		items: rows.slice(offset, end),
+		total: rows.length,
+		next: end < rows.length ? end : null
+	};
 }
