@@ -1,7 +1,7 @@
 /**
- * What the public interface takes and answers. The server checks requests with these schemas, its tests
- * check every answer with them, and the OpenAPI document is made from them.
- * The browser imports the types alone: this file brings zod with it.
+ * What the public interface answers. Tests hold every answer against these schemas, the OpenAPI document
+ * is made from them, and the client takes its types from them. Pages import the types alone: this file
+ * brings zod with it.
  */
 import { z } from 'zod';
 import { fieldNameSchema, outcomeSchema, strengthSchema } from './fields';
@@ -62,7 +62,8 @@ export const alternativeSchema = z.strictObject({
 export const possibleSchema = z.strictObject({
 	code: z.string().optional(),
 	meaning: z.string(),
-	values: valuesSchema
+	values: valuesSchema,
+	scope: z.string().optional().describe('Where this meaning holds, in words')
 });
 export const lookupSchema = z.strictObject({
 	table: tableNameSchema,
@@ -129,26 +130,8 @@ export const readAnswerSchema = z.strictObject({
 	problems: z.array(readProblemSchema)
 });
 
-const context = {
-	maker: z.string().describe('Corporation or division, by any name that /makers lists'),
-	division: z.string().describe('Division; needed for the division named Chrysler'),
-	year: z.union([z.number().int(), z.string()]).describe('Model year, 1955 to 2039'),
-	plant: z.string().describe('Assembly plant code, 3 characters at most'),
-	field: z.string().describe('For one bare code: the field it stands in')
-};
-/** The body of POST /readings. Context stands beside the text or under `context`. */
-export const readRequestSchema = z.strictObject({
-	text: z.string(),
-	kind: z.string().optional(),
-	...z.object(context).partial().shape,
-	context: z.object(context).partial().strict().optional(),
-	edition: z.union([z.number().int(), z.string()]).optional(),
-	reader: z.string().optional(),
-	explain: z.union([z.boolean(), z.number().int(), z.string()]).optional()
-});
-
 /** A list, a page of it at a time; `next` is the cursor of the next page. */
-export const listOf = <Item extends z.ZodType, More extends z.ZodRawShape>(
+export const listOf = <Item extends z.ZodType, More extends z.ZodRawShape = Record<never, never>>(
 	item: Item,
 	more: More = {} as More
 ) => z.strictObject({ ...more, items: z.array(item), next: z.string().nullable() });
@@ -225,6 +208,17 @@ export const rowDetailSchema = z.strictObject({
 	...rowSchema.shape,
 	citations: z.array(citedSchema)
 });
+/** A row as it stood in editions `edition_from` up to, and without, `edition_to`. */
+export const rowVersionSchema = z.strictObject({
+	version: z.number().int().min(1),
+	edition_from: editionNumber,
+	edition_to: editionNumber.nullable().describe('Null while it is live'),
+	...referenceRowSchema.shape,
+	maker: makerName,
+	maker_key: makerKey,
+	values: valuesSchema,
+	citations: z.array(citationSchema.omit({ row_key: true }))
+});
 export const sourceEntrySchema = z.strictObject({
 	...sourceSchema.shape,
 	cited_by: z.number().int().min(0).describe('Rows that cite it')
@@ -232,7 +226,8 @@ export const sourceEntrySchema = z.strictObject({
 export const sourceDetailSchema = z.strictObject({
 	...basis,
 	...sourceEntrySchema.shape,
-	rows: z.array(z.string()).max(200).describe('Keys of the first 200 rows that cite it')
+	rows: z.array(z.string()).max(200).describe('Keys of the first 200 rows that cite it'),
+	repeated_by: z.array(z.string()).describe('Keys of the sources that copy it')
 });
 export const itemEntrySchema = z.strictObject({
 	...itemSchema.shape,
@@ -255,6 +250,23 @@ export const editionSchema = z.strictObject({
 	made_at: z.iso.datetime()
 });
 
+const changeCounts = z.strictObject({
+	added: z.number().int().min(0),
+	changed: z.number().int().min(0),
+	retired: z.number().int().min(0)
+});
+/** An edition and what it changed of the one before; null for the first. */
+export const editionDetailSchema = z.strictObject({
+	...editionSchema.shape,
+	changes: z
+		.strictObject({ rows: changeCounts, sources: changeCounts, claims: changeCounts })
+		.nullable(),
+	row_keys: z
+		.array(z.strictObject({ row_key: z.string(), change: z.enum(['added', 'changed', 'retired']) }))
+		.max(200)
+		.describe('The first 200 rows that it changed')
+});
+
 export const makersAnswerSchema = listOf(makerEntrySchema);
 export const layoutsAnswerSchema = listOf(layoutEntrySchema);
 export const tablesAnswerSchema = listOf(tableEntrySchema, basis);
@@ -263,6 +275,19 @@ export const tableAnswerSchema = listOf(rowSchema, {
 	...tableNamed,
 	total: z.number().int().min(0)
 });
+export const rowHistoryAnswerSchema = listOf(rowVersionSchema);
 export const sourcesAnswerSchema = listOf(sourceEntrySchema, basis);
 export const itemsAnswerSchema = listOf(itemEntrySchema, basis);
 export const editionsAnswerSchema = listOf(editionSchema);
+
+export type MakersAnswer = z.infer<typeof makersAnswerSchema>;
+export type LayoutsAnswer = z.infer<typeof layoutsAnswerSchema>;
+export type TablesAnswer = z.infer<typeof tablesAnswerSchema>;
+export type TableAnswer = z.infer<typeof tableAnswerSchema>;
+export type RowDetail = z.infer<typeof rowDetailSchema>;
+export type RowHistoryAnswer = z.infer<typeof rowHistoryAnswerSchema>;
+export type SourcesAnswer = z.infer<typeof sourcesAnswerSchema>;
+export type SourceDetail = z.infer<typeof sourceDetailSchema>;
+export type ItemsAnswer = z.infer<typeof itemsAnswerSchema>;
+export type EditionsAnswer = z.infer<typeof editionsAnswerSchema>;
+export type EditionDetail = z.infer<typeof editionDetailSchema>;

@@ -1,4 +1,5 @@
 export * from './api';
+export * from './api-requests';
 export * from './fields';
 export * from './makers';
 export * from './readings';

@@ -1,6 +1,6 @@
 import { holds, REVALIDATE } from './caching';
 
-interface Kept {
+export interface Kept {
 	readonly etag: string;
 	readonly cacheControl?: string;
 	/** Further headers, such as Vary and Link. */
@@ -13,10 +13,14 @@ const ANY_ORIGIN = '*';
  * Answers with JSON, or with 304 when the asker still holds it. The value is made only when it is
  * needed, and written once.
  */
-export function answerJson(request: Request, kept: Kept, make: () => unknown): Response {
+export const answerJson = (request: Request, kept: Kept, make: () => unknown): Response =>
+	answerWritten(request, kept, () => JSON.stringify(make()));
+
+/** As `answerJson`, for what is written already. */
+export function answerWritten(request: Request, kept: Kept, write: () => string): Response {
 	const { etag, cacheControl = REVALIDATE } = kept;
 	if (holds(request.headers.get('if-none-match'), etag)) return notModified(kept);
-	const body = JSON.stringify(make());
+	const body = write();
 	return new Response(body, {
 		headers: {
 			'content-type': 'application/json',
@@ -25,6 +29,19 @@ export function answerJson(request: Request, kept: Kept, make: () => unknown): R
 			etag,
 			'access-control-allow-origin': ANY_ORIGIN,
 			...kept.headers
+		}
+	});
+}
+
+/** Answers a POST with JSON, which nobody keeps. */
+export function answerPosted(value: unknown): Response {
+	const body = JSON.stringify(value);
+	return new Response(body, {
+		headers: {
+			'content-type': 'application/json',
+			'content-length': String(Buffer.byteLength(body)),
+			'cache-control': 'no-store',
+			'access-control-allow-origin': ANY_ORIGIN
 		}
 	});
 }
@@ -56,6 +73,6 @@ const notModified = ({ etag, cacheControl = REVALIDATE, headers }: Kept): Respon
 			'cache-control': cacheControl,
 			etag,
 			'access-control-allow-origin': ANY_ORIGIN,
-			...(headers?.['vary'] && { vary: headers['vary'] })
+			...(headers?.vary && { vary: headers.vary })
 		}
 	});

@@ -1,30 +1,38 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { pageOf, readCursor, readLimit, writeCursor } from './cursor';
+import { filtersOf, pageOf, readCursor, readLimit, startOf, writeCursor } from './cursor';
 import { Refusal } from './refusal';
 
 const all = Array.from({ length: 7 }, (_, n) => n);
 
 describe('a cursor', () => {
-	it('leads through a list page by page, each item once', () => {
+	it('leads through a list page by page, each item once, in the edition where it began', () => {
 		const seen: number[] = [];
-		let cursor: string | undefined;
-		do {
-			const page = pageOf(all, { limit: '3', cursor }, 4, 'all');
-			seen.push(...page.items);
-			cursor = page.next ?? undefined;
-		} while (cursor !== undefined);
+		let place = { after: 0, edition: 4, filters: 'all' };
+		for (;;) {
+			const { items, next } = pageOf(all, 3, place);
+			seen.push(...items);
+			if (next === null) break;
+			const start = startOf(next, 'all', undefined);
+			expect(start.edition).toBe(4);
+			place = { ...place, after: start.after };
+		}
 		expect(seen).toEqual(all);
 	});
 
 	it('has no next page when the last is just full', () => {
-		expect(pageOf(all, { limit: '7' }, 4, 'all').next).toBeNull();
+		expect(pageOf(all, 7, { after: 0, edition: 4, filters: 'all' }).next).toBeNull();
 	});
 
-	it('fits the list that it was written for and no other', () => {
-		const cursor = writeCursor({ edition: 4, after: 3, filters: 'gm' });
-		expect(readCursor(cursor, 'gm')).toEqual({ edition: 4, after: 3, filters: 'gm' });
-		expect(() => readCursor(cursor, 'ford')).toThrow(Refusal);
+	it('fits the list, filters and edition that it was written for and no other', () => {
+		const filters = filtersOf('/tables/gm/engine', { year: '1967', limit: '2', edition: '4' });
+		expect(filters).toBe(filtersOf('/tables/gm/engine', { year: '1967', cursor: 'x' }));
+		const cursor = writeCursor({ edition: 4, after: 3, filters });
+		expect(readCursor(cursor, filters)).toEqual({ edition: 4, after: 3, filters });
+		expect(startOf(cursor, filters, 4).after).toBe(3);
+		expect(() => startOf(cursor, filters, 5)).toThrow(Refusal);
+		for (const other of [filtersOf('/tables/gm/engine', {}), filtersOf('/', { year: '1967' })])
+			expect(() => readCursor(cursor, other)).toThrow(Refusal);
 	});
 
 	it('is refused when it is none of ours, whatever it is', () => {

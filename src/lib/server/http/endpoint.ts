@@ -1,5 +1,7 @@
 import { config } from '../config';
 import { interfaceText } from '../../text/en/interface';
+import { chooseType } from './accept';
+import { refusalOf } from './domain-errors';
 import { refuse } from './problem';
 import { fault, Refusal } from './refusal';
 import { TokenBuckets } from './token-bucket';
@@ -32,7 +34,7 @@ export function admit(address: string, cost = 1): void {
  * An endpoint of the interface: counts the request, and turns a refusal into problem details.
  * Anything else that goes wrong is thrown on to the hooks. Stays synchronous where the answer is.
  */
-export function answering<Event extends Asked>(answer: (event: Event) => Answer) {
+export function endpoint<Event extends Asked>(answer: (event: Event) => Answer) {
 	return (event: Event): Answer => {
 		try {
 			admit(event.getClientAddress());
@@ -44,9 +46,17 @@ export function answering<Event extends Asked>(answer: (event: Event) => Answer)
 	};
 }
 
+/** An endpoint that answers in JSON and nothing else. */
+export const jsonEndpoint = <Event extends Asked>(answer: (event: Event) => Answer) =>
+	endpoint((event: Event) => {
+		chooseType(event.request.headers.get('accept'), ['application/json']);
+		return answer(event);
+	});
+
 function asRefusal(error: unknown): Response {
-	if (error instanceof Refusal) return refuse(error);
-	throw error;
+	const refusal = refusalOf(error);
+	if (refusal === null) throw error;
+	return refuse(refusal);
 }
 
 /** Methods beside those of an endpoint: OPTIONS is answered, for other origins too; the rest is refused. */

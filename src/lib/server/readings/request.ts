@@ -1,10 +1,12 @@
 import { interfaceText } from '../../text/en/interface';
 import {
 	ALL_DIVISIONS,
+	AVAILABLE_KINDS,
 	FIELD_NAMES,
 	FIRST_YEAR,
 	LAST_YEAR,
 	MAKER_NAMES,
+	MAX_TEXT,
 	STAMP_KINDS,
 	type FieldError,
 	type FieldName,
@@ -14,9 +16,6 @@ import {
 import { examineText } from '../../decoder';
 import { fault, malformed, invalid, type Parameters } from '../http';
 import { ACCEPTED_MAKERS, divisionNamed, makerNamed, type Named } from './aliases';
-
-/** Kinds that the engine reads. The others are refused by name until it does. */
-export const AVAILABLE_KINDS: readonly StampKind[] = ['serial', 'code'];
 
 /** Parameters of a reading, as the permanent address and the interface have them. */
 export const READING_PARAMETERS = [
@@ -51,14 +50,18 @@ type Faults = FieldError[];
 const ON = ['1', 'true', 'yes', 'on'];
 const OFF = ['0', 'false', 'no', 'off'];
 
-function readKind(value: string | undefined, faults: Faults): StampKind | undefined {
-	if (value === undefined) return undefined;
-	const folded = value
+/** A word as the closed sets spell theirs. */
+const spelled = (value: string): string =>
+	value
 		.trim()
 		.toLowerCase()
 		.replace(/[\s-]+/g, '_');
-	const kind = STAMP_KINDS.find((one) => one === folded);
-	if (kind !== undefined && AVAILABLE_KINDS.includes(kind)) return kind;
+
+function readKind(value: string | undefined, faults: Faults): StampKind | undefined {
+	if (value === undefined) return undefined;
+	const word = spelled(value);
+	const kind = STAMP_KINDS.find((one) => one === word);
+	if (kind !== undefined && (AVAILABLE_KINDS as readonly StampKind[]).includes(kind)) return kind;
 	faults.push(
 		kind === undefined
 			? fault(
@@ -79,11 +82,8 @@ function readKind(value: string | undefined, faults: Faults): StampKind | undefi
 
 function readField(value: string | undefined, faults: Faults): FieldName | undefined {
 	if (value === undefined) return undefined;
-	const folded = value
-		.trim()
-		.toLowerCase()
-		.replace(/[\s-]+/g, '_');
-	const field = FIELD_NAMES.find((one) => one === folded);
+	const word = spelled(value);
+	const field = FIELD_NAMES.find((one) => one === word);
 	if (field === undefined)
 		faults.push(fault('field', 'unknown_field', interfaceText.invalid.field(value), FIELD_NAMES));
 	return field;
@@ -169,7 +169,10 @@ export function readRequest(given: Parameters<ReadingParameter>): ReadRequest {
 	const kind = readKind(given.kind, faults);
 	const text = given.text ?? '';
 	const unreadable = examineText(text, kind);
-	if (unreadable) faults.push(fault('text', unreadable.code, unreadable.message));
+	if (unreadable !== null)
+		faults.push(
+			fault('text', unreadable, interfaceText.text[unreadable](MAX_TEXT[kind ?? 'serial']))
+		);
 	const context: ReadContext = {
 		...readMaker(given.maker, given.division, faults),
 		year: readYear(given.year, faults),

@@ -24,6 +24,13 @@ export const interfaceText = {
 		edition: 'An edition is a whole number.',
 		choice: (name: string, accepted: readonly string[]) => `${name} is one of ${listed(accepted)}.`
 	},
+	/** Texts of which nothing can be read; the most characters are handed in. */
+	text: {
+		empty: () => 'Type what is struck on the car.',
+		too_long: (most: number) => `A text of this kind has ${most} characters at most.`,
+		nothing_struck: () =>
+			'There is no letter or figure in it that can be struck. Type at least one that you can read, and ? for the others.'
+	},
 	invalid: {
 		kind: (value: string, accepted: readonly string[]) =>
 			`${quoted(value)} is no kind of stamp. Taken: ${listed(accepted)}.`,
@@ -42,13 +49,9 @@ export const interfaceText = {
 	},
 	unknown: {
 		path: 'Nothing stands at this address. /api/v1/openapi.json lists what does.',
-		edition: (number: number) => `There is no edition ${number}.`,
+		edition: (number: string) => `There is no edition ${quoted(number)}.`,
 		maker: (value: string) => `We keep no tables of ${quoted(value)}.`,
-		table: (value: string) => `There is no table ${quoted(value)}.`,
-		tableOfMaker: (table: string, maker: string) => `${maker} has no rows in table ${table}.`,
-		row: (key: string, edition: number) => `Edition ${edition} has no row ${quoted(key)}.`,
-		rowEver: (key: string) => `No edition has a row ${quoted(key)}.`,
-		source: (key: string, edition: number) => `Edition ${edition} has no source ${quoted(key)}.`
+		table: (value: string) => `There is no table ${quoted(value)}.`
 	},
 	method: (method: string, allowed: readonly string[]) =>
 		`${quoted(method)} is not answered here. Taken: ${listed(allowed)}.`,
@@ -57,6 +60,9 @@ export const interfaceText = {
 	mediaType: 'The body must be application/json, in UTF-8, not compressed.',
 	tooMany: (seconds: number) =>
 		`Too many requests from this address. Ask again in ${seconds} ${seconds === 1 ? 'second' : 'seconds'}.`,
-	unavailable: 'The tables are not in memory yet. Ask again in a moment.',
-	internal: (id: string) => `Something broke on our side. Error ${id}.`
+	document: {
+		summary: 'What the stamps of a collector car say, on which sources, and how sure that is.',
+		description:
+			'GETs need no account and allow any origin, without credentials. Every refusal is application/problem+json. Parameters are forgiving about case and space; an empty one counts as absent, an unknown one is refused. A reading never proves title or authenticity.'
+	}
 } as const;

@@ -1,0 +1,26 @@
+import { fault, Refusal } from './refusal';
+
+/** Domain errors that are answers to the asker, by their code: which parameter, and which status. */
+const KNOWN: Readonly<Record<string, readonly [status: 404 | 503, field: string]>> = {
+	unknown_edition: [404, 'edition'],
+	unknown_row: [404, 'row_key'],
+	unknown_source: [404, 'key'],
+	no_tables_yet: [503, 'edition'],
+	service_busy: [503, 'edition'],
+	database_away: [503, 'edition']
+};
+const RETRY_AFTER_SECONDS = 2;
+
+/** The refusal that an error stands for, or null when it is no answer to anybody. */
+export function refusalOf(error: unknown): Refusal | null {
+	if (error instanceof Refusal) return error;
+	if (!(error instanceof Error) || !('code' in error) || typeof error.code !== 'string')
+		return null;
+	const known = Object.hasOwn(KNOWN, error.code) ? KNOWN[error.code] : undefined;
+	if (known === undefined) return null;
+	const [status, field] = known;
+	const errors = [fault(field, error.code, error.message)];
+	if (status === 404) return new Refusal(404, errors);
+	const wait = 'retryAfterSeconds' in error ? Number(error.retryAfterSeconds) : RETRY_AFTER_SECONDS;
+	return new Refusal(503, errors, { 'retry-after': String(wait) });
+}

@@ -1,0 +1,96 @@
+/**
+ * What the public interface takes: names and meanings of parameters. The routes read them by hand, since
+ * they are forgiving about case and space; the OpenAPI document is made from these schemas, and a test
+ * holds both to the same names.
+ */
+import { z } from 'zod';
+import { FIELD_NAMES } from './fields';
+import { STAMP_KINDS, type StampKind } from './readings';
+import { FIRST_YEAR, LAST_YEAR, SOURCE_KINDS } from './rows';
+
+/** Kinds of stamp that can be read. The others are refused by name. */
+export const AVAILABLE_KINDS = ['serial', 'code'] as const satisfies readonly StampKind[];
+/** Kinds that will come. */
+export const COMING_KINDS = STAMP_KINDS.filter(
+	(kind) => !(AVAILABLE_KINDS as readonly StampKind[]).includes(kind)
+);
+
+const maker = z.string().describe('Corporation or division, by any name that /makers lists');
+const division = z.string().describe('Division, by any name that /makers lists');
+const year = z.int().min(FIRST_YEAR).max(LAST_YEAR).describe('Model year');
+const edition = z.int().min(0).describe('Number of an edition; the present one when left out');
+
+const context = {
+	field: z.enum(FIELD_NAMES).optional().describe('For one bare code: the field it stands in'),
+	maker: maker.optional(),
+	division: division
+		.optional()
+		.describe(
+			'Division; Chrysler, Ford and AMC mean the corporation as maker and the division here'
+		),
+	year: year.optional(),
+	plant: z.string().max(3).optional().describe('Assembly plant code')
+};
+const reading = {
+	text: z
+		.string()
+		.min(1)
+		.max(64)
+		.describe(
+			'What is struck on the car. ?, _, a star inside, or a run of lower-case x stand for what cannot be read; [38] for either'
+		),
+	kind: z.enum(AVAILABLE_KINDS).optional().describe('Left out: every kind that fits, ranked'),
+	...context,
+	edition: edition.optional()
+};
+
+/** GET /readings. */
+export const readingQuerySchema = z.strictObject({
+	...reading,
+	reader: z
+		.string()
+		.optional()
+		.describe(
+			'With edition: makes the address permanent, and the answer cacheable for good as long as this is the reader that answers'
+		),
+	explain: z.enum(['0', '1']).optional().describe('1: each field tells what it looked up')
+});
+
+/** The body of POST /readings: the same, the context beside the text or under `context`. */
+export const readingBodySchema = z.strictObject({
+	...reading,
+	reader: z.string().optional(),
+	explain: z.boolean().optional(),
+	context: z.strictObject(context).optional()
+});
+
+const list = {
+	limit: z.int().min(1).max(200).optional().describe('Most items to answer; 50 when left out'),
+	cursor: z.string().optional().describe('`next` of the page before')
+};
+export const listQuerySchema = z.strictObject(list);
+export const editionQuerySchema = z.strictObject({ edition: edition.optional() });
+export const tablesQuerySchema = z.strictObject({
+	edition: edition.optional(),
+	maker: maker.optional(),
+	...list
+});
+export const tableQuerySchema = z.strictObject({
+	edition: edition.optional(),
+	division: division.optional(),
+	year: year.optional(),
+	code: z.string().max(64).optional().describe('Exactly this code, case aside'),
+	q: z.string().max(100).optional().describe('Words to search for'),
+	format: z.enum(['json', 'csv']).optional().describe('Stands before the Accept header'),
+	...list
+});
+export const sourcesQuerySchema = z.strictObject({
+	edition: edition.optional(),
+	kind: z.enum(SOURCE_KINDS).optional(),
+	...list
+});
+export const itemsQuerySchema = z.strictObject({
+	edition: edition.optional(),
+	maker: maker.optional(),
+	...list
+});
