@@ -49,9 +49,17 @@ const ORDER = Object.keys(FIELD_OF) as TableName[];
 /** At most so many readings come back; the rest is counted. */
 const MOST = 24;
 
-/** Without a year, rows of different years do not contradict each other: the code means several things. */
+/**
+ * A bare code comes without its car: one meaning is enough, wherever it holds.
+ * Without a year, rows of different years do not contradict each other: the code means several things.
+ */
 function answerOf(rows: readonly CompiledRow[], scope: Scope): Answer {
 	const answer = choose(rows, scope);
+	if (answer.kind === 'depends') {
+		const [first] = answer.rows as readonly [CompiledRow, ...CompiledRow[]];
+		const one = answer.rows.every((row) => saysTheSame(first, row));
+		return one ? { kind: 'found', rows: answer.rows } : answer;
+	}
 	if (answer.kind !== 'contested' || scope.year !== null) return answer;
 	const all = answer.groups.flat();
 	const contested = all.every((row) =>

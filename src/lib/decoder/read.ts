@@ -1,7 +1,8 @@
 /** Reads one stamp against one edition. */
 import type { Problem, ReadContext, Reading, ReadResult, StampKind } from '../types';
 import { normalise, type Cell, type Characters } from './engine/characters';
-import { fits, type PreparedLayout } from './engine/fit';
+import { fits } from './engine/fit';
+import type { PreparedLayout } from './engine/plan';
 import {
 	bareSequence,
 	checkDigitOffers,

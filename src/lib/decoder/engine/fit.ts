@@ -1,32 +1,6 @@
 /** Which layouts a text fits, and how the nearest one fails. */
 import { DIGITS, LETTERS, UNREAD, type Cell } from './characters';
-import type { Layout } from './layout';
-
-/** A layout with a table of the characters that each place allows, made once. */
-export interface PreparedLayout {
-	readonly layout: Layout;
-	/** For each place, the characters allowed. */
-	readonly allowed: readonly string[];
-	/** For each place, by character code: 1 where allowed. */
-	readonly masks: readonly Uint8Array[];
-}
-
-export function prepare(layout: Layout): PreparedLayout {
-	const allowed: string[] = [];
-	for (const field of layout.fields) {
-		for (let place = field.from; place <= field.to; place += 1) {
-			const { chars } = field;
-			allowed[place - 1] =
-				typeof chars === 'string' ? chars : (chars[place - field.from] as string);
-		}
-	}
-	const masks = allowed.map((set) => {
-		const mask = new Uint8Array(128);
-		for (const character of set) mask[character.charCodeAt(0)] = 1;
-		return mask;
-	});
-	return { layout, allowed, masks };
-}
+import type { PreparedLayout } from './plan';
 
 const allows = (mask: Uint8Array, cell: Cell): boolean => {
 	if (cell.length === 1) return cell === UNREAD || mask[cell.charCodeAt(0)] === 1;

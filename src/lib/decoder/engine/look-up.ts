@@ -1,6 +1,6 @@
 /** Asks one table what a code means under the scope that is known so far. */
 import { FIRST_YEAR, LAST_YEAR, type Claim, type ScopeColumn } from '../../types';
-import { mayBe, type Cell } from './characters';
+import { isRead, mayBe, type Cell } from './characters';
 import { saysTheSame } from './compare';
 import { rowsInYear, type CodeEntry, type CompiledRow, type CompiledTable } from './table-set';
 
@@ -136,6 +136,10 @@ export function entriesMatching(
 	cells: readonly Cell[]
 ): CodeEntry[] {
 	if (table === undefined) return [];
+	if (cells.every(isRead)) {
+		const entry = table.byCode.get(cells.join(''));
+		return entry === undefined ? [] : [entry];
+	}
 	const matching: CodeEntry[] = [];
 	for (const entry of table.byCode.values()) {
 		if (entry.code.length !== cells.length) continue;

@@ -3,8 +3,9 @@ import type { Offer, Problem, Reading } from '../../types';
 import { decoderText } from '../../text/en/decoder';
 import { isRead, textOf, UNREAD, type Cell, type Characters } from './characters';
 import { checkDigitOf } from './check-digit';
-import { expectedOf, fits, missOf, nearest, type Break, type PreparedLayout } from './fit';
+import { expectedOf, fits, missOf, nearest, type Break } from './fit';
 import { alike, exchanged } from './look-alikes';
+import type { PreparedLayout } from './plan';
 
 const text = decoderText.problems;
 const MOST_OFFERS = 3;

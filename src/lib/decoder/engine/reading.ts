@@ -1,19 +1,13 @@
 /** Makes the readings of one layout and model year: one for each division that the tables know. */
-import {
-	makerOf,
-	type FieldName,
-	type Maker,
-	type ReadContext,
-	type ReadingField
-} from '../../types';
+import { makerOf, type Maker, type ReadContext, type ReadingField } from '../../types';
 import { decoderText as text } from '../../text/en/decoder';
 import { checkField, sequenceField, yearField } from './calculated-field';
-import { isRead, textOf, type Cell } from './characters';
-import { derivedField, derivedHead } from './derived-field';
+import { isRead, textOf, UNREAD, type Cell } from './characters';
+import { derivedField } from './derived-field';
 import { fieldOf, type FieldHead, type FieldResult } from './field';
-import type { PreparedLayout } from './fit';
-import type { Layout, PrimaryField, Span } from './layout';
+import type { Layout, PrimaryField } from './layout';
 import { entriesMatching, type Scope } from './look-up';
+import type { PreparedLayout } from './plan';
 import { cellsOf, tableField, type Reader } from './table-field';
 import { rowsInYear, tableId, type CompiledRow, type TableSet } from './table-set';
 
@@ -27,79 +21,71 @@ export interface Draft {
 	readonly results: readonly FieldResult[];
 }
 
-const partsOf = (field: PrimaryField): readonly Span[] =>
-	(field.reads.by === 'table' ? field.reads.parts : undefined) ?? [[field.from, field.to]];
-
-const divisionsOf = (rows: readonly CompiledRow[]): string[] => {
-	const divisions = rows.flatMap((row) =>
-		typeof row.values.division === 'string' ? [row.values.division] : row.division
-	);
-	return [...new Set(divisions)].sort();
-};
-
 /** The divisions that the naming field may stand for in a year; empty when no row tells. */
 function divisionsIn(
-	layout: Layout,
+	prepared: PreparedLayout,
 	cells: readonly Cell[],
 	year: number | null,
 	tables: TableSet
 ): string[] {
-	const field = layout.fields.find((own) => own.name === layout.divisionFrom);
-	if (field?.reads.by !== 'table') return [];
-	const table = tables.tables.get(tableId(layout.maker, field.reads.table));
-	const own = cellsOf(cells, partsOf(field));
-	if (own.every(isRead)) {
-		const entry = table?.byCode.get(own.join(''));
-		return entry === undefined ? [] : divisionsOf(rowsInYear(entry, year));
-	}
-	return divisionsOf(entriesMatching(table, own).flatMap((entry) => rowsInYear(entry, year)));
+	const { layout, division, parts } = prepared;
+	const { reads } = layout.fields[division] as PrimaryField;
+	if (reads.by !== 'table') return [];
+	const table = tables.tables.get(tableId(layout.maker, reads.table));
+	const divisions: string[] = [];
+	const add = (name: string): void => {
+		if (!divisions.includes(name)) divisions.push(name);
+	};
+	for (const entry of entriesMatching(table, cellsOf(cells, parts[division] ?? [])))
+		for (const row of rowsInYear(entry, year))
+			if (typeof row.values.division === 'string') add(row.values.division);
+			else row.division.forEach(add);
+	return divisions.sort();
 }
 
-const SCOPE_FIELDS: Partial<Record<FieldName, 'body' | 'engine' | 'plant'>> = {
-	body_style: 'body',
-	engine: 'engine',
-	assembly_plant: 'plant'
-};
-
 /** Scope that the characters themselves give, whatever the order of look-ups. */
-function scopeOf(layout: Layout, cells: readonly Cell[], year: number | null): Scope {
+function scopeOf(prepared: PreparedLayout, cells: readonly Cell[], year: number | null): Scope {
 	const scope: Scope = { year };
-	for (const field of layout.fields) {
-		const column = SCOPE_FIELDS[field.name];
-		if (column === undefined) continue;
+	for (const { column, field } of prepared.codeColumns) {
 		const own = cells.slice(field.from - 1, field.to);
 		if (own.every(isRead)) scope[column] = own.join('');
 	}
 	return scope;
 }
 
-const linesOf = (rows: readonly CompiledRow[]): readonly string[] | undefined => {
-	const lines = rows.map((row) => row.values.line).filter((line) => typeof line === 'string');
-	return lines.length === 0 ? undefined : [...new Set(lines)];
-};
+function linesOf(rows: readonly CompiledRow[]): readonly string[] | undefined {
+	let lines: string[] | undefined;
+	for (const { values } of rows) {
+		if (typeof values.line !== 'string') continue;
+		if (lines === undefined) lines = [values.line];
+		else if (!lines.includes(values.line)) lines.push(values.line);
+	}
+	return lines;
+}
 
 function unknownField(head: FieldHead, reader: Reader): FieldResult {
 	const cells = reader.cells.slice(head.from - 1, head.to);
 	const open = cells.filter((cell) => !isRead(cell)).length;
-	const detail =
-		head.from > reader.typed
-			? text.fields.notTyped
-			: open > 0
-				? text.fields.unread(open, cells.length)
-				: text.fields.noTable;
-	const outcome = open > 0 ? 'illegible' : 'not_listed';
+	const unread = (): string =>
+		head.from > reader.typed ? text.fields.notTyped : text.fields.unread(open, cells.length);
 	return {
-		field: fieldOf(head, { code: textOf(cells), outcome, detail }),
+		field: fieldOf(head, {
+			code: textOf(cells),
+			outcome: open > 0 ? 'illegible' : 'not_listed',
+			detail: open > 0 ? unread() : text.fields.noTable
+		}),
 		rows: [],
 		counts: false,
 		lookups: []
 	};
 }
 
-function primaryField(field: PrimaryField, layout: Layout, reader: Reader): FieldResult {
+function primaryField(index: number, prepared: PreparedLayout, reader: Reader): FieldResult {
+	const { layout, parts } = prepared;
+	const field = layout.fields[index] as PrimaryField;
 	switch (field.reads.by) {
 		case 'table':
-			return tableField(field, field.reads.table, partsOf(field), reader);
+			return tableField(field, field.reads.table, parts[index] ?? [], reader);
 		case 'year':
 			return yearField(field, layout, reader);
 		case 'sequence':
@@ -111,40 +97,27 @@ function primaryField(field: PrimaryField, layout: Layout, reader: Reader): Fiel
 	}
 }
 
-/** The order in which the primary fields are asked: those that others depend on come first. */
-const asked = (layout: Layout): readonly PrimaryField[] => {
-	const first = layout.lookFirst ?? [];
-	return [
-		...layout.fields.filter((field) => first.includes(field.name)),
-		...layout.fields.filter((field) => !first.includes(field.name))
-	];
-};
-
 /** All fields under one division, derived ones after the last of their parents. */
-function resultsOf(layout: Layout, reader: Reader): FieldResult[] {
+function resultsOf(prepared: PreparedLayout, reader: Reader): FieldResult[] {
 	const { scope } = reader;
-	const primary = new Map<PrimaryField, FieldResult>();
-	for (const field of asked(layout)) {
-		const result = primaryField(field, layout, reader);
-		primary.set(field, result);
+	const primary: FieldResult[] = [];
+	for (const index of prepared.order) {
+		const result = primaryField(index, prepared, reader);
+		primary[index] = result;
 		scope.line ??= linesOf(result.rows);
 	}
 	const results: FieldResult[] = [];
-	for (const field of layout.fields) {
-		results.push(primary.get(field) as FieldResult);
-		for (const derived of layout.derived) {
-			if (derived.parents[derived.parents.length - 1] !== field.name) continue;
-			const head = derivedHead(derived, layout.fields);
-			const result = derivedField(derived, head, primary.get(field) as FieldResult, reader);
+	primary.forEach((own, index) => {
+		results.push(own);
+		for (const { field, head } of prepared.derived[index] ?? []) {
+			const result = derivedField(field, head, own, reader);
 			if (result !== null) results.push(result);
 		}
-	}
+	});
 	return results;
 }
 
-/**
- * The readings of a text under one layout and year. `cells` may be shorter than the layout: the rest is unread.
- */
+/** The readings of a text under one layout and year. `typed` may be shorter than the layout: the rest is unread. */
 export function draftsOf(
 	prepared: PreparedLayout,
 	typed: readonly Cell[],
@@ -152,17 +125,15 @@ export function draftsOf(
 	tables: TableSet,
 	context: ReadContext
 ): Draft[] {
-	const { layout } = prepared;
+	const { layout, parents } = prepared;
 	const missing = layout.length - typed.length;
-	const cells = missing > 0 ? [...typed, ...Array<Cell>(missing).fill('?')] : typed;
-	const named = divisionsIn(layout, cells, year, tables);
-	const given =
-		context.division !== undefined && makerOf(context.division) === layout.maker
-			? context.division
-			: undefined;
-	const branches: (string | undefined)[] = named.length > 0 ? named : [given];
+	const cells = missing > 0 ? [...typed, ...Array<Cell>(missing).fill(UNREAD)] : typed;
+	const named = divisionsIn(prepared, cells, year, tables);
+	const given = context.division;
+	const own = given !== undefined && makerOf(given) === layout.maker ? given : undefined;
+	const branches: readonly (string | undefined)[] = named.length > 0 ? named : [own];
 	return branches.map((division): Draft => {
-		const scope = scopeOf(layout, cells, year);
+		const scope = scopeOf(prepared, cells, year);
 		if (division !== undefined) scope.division = division;
 		const reader: Reader = {
 			tables,
@@ -170,13 +141,7 @@ export function draftsOf(
 			scope,
 			cells,
 			typed: typed.length,
-			parentOf: (column) => {
-				const own = layout.fields.find((field) => field.name === parentName(layout, column));
-				return {
-					label: own?.label ?? column,
-					read: own !== undefined && cells.slice(own.from - 1, own.to).every(isRead)
-				};
-			}
+			parents
 		};
 		return {
 			layout,
@@ -184,19 +149,12 @@ export function draftsOf(
 			division: division ?? null,
 			year,
 			complete: missing <= 0,
-			results: resultsOf(layout, reader)
+			results: resultsOf(prepared, reader)
 		};
 	});
 }
 
-/** Which field tells a scope column. */
-function parentName(layout: Layout, column: string): FieldName {
-	if (column === 'division') return layout.divisionFrom;
-	if (column === 'line') return layout.lineFrom;
-	const own = Object.entries(SCOPE_FIELDS).find(([, name]) => name === column);
-	return own?.[0] as FieldName;
-}
-
+/** The fields of a draft, with the questions they put to the tables when asked for. */
 export const fieldsOf = (draft: Draft, lookups: boolean): readonly ReadingField[] =>
 	draft.results.map((result) =>
 		lookups ? { ...result.field, lookups: result.lookups } : result.field

@@ -10,7 +10,7 @@ import {
 	type FieldHead,
 	type FieldResult
 } from './field';
-import type { Span } from './layout';
+import type { PrimaryField, Span } from './layout';
 import {
 	choose,
 	claimFor,
@@ -30,14 +30,16 @@ export interface Reader {
 	readonly cells: readonly Cell[];
 	/** How many characters were typed; the places after them are unread. */
 	readonly typed: number;
-	/** Which field tells a scope column, and whether its characters were read. */
-	readonly parentOf: (column: string) => { readonly label: string; readonly read: boolean };
+	/** The field that tells each scope column. */
+	readonly parents: ReadonlyMap<string, PrimaryField>;
 }
 
 const NONE: readonly never[] = [];
 
 /** The cells of several spans, joined by `/`. */
 export function cellsOf(cells: readonly Cell[], parts: readonly Span[]): Cell[] {
+	const [first] = parts;
+	if (first !== undefined && parts.length === 1) return cells.slice(first[0] - 1, first[1]);
 	return parts.flatMap(([from, to], index) => [
 		...(index === 0 ? [] : ['/']),
 		...cells.slice(from - 1, to)
@@ -74,12 +76,13 @@ function answered(
 		};
 	}
 	if (answer.kind === 'depends') {
-		const parent = reader.parentOf(answer.on);
+		const parent = reader.parents.get(answer.on) as PrimaryField;
+		const read = reader.cells.slice(parent.from - 1, parent.to).every(isRead);
 		return {
 			field: fieldOf(head, {
 				code,
-				outcome: parent.read ? 'not_listed' : 'illegible',
-				detail: parent.read
+				outcome: read ? 'not_listed' : 'illegible',
+				detail: read
 					? text.fields.parentMissing(parent.label)
 					: text.fields.parentUnread(parent.label),
 				possible: possibleOf(answer.rows)

@@ -1,5 +1,5 @@
 /** Every layout that readings try, and nothing else: adding one here adds it to the product. */
-import { prepare, type PreparedLayout } from '../engine/fit';
+import { prepare, type PreparedLayout } from '../engine/plan';
 import type { Layout } from '../engine/layout';
 import { chrysler1966 } from './chrysler-1966-1980';
 import { ford1960 } from './ford-1960-1980';

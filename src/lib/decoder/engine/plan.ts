@@ -1,0 +1,95 @@
+/** A layout made ready for reading: everything about it that does not depend on a text, worked out once. */
+import type { FieldName, ScopeColumn } from '../../types';
+import { derivedHead } from './derived-field';
+import type { FieldHead } from './field';
+import type { DerivedField, Layout, PrimaryField, Span } from './layout';
+
+/** Scope columns that a field's own characters give. */
+export type CodeColumn = Extract<ScopeColumn, 'body' | 'engine' | 'plant'>;
+
+export interface PreparedLayout {
+	readonly layout: Layout;
+	/** For each place, the characters allowed. */
+	readonly allowed: readonly string[];
+	/** For each place, by character code: 1 where allowed. */
+	readonly masks: readonly Uint8Array[];
+	/** Indexes of the primary fields in the order in which they are asked: what others depend on comes first. */
+	readonly order: readonly number[];
+	/** For each primary field, the places that make its code. */
+	readonly parts: readonly (readonly Span[])[];
+	/** The primary field that names the division. */
+	readonly division: number;
+	/** The fields that give a scope column by their characters. */
+	readonly codeColumns: readonly { readonly column: CodeColumn; readonly field: PrimaryField }[];
+	/** For each primary field, the derived fields that follow it. */
+	readonly derived: readonly (readonly {
+		readonly field: DerivedField;
+		readonly head: FieldHead;
+	}[])[];
+	/** The field that tells each scope column, for saying on what a meaning depends. */
+	readonly parents: ReadonlyMap<string, PrimaryField>;
+}
+
+const CODE_COLUMNS: Partial<Record<FieldName, CodeColumn>> = {
+	body_style: 'body',
+	engine: 'engine',
+	assembly_plant: 'plant'
+};
+
+function allowedIn(layout: Layout): string[] {
+	const allowed: string[] = [];
+	for (const { from, to, chars } of layout.fields)
+		for (let place = from; place <= to; place += 1)
+			allowed[place - 1] = typeof chars === 'string' ? chars : (chars[place - from] as string);
+	return allowed;
+}
+
+const maskOf = (set: string): Uint8Array => {
+	const mask = new Uint8Array(128);
+	for (const character of set) mask[character.charCodeAt(0)] = 1;
+	return mask;
+};
+
+/**
+ * Works a layout out.
+ * @throws RangeError when the field that is to name division or line is not among its fields
+ */
+export function prepare(layout: Layout): PreparedLayout {
+	const { fields, lookFirst = [] } = layout;
+	const indexOf = (name: FieldName): number => {
+		const index = fields.findIndex((field) => field.name === name);
+		if (index < 0) throw new RangeError(`${layout.id} has no field ${name}`);
+		return index;
+	};
+	const allowed = allowedIn(layout);
+	const codeColumns = fields.flatMap((field) => {
+		const column = CODE_COLUMNS[field.name];
+		return column === undefined ? [] : [{ column, field }];
+	});
+	const division = indexOf(layout.divisionFrom);
+	const parents = new Map<string, PrimaryField>([
+		['division', fields[division] as PrimaryField],
+		['line', fields[indexOf(layout.lineFrom)] as PrimaryField],
+		...codeColumns.map(({ column, field }): [string, PrimaryField] => [column, field])
+	]);
+	const early = lookFirst.map(indexOf);
+	return {
+		layout,
+		allowed,
+		masks: allowed.map(maskOf),
+		order: [...early, ...fields.keys()].filter((index, at, all) => all.indexOf(index) === at),
+		parts: fields.map((field) =>
+			field.reads.by === 'table' && field.reads.parts !== undefined
+				? field.reads.parts
+				: [[field.from, field.to]]
+		),
+		division,
+		codeColumns,
+		derived: fields.map((primary) =>
+			layout.derived
+				.filter((field) => field.parents[field.parents.length - 1] === primary.name)
+				.map((field) => ({ field, head: derivedHead(field, fields) }))
+		),
+		parents
+	};
+}
