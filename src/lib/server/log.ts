@@ -1,5 +1,5 @@
 import pino, { type DestinationStream, type Logger } from 'pino';
-import type { LogLevel } from './config';
+import { config, type LogLevel } from './config';
 import { maskStamps } from './stamps-in-logs';
 
 export { maskAddress, maskStamp, maskStamps } from './stamps-in-logs';
@@ -82,4 +82,12 @@ export function makeLog(level: LogLevel, destination?: DestinationStream): Log {
 		},
 		destination ?? pino.destination({ dest: 1, sync: false })
 	);
+}
+
+let current: Log | undefined;
+
+/** The log of this process, at the configured level. @throws {ConfigurationError} */
+export function log(): Log {
+	current ??= makeLog(config().logLevel);
+	return current;
 }

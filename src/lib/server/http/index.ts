@@ -13,7 +13,6 @@ export {
 	type Place
 } from './cursor';
 export { refusalOf } from './domain-errors';
-export { refusalOf } from './domain-errors';
 export { admit, endpoint, jsonEndpoint, otherMethods, type Asked } from './endpoint';
 export { readJsonObject } from './json-body';
 export { readParameters, type Parameters } from './parameters';

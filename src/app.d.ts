@@ -1,0 +1,22 @@
+declare global {
+	namespace App {
+		interface Error {
+			message: string;
+			/** Names this failure in the log; absent where nothing failed on our side. */
+			id?: string;
+			/** Which foreseen failure it was, as `database_away`; absent for what was not foreseen. */
+			code?: string;
+		}
+		interface Locals {
+			/** Stands in the log and on the answer as X-Request-Id. */
+			requestId: string;
+			/** What went wrong on our side, and how it is answered in place of 500 where it was foreseen. */
+			failure?: {
+				readonly id: string;
+				readonly refusal: import('$lib/server/http').Refusal | null;
+			};
+		}
+	}
+}
+
+export {};

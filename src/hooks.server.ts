@@ -1,0 +1,81 @@
+import { randomBytes } from 'node:crypto';
+import { building } from '$app/environment';
+import { config } from '$lib/server/config';
+import { handOver } from '$lib/server/handover';
+import { problemResponse, refusalOf, refuse } from '$lib/server/http';
+import { log, maskAddress } from '$lib/server/log';
+import { start, stop, type WatchEvent } from '$lib/server/reference';
+import { errorText } from '$lib/text/en';
+import type { Handle, HandleServerError, ServerInit } from '@sveltejs/kit';
+
+let stopped: Promise<void> | undefined;
+/** Closes what this process holds open; whoever asks again waits for the same. */
+const stopOnce = () => (stopped ??= stop());
+
+export const init: ServerInit = async () => {
+	if (building) return;
+	// The adapter's own server ends with this event, ours with the function handed over.
+	process.on('sveltekit:shutdown', () => void stopOnce());
+	handOver({ config: config(), log: log(), maskAddress, stop: stopOnce });
+	await start(config().databaseUrl, { onEvent: tell });
+};
+
+function tell(event: WatchEvent): void {
+	if ('error' in event) log().error({ err: event.error }, event.event);
+	else log().info(event);
+}
+
+const READS = new Set(['GET', 'HEAD', 'OPTIONS']);
+
+export const handle: Handle = async ({ event, resolve }) => {
+	const { request, locals, url } = event;
+	locals.requestId = request.headers.get('x-request-id') ?? randomBytes(8).toString('hex');
+
+	// The framework looks at forms only; a page elsewhere must not send JSON in a visitor's name either.
+	const origin = request.headers.get('origin');
+	if (!READS.has(request.method) && origin !== null && origin !== url.origin)
+		return problemResponse(403, errorText.foreign);
+
+	const response = await resolve(event);
+	return locals.failure && response.status === 500
+		? answerFailure(response, locals.failure, url.pathname.startsWith('/api/'))
+		: response;
+};
+
+/** The framework knows one status for what is thrown; a failure that was foreseen has its own. */
+function answerFailure(
+	response: Response,
+	{ id, refusal }: NonNullable<App.Locals['failure']>,
+	isApi: boolean
+): Response {
+	if (isApi)
+		return refusal
+			? refuse(refusal)
+			: problemResponse(500, `${errorText.broken.title}. ${errorText.id} ${id}.`);
+	if (!refusal) return response;
+	const answer = new Response(response.body, {
+		status: refusal.status,
+		headers: response.headers
+	});
+	for (const [name, value] of Object.entries(refusal.headers)) answer.headers.set(name, value);
+	return answer;
+}
+
+export const handleError: HandleServerError = ({ error, event, status, message }) => {
+	// What stands at no address is no failure of ours.
+	if (status < 500) return { message };
+	const id = randomBytes(5).toString('hex');
+	const refusal = refusalOf(error);
+	event.locals.failure = { id, refusal };
+	const fields = {
+		err: error,
+		error_id: id,
+		request_id: event.locals.requestId,
+		route: event.route.id
+	};
+	if (refusal) log().warn(fields, 'foreseen');
+	else log().error(fields, 'unforeseen');
+	return refusal
+		? { message: refusal.message, id, code: refusal.errors[0]?.code }
+		: { message: errorText.broken.title, id };
+};
