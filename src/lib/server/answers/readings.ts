@@ -1,6 +1,6 @@
 import { answerJson, etagOf, IMMUTABLE, REVALIDATE } from '../http';
 import { isThisReader, READER, readAgainst, type ReadRequest } from '../readings';
-import { current, tablesAt, type CompiledEdition } from '../reference';
+import { current, editionAt, type CompiledEdition } from '../reference';
 
 /**
  * Answers a reading. Synchronous, from memory, unless an older edition is asked for.
@@ -21,5 +21,5 @@ export function answerReading(
 		);
 	const present = current();
 	if (asked.edition === undefined || asked.edition === present.head.number) return answer(present);
-	return tablesAt(asked.edition).then(answer);
+	return editionAt(asked.edition).then(answer);
 }

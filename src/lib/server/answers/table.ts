@@ -35,8 +35,8 @@ function rowsOf(
 	place: { readonly maker: Maker; readonly table: TableName },
 	{ q, code, division, year }: RowFilter
 ): readonly CompiledRow[] {
-	const rows = searchRows(tables, { ...place, q, division, year });
-	return code === undefined ? rows : rows.filter((row) => row.code.toUpperCase() === code);
+	const { items } = searchRows(tables, q ?? '', { ...place, division, year });
+	return code === undefined ? items : items.filter((row) => row.code.toUpperCase() === code);
 }
 
 const nextLink = (url: URL, cursor: string): string => {
