@@ -23,6 +23,7 @@ export default defineConfig({
 				test: {
 					name: 'integration',
 					include: ['tests/integration/**/*.test.ts'],
+					globalSetup: ['tests/fixtures/test-server.ts'],
 					testTimeout: 30_000,
 					hookTimeout: 60_000,
 					fileParallelism: false
