@@ -1,3 +1,5 @@
+import type { Refusal } from '$lib/server/http';
+
 declare global {
 	namespace App {
 		interface Error {
@@ -13,7 +15,7 @@ declare global {
 			/** What went wrong on our side, and how it is answered in place of 500 where it was foreseen. */
 			failure?: {
 				readonly id: string;
-				readonly refusal: import('$lib/server/http').Refusal | null;
+				readonly refusal: Refusal | null;
 			};
 		}
 	}
