@@ -1,7 +1,6 @@
 // The database of a command: the one that DATABASE_URL names, or a private server of its own.
-import { join } from 'node:path';
-import { startPrivateServer } from './mariadb.mjs';
-import { LOCAL } from './project.mjs';
+import { DATABASE_FOLDER, startPrivateServer } from './mariadb.mjs';
+import { inProject } from './project.mjs';
 import { prepareDatabase } from './release.mjs';
 import { announce, step } from './steps.mjs';
 
@@ -20,8 +19,8 @@ export async function openDatabase() {
 		return { url: given, own: false, stop: async () => {} };
 	}
 	return step('Database', async (say) => {
-		const server = await startPrivateServer({ dir: join(LOCAL, 'db'), log: announce });
-		say(`MariaDB on 127.0.0.1:${server.port}, data in .local/db`);
+		const server = await startPrivateServer({ dir: inProject(DATABASE_FOLDER), log: announce });
+		say(`MariaDB on 127.0.0.1:${server.port}, data in ${DATABASE_FOLDER}`);
 		return { url: server.url, own: true, stop: server.stop };
 	});
 }
@@ -32,6 +31,6 @@ export async function openDatabase() {
  */
 export const fillDatabase = ({ url, own }) =>
 	step('Tables', async (say) => {
-		const options = own ? { remembered: join(LOCAL, 'db') } : {};
+		const options = own ? { remembered: inProject(DATABASE_FOLDER) } : {};
 		say((await prepareDatabase(url, options)) ?? 'in place');
 	});
