@@ -8,16 +8,16 @@ import {
 } from '../../types';
 import type { RowEntry } from '../db/repositories';
 
-/** JSON with the keys of every object sorted by code unit. */
-export function canonicalJson(value: unknown): string {
-	return JSON.stringify(value, (_, inner: unknown) =>
-		typeof inner === 'object' && inner !== null && !Array.isArray(inner)
-			? Object.fromEntries(Object.entries(inner).sort(([a], [b]) => (a < b ? -1 : 1)))
-			: inner
-	);
+/** The same value with the keys of every object sorted by code unit. */
+function inOrder(value: unknown): unknown {
+	if (typeof value !== 'object' || value === null) return value;
+	if (Array.isArray(value)) return value.map(inOrder);
+	const entries = Object.entries(value).sort(([a], [b]) => (a < b ? -1 : 1));
+	return Object.fromEntries(entries.map(([key, inner]) => [key, inOrder(inner)]));
 }
 
-const sorted = (values: readonly string[]): string[] => [...values].sort();
+const sorted = (values: readonly string[]): readonly string[] =>
+	values.length < 2 ? values : [...values].sort();
 
 const rowParts = (row: ReferenceRow): unknown[] => [
 	row.row_key,
@@ -28,7 +28,7 @@ const rowParts = (row: ReferenceRow): unknown[] => [
 	row.years_to,
 	row.code,
 	row.meaning,
-	row.values,
+	inOrder(row.values),
 	row.note
 ];
 
@@ -43,9 +43,19 @@ const citationLine = (citation: Citation): string =>
 		citation.seen_on
 	]);
 
+/** A merge asks for the same text several times. */
+const texts = new WeakMap<RowEntry, string>();
+
 /** A row with its citations, whatever their order and that of its scope. */
-export const entryText = ({ row, citations }: RowEntry): string =>
-	canonicalJson(['row', ...rowParts(row), citations.map(citationLine).sort()]);
+export function entryText(entry: RowEntry): string {
+	let text = texts.get(entry);
+	if (text === undefined) {
+		const citations = entry.citations.map(citationLine).sort();
+		text = JSON.stringify(['row', ...rowParts(entry.row), citations]);
+		texts.set(entry, text);
+	}
+	return text;
+}
 
 export const sourceText = (source: Source): string =>
 	JSON.stringify([

@@ -15,7 +15,8 @@ export interface ReferenceRowRecord extends Versioned, Record<ScopeColumn, strin
 	note: string;
 }
 
-const scope = { type: DataTypes.STRING(400), allowNull: false };
+/** A new object each: Sequelize writes the column's name into it. */
+const scope = () => ({ type: DataTypes.STRING(400), allowNull: false });
 
 export const defineReferenceRow = (
 	sequelize: Sequelize
@@ -25,12 +26,12 @@ export const defineReferenceRow = (
 		version: { type: DataTypes.INTEGER.UNSIGNED, primaryKey: true },
 		maker: { type: DataTypes.STRING(16), allowNull: false },
 		table_name: { type: DataTypes.STRING(32), allowNull: false },
-		division: scope,
-		line: scope,
-		body: scope,
-		engine: scope,
-		plant: scope,
-		market: scope,
+		division: scope(),
+		line: scope(),
+		body: scope(),
+		engine: scope(),
+		plant: scope(),
+		market: scope(),
 		years_from: DataTypes.SMALLINT.UNSIGNED,
 		years_to: DataTypes.SMALLINT.UNSIGNED,
 		code: { type: DataTypes.STRING(64), allowNull: false },

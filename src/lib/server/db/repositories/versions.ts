@@ -22,14 +22,16 @@ export const movedBetween = (after: number, upTo: number) => ({
 	]
 });
 
-/** Inserts in chunks, as they come. */
+/** Inserts in chunks, without making a model of each record. */
 export async function insertAll<R extends object>(
 	model: ModelStatic<Model<R, R>>,
 	records: readonly R[],
 	transaction: Transaction
 ): Promise<void> {
+	const queryInterface = model.sequelize!.getQueryInterface();
+	const columns = model.getAttributes();
 	for (const chunk of chunks(records))
-		await model.bulkCreate(chunk as never[], { transaction, validate: false, hooks: false });
+		await queryInterface.bulkInsert(model.tableName, chunk, { transaction }, columns);
 }
 
 /** Ends the live versions of some keys: `edition` is the first that no longer holds them. */
