@@ -94,3 +94,12 @@ export const itemsQuerySchema = z.strictObject({
 	maker: maker.optional(),
 	...list
 });
+
+export type ReadingQuery = z.input<typeof readingQuerySchema>;
+export type ReadingBody = z.input<typeof readingBodySchema>;
+export type ListQuery = z.input<typeof listQuerySchema>;
+export type EditionQuery = z.input<typeof editionQuerySchema>;
+export type TablesQuery = z.input<typeof tablesQuerySchema>;
+export type TableQuery = z.input<typeof tableQuerySchema>;
+export type SourcesQuery = z.input<typeof sourcesQuerySchema>;
+export type ItemsQuery = z.input<typeof itemsQuerySchema>;
