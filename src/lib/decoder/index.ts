@@ -3,7 +3,11 @@
  * No I/O, no framework; would run unchanged in a browser.
  */
 export { examineText, normalise, type TextFault } from './engine/characters';
-export { checkDigitOf } from './engine/check-digit';
+export {
+	checkDigitOf,
+	VALUES as CHECK_DIGIT_VALUES,
+	WEIGHTS as CHECK_DIGIT_WEIGHTS
+} from './engine/check-digit';
 export { compareRows, overlaps, saysTheSame } from './engine/compare';
 export { compile, compileInSteps } from './engine/compile';
 export { scopeText } from './engine/field';

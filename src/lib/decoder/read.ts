@@ -30,7 +30,10 @@ export interface ReadRequest {
 
 /** Shortest serial; what is shorter is read as a beginning. */
 const shortest = (layouts: readonly PreparedLayout[]): number =>
+	layouts === PREPARED ? SHORTEST : lengthOfShortest(layouts);
+const lengthOfShortest = (layouts: readonly PreparedLayout[]): number =>
 	Math.min(...layouts.map(({ layout }) => layout.length));
+const SHORTEST = lengthOfShortest(PREPARED);
 /** Up to so many characters, a text without a kind is first taken as a bare code. */
 const LIKELY_CODE = 3;
 

@@ -2,16 +2,23 @@
 import type { Possible } from '../../types';
 import { decoderText as text } from '../../text/en/decoder';
 import { isRead, textOf, UNREAD } from './characters';
-import { checkDigitOf, narrowByCheckDigit } from './check-digit';
-import { fieldOf, foundField, type FieldHead, type FieldResult } from './field';
+import { checkDigitOf, isNorthAmerican, narrowByCheckDigit } from './check-digit';
+import {
+	fieldOf,
+	foundField,
+	keepTold,
+	toldBefore,
+	type FieldHead,
+	type FieldResult
+} from './field';
 import type { Layout } from './layout';
 import { lookUp, lookUpByScope } from './look-up';
 import type { Reader } from './table-field';
-import { tableId, type CompiledRow } from './table-set';
+import type { CompiledRow } from './table-set';
 
 /** Rows of table `layout` that say how a number is built: what its fixed fields rest on. */
 export function layoutRows(reader: Reader, layout: Layout): readonly CompiledRow[] {
-	const table = reader.tables.tables.get(tableId(layout.maker, 'layout'));
+	const table = reader.tables.tables.get(reader.prepared.ids.layout);
 	return table?.byCode.get(layout.id)?.all ?? [];
 }
 
@@ -23,22 +30,22 @@ export function yearField(head: FieldHead, layout: Layout, reader: Reader): Fiel
 	const cells = reader.cells.slice(head.from - 1, head.to);
 	const code = textOf(cells);
 	const { year } = reader.scope;
-	const candidates = layout.yearsOf(reader.cells).filter((other) => other !== null);
 	const yearPossible = (years: readonly number[]): Possible[] =>
 		years.map((other) => ({ meaning: String(other), values: { model_year: other } }));
 	const done = (field: FieldResult['field'], rows: readonly CompiledRow[] = []): FieldResult => ({
 		field,
 		rows,
 		counts: false,
-		lookups: rows.map((row) => ({ table: row.table, code: row.code, row_key: row.row_key }))
+		table: 'model_year'
 	});
 	if (!cells.every(isRead)) {
 		const detail = head.from > reader.typed ? text.fields.notTyped : text.year.unread;
+		const candidates = layout.yearsOf(reader.cells).filter((other) => other !== null);
 		return done(
 			fieldOf(head, { code, outcome: 'illegible', detail, possible: yearPossible(candidates) })
 		);
 	}
-	const table = reader.tables.tables.get(tableId(layout.maker, 'model_year'));
+	const table = reader.tables.tables.get(reader.prepared.ids.year);
 	if (year === null) {
 		const rows = table?.byCode.get(code)?.all ?? [];
 		const years = [...new Set(rows.map((row) => Number(row.values.model_year)))];
@@ -52,30 +59,46 @@ export function yearField(head: FieldHead, layout: Layout, reader: Reader): Fiel
 		);
 	}
 	const answer = lookUp(table, code, reader.scope);
+	const rows = answer.kind === 'found' ? answer.rows : layoutRows(reader, layout);
+	const [row] = rows;
+	const once = row !== undefined && answer.kind === 'found' && layout.yearDetail === undefined;
+	const before = once ? toldBefore(row, head) : undefined;
+	if (before !== undefined) return before;
+	const result = tellYear(head, code, year, rows, layout, reader);
+	return once ? keepTold(row, head, result) : result;
+}
+
+function tellYear(
+	head: FieldHead,
+	code: string,
+	year: number,
+	rows: readonly CompiledRow[],
+	layout: Layout,
+	reader: Reader
+): FieldResult {
 	const shown = {
 		meaning: String(year),
 		values: { model_year: year },
 		detail: layout.yearDetail?.(reader.cells) ?? text.year.byLayout
 	};
-	if (answer.kind === 'found') return done(foundField(head, code, answer.rows, shown), answer.rows);
-	const rows = layoutRows(reader, layout);
-	if (rows.length > 0) return done(foundField(head, code, rows, shown), rows);
-	return done(
-		fieldOf(head, {
-			code,
-			outcome: 'found',
-			...shown,
-			strength: 'not_rated',
-			strength_why: text.layoutStrength
-		})
-	);
+	const field =
+		rows.length > 0
+			? foundField(head, code, rows, shown)
+			: fieldOf(head, {
+					code,
+					outcome: 'found',
+					...shown,
+					strength: 'not_rated',
+					strength_why: text.layoutStrength
+				});
+	return { field, rows, counts: false, table: 'model_year' };
 }
 
 /** The running number, held against first and last numbers where rows give them. */
 export function sequenceField(head: FieldHead, layout: Layout, reader: Reader): FieldResult {
 	const cells = reader.cells.slice(head.from - 1, head.to);
-	const code = textOf(cells);
-	if (!cells.every(isRead)) {
+	const code = reader.text?.slice(head.from - 1, head.to) ?? textOf(cells);
+	if (reader.text === null && !cells.every(isRead)) {
 		const detail =
 			head.from > reader.typed
 				? text.fields.notTyped
@@ -84,10 +107,10 @@ export function sequenceField(head: FieldHead, layout: Layout, reader: Reader): 
 			field: fieldOf(head, { code, outcome: 'illegible', detail }),
 			rows: [],
 			counts: false,
-			lookups: []
+			table: null
 		};
 	}
-	const table = reader.tables.tables.get(tableId(reader.maker, 'sequence'));
+	const table = reader.tables.tables.get(reader.prepared.ids.sequence);
 	const answer = lookUpByScope(table, reader.scope);
 	const known = answer.kind === 'found' ? answer.rows : [];
 	const run = known[0]?.values ?? {};
@@ -113,21 +136,8 @@ export function sequenceField(head: FieldHead, layout: Layout, reader: Reader): 
 					strength: 'not_rated',
 					strength_why: text.layoutStrength
 				});
-	const lookups = known.map((row) => ({
-		table: 'sequence' as const,
-		code: row.code,
-		row_key: row.row_key
-	}));
-	return {
-		field,
-		rows: known,
-		counts: inside,
-		lookups: lookups.length > 0 ? lookups : [{ table: 'sequence', code: '', row_key: null }]
-	};
+	return { field, rows: known, counts: inside, outOfRun: below || above, table: 'sequence' };
 }
-
-/** WMIs that begin 1 to 5: North America (ISO 3780). */
-export const isNorthAmerican = (cell: string): boolean => /^[1-5]$/.test(cell);
 
 /** The check digit: worked out, and what may and may not be concluded. */
 export function checkField(head: FieldHead, layout: Layout, reader: Reader): FieldResult {
@@ -145,7 +155,7 @@ export function checkField(head: FieldHead, layout: Layout, reader: Reader): Fie
 		field,
 		rows: [],
 		counts,
-		lookups: []
+		table: null
 	});
 	const expected = checkDigitOf(cells);
 	if (!isRead(digit)) {

@@ -4,7 +4,8 @@
  */
 import { ANY, isRead, UNREAD, type Cell } from './characters';
 
-const VALUES = new Map<string, number>([
+/** What each character counts. */
+export const VALUES: ReadonlyMap<string, number> = new Map([
 	...[...'0123456789'].map((character, index): [string, number] => [character, index]),
 	...[...'ABCDEFGH'].map((character, index): [string, number] => [character, index + 1]),
 	...[...'JKLMN'].map((character, index): [string, number] => [character, index + 1]),
@@ -12,12 +13,16 @@ const VALUES = new Map<string, number>([
 	['R', 9],
 	...[...'STUVWXYZ'].map((character, index): [string, number] => [character, index + 2])
 ]);
-const WEIGHTS = [8, 7, 6, 5, 4, 3, 2, 10, 0, 9, 8, 7, 6, 5, 4, 3, 2] as const;
+/** What each place counts. */
+export const WEIGHTS = [8, 7, 6, 5, 4, 3, 2, 10, 0, 9, 8, 7, 6, 5, 4, 3, 2] as const;
 const LENGTH = 17;
 const CHECK = 8;
 
 /** The characters that a 17-character number may hold: all but I, O and Q. */
 export const VIN_CHARACTERS = [...ANY].filter((character) => VALUES.has(character)).join('');
+
+/** WMIs that begin 1 to 5: North America (ISO 3780). */
+export const isNorthAmerican = (cell: string): boolean => /^[1-5]$/.test(cell);
 
 const written = (residue: number): string => (residue === 10 ? 'X' : String(residue));
 

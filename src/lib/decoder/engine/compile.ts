@@ -3,6 +3,7 @@ import {
 	FIRST_YEAR,
 	LAST_YEAR,
 	SCOPE_COLUMNS,
+	tableDefinition,
 	type Citation,
 	type EditionContent,
 	type ReferenceRow,
@@ -21,6 +22,9 @@ import {
 
 /** Rows compiled between two yields: well under a few milliseconds. */
 const STEP = 150;
+
+/** Market is never known from a stamp. */
+const TOLD_COLUMNS = ['division', 'line', 'body', 'engine', 'plant'] as const;
 
 interface Draft {
 	row: ReferenceRow;
@@ -63,6 +67,7 @@ function finish(draft: Draft, sources: ReadonlyMap<string, Source>): CompiledRow
 		cited: finding.cited,
 		citations,
 		contested_by,
+		scoped: TOLD_COLUMNS.filter((column) => row[column].length > 0),
 		narrowness: SCOPE_COLUMNS.filter((column) => row[column].length > 0).length,
 		sources: citations
 			.filter((citation) => citation.stance === 'for')
@@ -131,7 +136,8 @@ export function* compileInSteps(
 			yield;
 			continue;
 		}
-		markContested(drafts);
+		// What is known beside the codes has no code that two rows could share.
+		if (tableDefinition((list[0] as ReferenceRow).table).sort === 'code') markContested(drafts);
 		yield;
 		const compiled: CompiledRow[] = [];
 		for (const [index, draft] of drafts.entries()) {

@@ -1,7 +1,15 @@
 /** Fields read from others: a fact of the parent's row, or a code of several places. */
 import { decoderText as text } from '../../text/en/decoder';
-import { contestedField, foundField, type FieldHead, type FieldResult } from './field';
+import {
+	contestedField,
+	foundField,
+	keepTold,
+	toldBefore,
+	type FieldHead,
+	type FieldResult
+} from './field';
 import type { DerivedField, PrimaryField } from './layout';
+import type { Question } from './plan';
 import { tableField, type Reader } from './table-field';
 import type { CompiledRow } from './table-set';
 
@@ -48,18 +56,27 @@ function factField(head: FieldHead, key: FactKey, parent: FieldResult): FieldRes
 		groups.size === 1
 			? foundField(head, code, rows, first)
 			: contestedField(head, code, [...groups.values()], (row) => factOf(row, key) as Fact);
-	return { field, rows, counts: false, lookups: [] };
+	return { field, rows, counts: false, table: null };
 }
 
 /** Reads a derived field; null when there is nothing to say, which leaves it out of the reading. */
 export function derivedField(
 	field: DerivedField,
 	head: FieldHead,
+	question: Question | null,
 	parent: FieldResult,
 	reader: Reader
 ): FieldResult | null {
-	if (field.reads.by === 'value') return factField(head, field.reads.key, parent);
-	const result = tableField(head, field.reads.table, field.reads.parts, reader);
-	if (!result.counts && field.always !== true) return null;
+	if (field.reads.by === 'value') {
+		const { key } = field.reads;
+		const [row] = parent.rows;
+		const alone = row !== undefined && parent.rows.length === 1 && parent.counts;
+		const before = alone ? toldBefore(row, head) : undefined;
+		if (before !== undefined) return before;
+		const result = factField(head, key, parent);
+		return alone && result !== null ? keepTold(row, head, result) : result;
+	}
+	const result = question === null ? null : tableField(head, question, reader);
+	if (result === null || (!result.counts && field.always !== true)) return null;
 	return { ...result, counts: false };
 }

@@ -8,8 +8,10 @@ import type {
 	Possible,
 	ReadingField,
 	RowValues,
-	Strength
+	Strength,
+	TableName
 } from '../../types';
+import { tableDefinition } from '../../types';
 import { decoderText as text } from '../../text/en/decoder';
 import type { CompiledRow } from './table-set';
 
@@ -29,7 +31,39 @@ export interface FieldResult {
 	readonly rows: readonly CompiledRow[];
 	/** Whether the field counts as standing in the tables. */
 	readonly counts: boolean;
-	readonly lookups: readonly Lookup[];
+	/** Whether a running number stands outside the run on record. */
+	readonly outOfRun?: boolean;
+	/** The table that was asked; null when none was. */
+	readonly table: TableName | null;
+}
+
+/** The questions that a field put to the tables: one for each row, or the miss. */
+export function lookupsOf({ field, rows, table }: FieldResult): readonly Lookup[] {
+	const asked = (name: TableName, exact: string): string => {
+		const { match } = tableDefinition(name);
+		return match === 'exact' ? exact : match === 'range' ? field.code : '';
+	};
+	if (rows.length === 0)
+		return table === null ? [] : [{ table, code: asked(table, field.code), row_key: null }];
+	return rows.map((row) => ({
+		table: row.table,
+		code: asked(row.table, row.code),
+		row_key: row.row_key
+	}));
+}
+
+/** What single rows told under a head: the same row always tells the same, so it is made once. */
+const told = new WeakMap<CompiledRow, Map<FieldHead, FieldResult>>();
+
+/** What a row told under a head before, if it did. */
+export const toldBefore = (row: CompiledRow, head: FieldHead): FieldResult | undefined =>
+	told.get(row)?.get(head);
+
+/** Keeps what a row told under a head, and hands it on. */
+export function keepTold(row: CompiledRow, head: FieldHead, result: FieldResult): FieldResult {
+	const own = told.get(row) ?? new Map<FieldHead, FieldResult>();
+	told.set(row, own.set(head, result));
+	return result;
 }
 
 const NO_VALUES: RowValues = Object.freeze({});
@@ -52,24 +86,47 @@ interface Said {
 
 /** A field, with what was not said left empty. */
 export function fieldOf(head: FieldHead, said: Said): ReadingField {
-	return {
-		name: head.name,
-		label: head.label,
-		from: head.from,
-		to: head.to,
-		...(head.derived_from === undefined ? {} : { derived_from: head.derived_from }),
-		code: said.code,
-		outcome: said.outcome,
-		meaning: said.meaning ?? null,
-		detail: said.detail ?? '',
-		values: said.values ?? NO_VALUES,
-		strength: said.strength ?? null,
-		strength_why: said.strength_why ?? '',
-		rows: said.rows ?? NOTHING,
-		sources: said.sources ?? NOTHING,
-		alternatives: said.alternatives ?? NOTHING,
-		possible: said.possible ?? NOTHING
-	};
+	// Written out, one literal a shape: this runs several times a reading, and spreading is many times slower.
+	const { name, label, from, to, derived_from } = head;
+	const { code, outcome, meaning = null, detail = '', values = NO_VALUES } = said;
+	const { strength = null, strength_why = '', rows = NOTHING, sources = NOTHING } = said;
+	const { alternatives = NOTHING, possible = NOTHING } = said;
+	return derived_from === undefined
+		? {
+				name,
+				label,
+				from,
+				to,
+				code,
+				outcome,
+				meaning,
+				detail,
+				values,
+				strength,
+				strength_why,
+				rows,
+				sources,
+				alternatives,
+				possible
+			}
+		: {
+				name,
+				label,
+				from,
+				to,
+				derived_from,
+				code,
+				outcome,
+				meaning,
+				detail,
+				values,
+				strength,
+				strength_why,
+				rows,
+				sources,
+				alternatives,
+				possible
+			};
 }
 
 /** The best supported of rows that say the same. */

@@ -7,8 +7,16 @@ export type Span = readonly [from: number, to: number];
 
 /** How a field's characters get their meaning. */
 export type FieldReads =
-	/** Looked up. `parts` are the places that make the code, joined by `/` when there are several; the field's own when left out. */
-	| { readonly by: 'table'; readonly table: TableName; readonly parts?: readonly Span[] }
+	/**
+	 * Looked up. `parts` are the places that make the code, joined by `/` when there are several; the field's own when
+	 * left out. `otherwise` are asked when those find no row.
+	 */
+	| {
+			readonly by: 'table';
+			readonly table: TableName;
+			readonly parts?: readonly Span[];
+			readonly otherwise?: readonly Span[];
+	  }
 	/** The model year, by the layout's `years`. */
 	| { readonly by: 'year' }
 	/** A running number, held against first and last numbers in table `sequence`. */
@@ -34,7 +42,12 @@ export interface DerivedField {
 	readonly parents: readonly FieldName[];
 	readonly reads:
 		| { readonly by: 'value'; readonly key: 'line' | 'series' | 'body_style' | 'cylinders' }
-		| { readonly by: 'table'; readonly table: TableName; readonly parts: readonly Span[] };
+		| {
+				readonly by: 'table';
+				readonly table: TableName;
+				readonly parts: readonly Span[];
+				readonly otherwise?: undefined;
+		  };
 	/** A derived field without a row is left out of the reading unless this says otherwise. */
 	readonly always?: boolean;
 }
@@ -59,6 +72,13 @@ export interface Layout {
 	readonly lineFrom: FieldName;
 	/** Model years that a text may stand for; null for "the standard leaves it open". Unread places give more years, never fewer. */
 	readonly yearsOf: (cells: readonly Cell[]) => readonly (number | null)[];
+	/**
+	 * Whether the division is inferred from the body rather than struck. Then a running number outside the run of every
+	 * division named brings in the divisions whose run holds it.
+	 */
+	readonly divisionInferred?: boolean;
+	/** A gap of the tables that a line without a row may fall into, in words. */
+	readonly gap?: string;
 	/** Why the year is what it is, where the layout has more to say than "by the layout". */
 	readonly yearDetail?: (cells: readonly Cell[]) => string;
 	/** Published examples, real patterns with masked or invented sequence numbers: one that is read, one that is refused. */

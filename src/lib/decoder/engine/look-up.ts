@@ -24,23 +24,18 @@ export type Answer =
 	| { readonly kind: 'missing' };
 
 const MISSING: Answer = { kind: 'missing' };
-/** Columns in the order in which a missing one is named. Market is never known from a stamp and is handled apart. */
-const COLUMNS = ['division', 'line', 'body', 'engine', 'plant'] as const;
-
-const values = (scope: Scope, column: (typeof COLUMNS)[number]): readonly string[] | undefined => {
-	const value = scope[column];
-	return typeof value === 'string' ? [value] : value;
-};
-
 /** The column that leaves it open whether a row holds, null when it holds, false when it does not. */
 function openColumn(row: CompiledRow, scope: Scope): ScopeColumn | null | false {
 	let open: ScopeColumn | null = null;
-	for (const column of COLUMNS) {
+	for (const column of row.scoped) {
 		const wanted = row[column];
-		if (wanted.length === 0) continue;
-		const known = values(scope, column);
+		const known = scope[column];
 		if (known === undefined) {
 			open ??= column;
+			continue;
+		}
+		if (typeof known === 'string') {
+			if (!wanted.includes(known)) return false;
 			continue;
 		}
 		const meeting = known.filter((value) => wanted.includes(value)).length;
@@ -74,6 +69,9 @@ function settle(rows: readonly CompiledRow[]): Answer {
 /** Chooses among the rows of one code. */
 export function choose(candidates: readonly CompiledRow[], scope: Scope): Answer {
 	if (candidates.length === 0) return MISSING;
+	const [only] = candidates;
+	if (only !== undefined && candidates.length === 1 && openColumn(only, scope) === null)
+		return { kind: 'found', rows: candidates };
 	const holding: CompiledRow[] = [];
 	const open: CompiledRow[] = [];
 	let on: ScopeColumn = 'line';

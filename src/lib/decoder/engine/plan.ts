@@ -1,11 +1,23 @@
 /** A layout made ready for reading: everything about it that does not depend on a text, worked out once. */
-import type { FieldName, ScopeColumn } from '../../types';
+import { tableDefinition, type FieldName, type ScopeColumn, type TableName } from '../../types';
 import { derivedHead } from './derived-field';
 import type { FieldHead } from './field';
-import type { DerivedField, Layout, PrimaryField, Span } from './layout';
+import type { DerivedField, FieldReads, Layout, PrimaryField, Span } from './layout';
+import { tableId } from './table-set';
 
 /** Scope columns that a field's own characters give. */
 export type CodeColumn = Extract<ScopeColumn, 'body' | 'engine' | 'plant'>;
+
+/** What a field asks a table, worked out. */
+export interface Question {
+	readonly table: TableName;
+	/** Key of the compiled table. */
+	readonly id: string;
+	readonly range: boolean;
+	readonly parts: readonly Span[];
+	/** Places to ask with when the first find no row. */
+	readonly otherwise: readonly Span[] | null;
+}
 
 export interface PreparedLayout {
 	readonly layout: Layout;
@@ -15,8 +27,8 @@ export interface PreparedLayout {
 	readonly masks: readonly Uint8Array[];
 	/** Indexes of the primary fields in the order in which they are asked: what others depend on comes first. */
 	readonly order: readonly number[];
-	/** For each primary field, the places that make its code. */
-	readonly parts: readonly (readonly Span[])[];
+	/** For each primary field, what it asks; null when it asks no table. */
+	readonly questions: readonly (Question | null)[];
 	/** The primary field that names the division. */
 	readonly division: number;
 	/** The fields that give a scope column by their characters. */
@@ -25,7 +37,10 @@ export interface PreparedLayout {
 	readonly derived: readonly (readonly {
 		readonly field: DerivedField;
 		readonly head: FieldHead;
+		readonly question: Question | null;
 	}[])[];
+	/** Keys of the compiled tables that calculated fields ask. */
+	readonly ids: { readonly layout: string; readonly sequence: string; readonly year: string };
 	/** The field that tells each scope column, for saying on what a meaning depends. */
 	readonly parents: ReadonlyMap<string, PrimaryField>;
 }
@@ -49,6 +64,17 @@ const maskOf = (set: string): Uint8Array => {
 	for (const character of set) mask[character.charCodeAt(0)] = 1;
 	return mask;
 };
+
+function questionOf(
+	{ maker }: Layout,
+	reads: FieldReads | DerivedField['reads'],
+	own: readonly Span[]
+): Question | null {
+	if (reads.by !== 'table') return null;
+	const { table, parts = own, otherwise = null } = reads;
+	const range = tableDefinition(table).match === 'range';
+	return { table, id: tableId(maker, table), range, parts, otherwise };
+}
 
 /**
  * Works a layout out.
@@ -78,18 +104,23 @@ export function prepare(layout: Layout): PreparedLayout {
 		allowed,
 		masks: allowed.map(maskOf),
 		order: [...early, ...fields.keys()].filter((index, at, all) => all.indexOf(index) === at),
-		parts: fields.map((field) =>
-			field.reads.by === 'table' && field.reads.parts !== undefined
-				? field.reads.parts
-				: [[field.from, field.to]]
-		),
+		questions: fields.map((field) => questionOf(layout, field.reads, [[field.from, field.to]])),
 		division,
 		codeColumns,
 		derived: fields.map((primary) =>
 			layout.derived
 				.filter((field) => field.parents[field.parents.length - 1] === primary.name)
-				.map((field) => ({ field, head: derivedHead(field, fields) }))
+				.map((field) => ({
+					field,
+					head: derivedHead(field, fields),
+					question: questionOf(layout, field.reads, [])
+				}))
 		),
+		ids: {
+			layout: tableId(layout.maker, 'layout'),
+			sequence: tableId(layout.maker, 'sequence'),
+			year: tableId(layout.maker, 'model_year')
+		},
 		parents
 	};
 }

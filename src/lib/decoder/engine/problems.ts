@@ -2,7 +2,7 @@
 import type { Offer, Problem, Reading } from '../../types';
 import { decoderText } from '../../text/en/decoder';
 import { isRead, textOf, UNREAD, type Cell, type Characters } from './characters';
-import { checkDigitOf } from './check-digit';
+import { checkDigitOf, isNorthAmerican } from './check-digit';
 import { expectedOf, fits, missOf, nearest, type Break } from './fit';
 import { alike, exchanged } from './look-alikes';
 import type { PreparedLayout } from './plan';
@@ -137,6 +137,8 @@ export function lookAlikes(
 export function checkDigitOffers(prepared: PreparedLayout, cells: readonly Cell[]): Problem | null {
 	const expected = checkDigitOf(cells);
 	const digit = cells[8] as Cell;
+	// Elsewhere a check that does not fit means nothing, and there is nothing to mend.
+	if (!isNorthAmerican(cells[0] as Cell)) return null;
 	if (expected === null || expected === digit || !isRead(digit)) return null;
 	const offers: Offer[] = [];
 	for (let place = 1; place <= cells.length; place += 1)

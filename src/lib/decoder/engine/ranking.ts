@@ -1,20 +1,27 @@
 /** The order of readings, and the sentence that says why each stands where it does. */
 import type { ReadContext, Reading } from '../../types';
 import { decoderText as text } from '../../text/en/decoder';
-import { fieldsOf, type Draft } from './reading';
+import { fieldsOf, isOutOfRun, type Draft } from './reading';
 
 /** At most so many readings come back; the rest is counted. */
 export const MOST_READINGS = 24;
 
-/** What speaks for and against a reading, strongest argument first. */
+/** What speaks for and against a reading, strongest argument first, and the counts that its sentence names. */
 interface Key {
 	readonly notUsed: number;
+	readonly outOfRun: number;
 	readonly hintsMissed: number;
 	readonly found: number;
 	readonly thin: number;
+	readonly fields: number;
+	readonly told: number;
+	readonly contested: number;
+	readonly notListed: number;
+	readonly illegible: number;
 }
 
-const GIVEN_BY_LAYOUT: ReadonlySet<string> = new Set(['model_year', 'unknown']);
+/** Fields that every reading of a layout has in the same way: they rank nothing. */
+const RANKS_NOTHING: ReadonlySet<string> = new Set(['model_year', 'unknown']);
 
 function hintsMissed(draft: Draft, context: ReadContext): number {
 	const { maker, division, year, plant } = context;
@@ -30,42 +37,55 @@ function hintsMissed(draft: Draft, context: ReadContext): number {
 }
 
 function keyOf(draft: Draft, context: ReadContext): Key {
-	let notUsed = 0;
+	let fields = 0;
 	let found = 0;
 	let thin = 0;
+	const outcomes = { found: 0, contested: 0, not_listed: 0, not_used: 0, illegible: 0 };
 	for (const { field, counts } of draft.results) {
-		if (field.outcome === 'not_used') notUsed += 1;
-		if (field.derived_from !== undefined || GIVEN_BY_LAYOUT.has(field.name)) continue;
-		if (!counts) continue;
+		if (field.derived_from !== undefined) continue;
+		fields += 1;
+		outcomes[field.outcome] += 1;
+		if (!counts || RANKS_NOTHING.has(field.name)) continue;
 		found += 1;
 		if (field.strength === 'thin') thin += 1;
 	}
-	return { notUsed, hintsMissed: hintsMissed(draft, context), found, thin };
+	return {
+		notUsed: outcomes.not_used,
+		outOfRun: isOutOfRun(draft) ? 1 : 0,
+		hintsMissed: hintsMissed(draft, context),
+		found,
+		thin,
+		fields,
+		told: outcomes.found + outcomes.contested,
+		contested: outcomes.contested,
+		notListed: outcomes.not_listed,
+		illegible: outcomes.illegible
+	};
 }
 
 const compareKeys = (a: Key, b: Key): number =>
 	Math.sign(a.notUsed) - Math.sign(b.notUsed) ||
 	a.hintsMissed - b.hintsMissed ||
+	a.outOfRun - b.outOfRun ||
 	b.found - a.found ||
 	a.thin - b.thin;
 
-function whyOf(draft: Draft, key: Key, first: Key, alone: boolean): string {
-	const own = draft.results.filter(({ field }) => field.derived_from === undefined);
-	const outcome = (name: string): number =>
-		own.filter(({ field }) => field.outcome === name).length;
-	const found = outcome('found') + outcome('contested');
+function whyOf(key: Key, first: Key, alone: boolean): string {
 	const words = text.why;
-	const parts: string[] = [words.first(found, own.length)];
-	if (outcome('contested') > 0) parts.push(words.contested(outcome('contested')));
-	if (outcome('not_listed') > 0) parts.push(words.notListed(outcome('not_listed')));
-	if (outcome('illegible') > 0) parts.push(words.illegible(outcome('illegible')));
-	if (key.notUsed > 0) parts.push(words.notUsed(key.notUsed));
-	if (alone) return parts.join(' ');
-	if (compareKeys(key, first) === 0) parts.push(words.equal);
-	else if (key.hintsMissed > first.hintsMissed) parts.push(words.fewerHints);
-	else if (key.found < first.found) parts.push(words.fewerFound);
-	else if (key.thin > first.thin) parts.push(words.thinner);
-	return parts.join(' ');
+	let why = words.first(key.told, key.fields);
+	const add = (n: number, words: (n: number) => string): void => {
+		if (n > 0) why += ` ${words(n)}`;
+	};
+	add(key.contested, words.contested);
+	add(key.notListed, words.notListed);
+	add(key.illegible, words.illegible);
+	add(key.notUsed, words.notUsed);
+	if (alone) return why;
+	if (compareKeys(key, first) === 0) return `${why} ${words.equal}`;
+	if (key.hintsMissed > first.hintsMissed) return `${why} ${words.fewerHints}`;
+	if (key.outOfRun > first.outOfRun) return `${why} ${words.outOfRun}`;
+	if (key.found < first.found) return `${why} ${words.fewerFound}`;
+	return key.thin > first.thin ? `${why} ${words.thinner}` : why;
 }
 
 /** Orders drafts and turns them into readings; equal keys share a rank. Ties run by layout id, then year, then division. */
@@ -96,7 +116,7 @@ export function ranked(
 			model_year: draft.year,
 			state: draft.complete ? 'complete' : 'partial',
 			rank,
-			why: whyOf(draft, key, first as Key, index === 0 && !equalFirst),
+			why: whyOf(key, first as Key, index === 0 && !equalFirst),
 			fields: fieldsOf(draft, lookups)
 		});
 	}

@@ -11,6 +11,8 @@ const ask = (text: string, context: ReadContext = {}, more: Partial<ReadRequest>
 	read(tables, { text, kind: 'serial', context, layouts: INVENTED_LAYOUTS, ...more });
 const first = (text: string, context: ReadContext = {}): Reading =>
 	ask(text, context).readings[0] as Reading;
+const inYear = (text: string, year: number): Reading =>
+	ask(text).readings.find((own) => own.model_year === year) as Reading;
 const field = (reading: Reading, name: string): ReadingField =>
 	reading.fields.find((own) => own.name === name) as ReadingField;
 const withRows = (parts: Partial<EditionContent>) =>
@@ -61,10 +63,16 @@ describe('a whole serial', () => {
 
 	it('says where a sequence number stands in its run', () => {
 		expect(field(reading, 'sequence_number').detail).toContain('number 1 of the run');
-		expect(field(first('2H37T6P099'), 'sequence_number').detail).toContain('Below the first');
-		expect(field(first('2H37T6P900'), 'sequence_number').detail).toContain('Above the last');
+		expect(field(inYear('2H37T6P099', 1966), 'sequence_number').detail).toContain('Below the first');
+		expect(field(inYear('2H37T6P900', 1966), 'sequence_number').detail).toContain('Above the last');
 		expect(field(first('2H37T7P600'), 'sequence_number').detail).toContain('number 101');
 		expect(field(first('2H37T5P600'), 'sequence_number').detail).toContain('not told');
+	});
+
+	it('ranks a number outside the run on record behind one that is not', () => {
+		const { readings } = ask('2H37T6P900');
+		expect(readings.map((own) => own.model_year)).toEqual([1976, 1966]);
+		expect(readings[1]?.why).toContain('outside the run');
 	});
 
 	it('reports the questions that it put when asked to', () => {
@@ -222,7 +230,7 @@ describe('outcomes', () => {
 		const { readings } = ask('2H37T?P100');
 		expect(readings.map((own) => own.model_year).sort()).toEqual([1965, 1966, 1967, 1970, 1976]);
 		expect(field(readings[0] as Reading, 'model_year')).toMatchObject({ outcome: 'illegible' });
-		expect(ask('2H37T[57]P100').readings.map((own) => own.model_year)).toEqual([1967, 1965]);
+		expect(ask('2H37T[57]P100').readings.map((own) => own.model_year)).toEqual([1965, 1967]);
 	});
 
 	it('an unread division is each division that has a row', () => {

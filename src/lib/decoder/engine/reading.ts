@@ -4,12 +4,12 @@ import { decoderText as text } from '../../text/en/decoder';
 import { checkField, sequenceField, yearField } from './calculated-field';
 import { isRead, textOf, UNREAD, type Cell } from './characters';
 import { derivedField } from './derived-field';
-import { fieldOf, type FieldHead, type FieldResult } from './field';
+import { fieldOf, lookupsOf, type FieldHead, type FieldResult } from './field';
 import type { Layout, PrimaryField } from './layout';
 import { entriesMatching, type Scope } from './look-up';
-import type { PreparedLayout } from './plan';
+import type { PreparedLayout, Question } from './plan';
 import { cellsOf, tableField, type Reader } from './table-field';
-import { rowsInYear, tableId, type CompiledRow, type TableSet } from './table-set';
+import { rowsInYear, type CodeEntry, type CompiledRow, type TableSet } from './table-set';
 
 /** A reading before it is ranked. */
 export interface Draft {
@@ -22,33 +22,56 @@ export interface Draft {
 }
 
 /** The divisions that the naming field may stand for in a year; empty when no row tells. */
-function divisionsIn(
-	prepared: PreparedLayout,
-	cells: readonly Cell[],
-	year: number | null,
-	tables: TableSet
-): string[] {
-	const { layout, division, parts } = prepared;
-	const { reads } = layout.fields[division] as PrimaryField;
-	if (reads.by !== 'table') return [];
-	const table = tables.tables.get(tableId(layout.maker, reads.table));
+function divisionsIn(reader: Reader): string[] {
+	const { prepared, tables, cells, scope } = reader;
+	const question = prepared.questions[prepared.division];
+	if (question === null || question === undefined) return [];
 	const divisions: string[] = [];
 	const add = (name: string): void => {
 		if (!divisions.includes(name)) divisions.push(name);
 	};
-	for (const entry of entriesMatching(table, cellsOf(cells, parts[division] ?? [])))
-		for (const row of rowsInYear(entry, year))
+	const table = tables.tables.get(question.id);
+	for (const entry of entriesMatching(table, cellsOf(cells, question.parts)))
+		for (const row of rowsInYear(entry, scope.year))
 			if (typeof row.values.division === 'string') add(row.values.division);
 			else row.division.forEach(add);
-	return divisions.sort();
+	return divisions.length > 1 ? divisions.sort() : divisions;
+}
+
+/** Divisions other than those named whose run on record holds the running number. */
+function divisionsByRun(reader: Reader, named: readonly string[]): string[] {
+	const { prepared, tables, scope, text: whole } = reader;
+	const field = prepared.layout.fields.find(({ reads }) => reads.by === 'sequence');
+	if (whole === null || field === undefined) return [];
+	const number = Number(whole.slice(field.from - 1, field.to));
+	const runs =
+		(tables.tables.get(prepared.ids.sequence)?.byCode.get('') as CodeEntry | undefined) ?? null;
+	const holding = (runs === null ? [] : rowsInYear(runs, scope.year)).filter(({ values }) => {
+		const { first_sequence: first, last_sequence: last } = values;
+		return (
+			typeof first === 'number' && first <= number && (typeof last !== 'number' || number <= last)
+		);
+	});
+	const divisions = holding.flatMap((row) => row.division);
+	return [...new Set(divisions)].filter((division) => !named.includes(division)).sort();
 }
 
 /** Scope that the characters themselves give, whatever the order of look-ups. */
-function scopeOf(prepared: PreparedLayout, cells: readonly Cell[], year: number | null): Scope {
+function scopeOf(
+	prepared: PreparedLayout,
+	cells: readonly Cell[],
+	whole: string | null,
+	year: number | null,
+	division: string | undefined
+): Scope {
 	const scope: Scope = { year };
+	if (division !== undefined) scope.division = division;
 	for (const { column, field } of prepared.codeColumns) {
-		const own = cells.slice(field.from - 1, field.to);
-		if (own.every(isRead)) scope[column] = own.join('');
+		if (whole !== null) scope[column] = whole.slice(field.from - 1, field.to);
+		else {
+			const own = cells.slice(field.from - 1, field.to);
+			if (own.every(isRead)) scope[column] = own.join('');
+		}
 	}
 	return scope;
 }
@@ -76,16 +99,16 @@ function unknownField(head: FieldHead, reader: Reader): FieldResult {
 		}),
 		rows: [],
 		counts: false,
-		lookups: []
+		table: null
 	};
 }
 
 function primaryField(index: number, prepared: PreparedLayout, reader: Reader): FieldResult {
-	const { layout, parts } = prepared;
+	const { layout, questions } = prepared;
 	const field = layout.fields[index] as PrimaryField;
 	switch (field.reads.by) {
 		case 'table':
-			return tableField(field, field.reads.table, parts[index] ?? [], reader);
+			return tableField(field, questions[index] as Question, reader);
 		case 'year':
 			return yearField(field, layout, reader);
 		case 'sequence':
@@ -109,8 +132,8 @@ function resultsOf(prepared: PreparedLayout, reader: Reader): FieldResult[] {
 	const results: FieldResult[] = [];
 	primary.forEach((own, index) => {
 		results.push(own);
-		for (const { field, head } of prepared.derived[index] ?? []) {
-			const result = derivedField(field, head, own, reader);
+		for (const { field, head, question } of prepared.derived[index] ?? []) {
+			const result = derivedField(field, head, question, own, reader);
 			if (result !== null) results.push(result);
 		}
 	});
@@ -125,37 +148,44 @@ export function draftsOf(
 	tables: TableSet,
 	context: ReadContext
 ): Draft[] {
-	const { layout, parents } = prepared;
+	const { layout } = prepared;
 	const missing = layout.length - typed.length;
 	const cells = missing > 0 ? [...typed, ...Array<Cell>(missing).fill(UNREAD)] : typed;
-	const named = divisionsIn(prepared, cells, year, tables);
-	const given = context.division;
-	const own = given !== undefined && makerOf(given) === layout.maker ? given : undefined;
-	const branches: readonly (string | undefined)[] = named.length > 0 ? named : [own];
-	return branches.map((division): Draft => {
-		const scope = scopeOf(prepared, cells, year);
-		if (division !== undefined) scope.division = division;
-		const reader: Reader = {
-			tables,
-			maker: layout.maker,
-			scope,
-			cells,
-			typed: typed.length,
-			parents
-		};
-		return {
-			layout,
-			maker: (division === undefined ? undefined : makerOf(division)) ?? layout.maker,
-			division: division ?? null,
-			year,
-			complete: missing <= 0,
-			results: resultsOf(prepared, reader)
-		};
+	const whole = cells.every(isRead) ? cells.join('') : null;
+	const readerOf = (division: string | undefined): Reader => ({
+		tables,
+		prepared,
+		scope: scopeOf(prepared, cells, whole, year, division),
+		cells,
+		text: whole,
+		typed: typed.length
 	});
+	const draft = (division: string | undefined): Draft => ({
+		layout,
+		maker: (division === undefined ? undefined : makerOf(division)) ?? layout.maker,
+		division: division ?? null,
+		year,
+		complete: missing <= 0,
+		results: resultsOf(prepared, readerOf(division))
+	});
+	const open = readerOf(undefined);
+	const named = divisionsIn(open);
+	const { division: given } = context;
+	if (named.length === 0)
+		named.push(...(given !== undefined && makerOf(given) === layout.maker ? [given] : []));
+	if (named.length === 0) return [draft(undefined)];
+	const drafts = named.map(draft);
+	if (layout.divisionInferred === true && drafts.every(isOutOfRun))
+		drafts.push(...divisionsByRun(open, named).map(draft));
+	return drafts;
 }
+
+/** Whether the running number stands outside the run on record of the reading's division. */
+export const isOutOfRun = (draft: Draft): boolean =>
+	draft.results.some((result) => result.outOfRun === true);
 
 /** The fields of a draft, with the questions they put to the tables when asked for. */
 export const fieldsOf = (draft: Draft, lookups: boolean): readonly ReadingField[] =>
 	draft.results.map((result) =>
-		lookups ? { ...result.field, lookups: result.lookups } : result.field
+		lookups ? { ...result.field, lookups: lookupsOf(result) } : result.field
 	);

@@ -1,16 +1,18 @@
 /** Fields whose meaning stands in a table. */
-import { tableDefinition, type Lookup, type Maker, type TableName } from '../../types';
 import { decoderText as text } from '../../text/en/decoder';
 import { isRead, textOf, type Cell } from './characters';
 import {
 	contestedField,
 	fieldOf,
 	foundField,
+	keepTold,
 	possibleOf,
+	toldBefore,
 	type FieldHead,
 	type FieldResult
 } from './field';
 import type { PrimaryField, Span } from './layout';
+import type { PreparedLayout, Question } from './plan';
 import {
 	choose,
 	claimFor,
@@ -20,18 +22,18 @@ import {
 	type Answer,
 	type Scope
 } from './look-up';
-import { rowsInYear, tableId, type CompiledRow, type TableSet } from './table-set';
+import { rowsInYear, type CompiledRow, type TableSet } from './table-set';
 
 /** What a field is read against. */
 export interface Reader {
 	readonly tables: TableSet;
-	readonly maker: Maker;
+	readonly prepared: PreparedLayout;
 	readonly scope: Scope;
 	readonly cells: readonly Cell[];
+	/** The characters as one text when every one of them is read. */
+	readonly text: string | null;
 	/** How many characters were typed; the places after them are unread. */
 	readonly typed: number;
-	/** The field that tells each scope column. */
-	readonly parents: ReadonlyMap<string, PrimaryField>;
 }
 
 const NONE: readonly never[] = [];
@@ -46,37 +48,35 @@ export function cellsOf(cells: readonly Cell[], parts: readonly Span[]): Cell[] 
 	]);
 }
 
-const missed = (table: TableName, code: string): readonly Lookup[] => [
-	{ table, code, row_key: null }
-];
-const used = (table: TableName, code: string, rows: readonly CompiledRow[]): readonly Lookup[] =>
-	rows.map((row) => ({ table, code, row_key: row.row_key }));
+const readCells = (reader: Reader, parts: readonly Span[]): string | null => {
+	const [first] = parts;
+	if (reader.text !== null && first !== undefined && parts.length === 1)
+		return reader.text.slice(first[0] - 1, first[1]);
+	const cells = cellsOf(reader.cells, parts);
+	return cells.every(isRead) ? cells.join('') : null;
+};
 
 function answered(
 	head: FieldHead,
-	table: TableName,
+	question: Question,
 	code: string,
 	answer: Answer,
 	reader: Reader
 ): FieldResult {
+	const { table } = question;
 	if (answer.kind === 'found')
-		return {
-			field: foundField(head, code, answer.rows),
-			rows: answer.rows,
-			counts: true,
-			lookups: used(table, code, answer.rows)
-		};
+		return { field: foundField(head, code, answer.rows), rows: answer.rows, counts: true, table };
 	if (answer.kind === 'contested') {
 		const rows = answer.groups.flat();
 		return {
 			field: contestedField(head, code, answer.groups),
 			rows,
 			counts: true,
-			lookups: used(table, code, rows)
+			table
 		};
 	}
 	if (answer.kind === 'depends') {
-		const parent = reader.parents.get(answer.on) as PrimaryField;
+		const parent = reader.prepared.parents.get(answer.on) as PrimaryField;
 		const read = reader.cells.slice(parent.from - 1, parent.to).every(isRead);
 		return {
 			field: fieldOf(head, {
@@ -89,10 +89,10 @@ function answered(
 			}),
 			rows: answer.rows,
 			counts: false,
-			lookups: used(table, code, answer.rows)
+			table
 		};
 	}
-	const compiled = reader.tables.tables.get(tableId(reader.maker, table));
+	const compiled = reader.tables.tables.get(question.id);
 	const claim = claimFor(compiled, reader.scope);
 	const source = claim === undefined ? undefined : reader.tables.sources.get(claim.source);
 	const field =
@@ -100,7 +100,7 @@ function answered(
 			? fieldOf(head, {
 					code,
 					outcome: 'not_listed',
-					detail: text.fields.notListed(head.label, code),
+					detail: missingDetail(head, code, reader),
 					possible: nearby(compiled?.byCode.get(code)?.all ?? NONE, reader.scope)
 				})
 			: fieldOf(head, {
@@ -109,7 +109,14 @@ function answered(
 					detail: text.fields.notUsed(code, source.title),
 					sources: [{ key: source.key, title: source.title, locator: '', kind: source.kind }]
 				});
-	return { field, rows: NONE, counts: false, lookups: missed(table, code) };
+	return { field, rows: NONE, counts: false, table };
+}
+
+/** What to say of a code without a row: for the line, also the gap that the car may fall into. */
+function missingDetail(head: FieldHead, code: string, { prepared }: Reader): string {
+	const { gap, lineFrom } = prepared.layout;
+	const said = text.fields.notListed(head.label, code);
+	return gap !== undefined && head.name === lineFrom ? `${said} ${gap}` : said;
 }
 
 /** What the same code meant on the same division in the years on either side. */
@@ -131,13 +138,12 @@ function nearby(rows: readonly CompiledRow[], scope: Scope) {
 
 function unread(
 	head: FieldHead,
-	table: TableName,
+	{ id, table }: Question,
 	cells: readonly Cell[],
 	reader: Reader
 ): FieldResult {
-	const compiled = reader.tables.tables.get(tableId(reader.maker, table));
+	const compiled = reader.tables.tables.get(id);
 	const rows: CompiledRow[] = [];
-	const lookups: Lookup[] = [];
 	for (const entry of entriesMatching(compiled, cells)) {
 		const answer = choose(rowsInYear(entry, reader.scope.year), reader.scope);
 		const own =
@@ -147,7 +153,6 @@ function unread(
 					? []
 					: answer.rows;
 		rows.push(...own);
-		lookups.push(...used(table, entry.code, own));
 	}
 	const code = textOf(cells);
 	const open = cells.filter((cell) => !isRead(cell)).length;
@@ -166,7 +171,7 @@ function unread(
 		}),
 		rows,
 		counts: false,
-		lookups: lookups.length > 0 ? lookups : missed(table, code)
+		table
 	};
 }
 
@@ -182,19 +187,22 @@ function spelled(cells: readonly Cell[]): string[] {
 }
 
 /** Reads one field against a table. */
-export function tableField(
-	head: FieldHead,
-	table: TableName,
-	parts: readonly Span[],
-	reader: Reader
-): FieldResult {
-	const cells = cellsOf(reader.cells, parts);
-	if (!cells.every(isRead)) return unread(head, table, cells, reader);
-	const code = cells.join('');
-	const compiled = reader.tables.tables.get(tableId(reader.maker, table));
-	const answer =
-		tableDefinition(table).match === 'range'
-			? lookUpRange(compiled, code, reader.scope)
-			: lookUp(compiled, code, reader.scope);
-	return answered(head, table, code, answer, reader);
+export function tableField(head: FieldHead, question: Question, reader: Reader): FieldResult {
+	const code = readCells(reader, question.parts);
+	if (code === null) return unread(head, question, cellsOf(reader.cells, question.parts), reader);
+	const compiled = reader.tables.tables.get(question.id);
+	if (question.range)
+		return answered(head, question, code, lookUpRange(compiled, code, reader.scope), reader);
+	const answer = lookUp(compiled, code, reader.scope);
+	if (answer.kind === 'found' && answer.rows.length === 1) {
+		const row = answer.rows[0] as CompiledRow;
+		const before = toldBefore(row, head);
+		return before ?? keepTold(row, head, answered(head, question, code, answer, reader));
+	}
+	if (answer.kind === 'missing' && question.otherwise !== null) {
+		const other = { ...question, parts: question.otherwise, otherwise: null };
+		const result = tableField(head, other, reader);
+		if (result.counts) return result;
+	}
+	return answered(head, question, code, answer, reader);
 }

@@ -4,6 +4,7 @@ import type {
 	FieldSource,
 	Maker,
 	ReferenceRow,
+	ScopeColumn,
 	Source,
 	Strength,
 	TableName
@@ -20,7 +21,9 @@ export interface CompiledRow extends ReferenceRow {
 	readonly contested_by: readonly string[];
 	/** Whether a citation above memory and common practice speaks for it. */
 	readonly cited: boolean;
-	/** Scope columns that are set: a narrower row stands before a wider one. */
+	/** Scope columns that are set and that a stamp can tell, in the order in which a missing one is named. */
+	readonly scoped: readonly Exclude<ScopeColumn, 'market'>[];
+	/** How many scope columns are set: a narrower row stands before a wider one. */
 	readonly narrowness: number;
 }
 

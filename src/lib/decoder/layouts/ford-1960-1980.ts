@@ -5,6 +5,7 @@
  * `layout` cites all. The body serial names division, line and body; the year figure repeats after ten years.
  * The form of 1955 to 1959 has ten characters in another order and is refused.
  */
+import { decoderText as text } from '../../text/en/decoder';
 import { ANY, DIGITS, LETTERS } from '../engine/characters';
 import { lastDigits, yearsByCharacter, type Layout } from '../engine/layout';
 
@@ -19,6 +20,8 @@ export const ford1960: Layout = {
 	divisionFrom: 'series',
 	lineFrom: 'series',
 	lookFirst: ['series'],
+	divisionInferred: true,
+	gap: text.gaps.ford,
 	fields: [
 		{
 			name: 'model_year',

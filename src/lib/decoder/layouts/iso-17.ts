@@ -5,9 +5,8 @@
  * in places 12 to 14 and whose running number has three figures.
  * Sources: 49 CFR 565.13 and 565.15; ISO 3779; ISO 3780. Letters I, O and Q are not used.
  */
-import { isNorthAmerican } from '../engine/calculated-field';
 import { isRead, UNREAD, type Cell } from '../engine/characters';
-import { VIN_CHARACTERS } from '../engine/check-digit';
+import { isNorthAmerican, VIN_CHARACTERS } from '../engine/check-digit';
 import { yearsByCharacter, type Layout, type PrimaryField } from '../engine/layout';
 import { decoderText as text } from '../../text/en/decoder';
 
@@ -61,7 +60,8 @@ const fieldsFor = (few: boolean): PrimaryField[] => [
 					parts: [
 						[1, 3],
 						[12, 14]
-					]
+					],
+					otherwise: [[1, 3]]
 				}
 			: { by: 'table', table: 'wmi' }
 	},
