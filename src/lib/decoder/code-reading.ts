@@ -127,7 +127,7 @@ function readIn(
 		layout: null,
 		layout_title: label,
 		maker: table.maker,
-		division: divisions.length === 1 ? (divisions[0] ?? null) : null,
+		division: divisions.length === 1 ? (divisions[0] as string) : null,
 		model_year: scope.year,
 		state: 'complete',
 		why: text.why.table(label),

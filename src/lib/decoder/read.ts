@@ -83,7 +83,7 @@ function firstProblems(
 			if (year === reading.model_year)
 				for (const draft of draftsOf(prepared, other, year, tables, context)) {
 					const own = draft.results.find(({ field, counts }) => field.name === name && counts);
-					if (own !== undefined) return own.field.meaning ?? null;
+					if (own !== undefined) return own.field.meaning;
 				}
 		return null;
 	};

@@ -1,7 +1,7 @@
 /** Fields that the layout or arithmetic tells: model year, running number, check digit. */
 import type { Possible } from '../../types';
 import { decoderText as text } from '../../text/en/decoder';
-import { isRead, textOf, UNREAD } from './characters';
+import { isRead, textOf, type Cell } from './characters';
 import { checkDigitOf, isNorthAmerican, narrowByCheckDigit } from './check-digit';
 import {
 	fieldOf,
@@ -179,7 +179,7 @@ export function checkField(head: FieldHead, layout: Layout, reader: Reader): Fie
 		return result(fieldOf(head, { code: digit, outcome: 'illegible', detail }), false);
 	}
 	const fits = expected === digit;
-	const northAmerica = isNorthAmerican(cells[0] ?? UNREAD);
+	const northAmerica = isNorthAmerican(cells[0] as Cell);
 	const failWhy = northAmerica ? text.check.failNorthAmerica : text.check.failElsewhere;
 	return result(
 		fieldOf(head, {

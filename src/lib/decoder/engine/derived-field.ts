@@ -76,7 +76,7 @@ export function derivedField(
 		const result = factField(head, key, parent);
 		return alone && result !== null ? keepTold(row, head, result) : result;
 	}
-	const result = question === null ? null : tableField(head, question, reader);
-	if (result === null || (!result.counts && field.always !== true)) return null;
+	const result = tableField(head, question as Question, reader);
+	if (!result.counts && field.always !== true) return null;
 	return { ...result, counts: false };
 }

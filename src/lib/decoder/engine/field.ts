@@ -214,7 +214,7 @@ export function possibleOf(rows: readonly CompiledRow[]): Possible[] {
 		const id = `${row.code} ${row.meaning}`;
 		if (!seen.has(id))
 			seen.set(id, {
-				...(row.code === '' ? {} : { code: row.code }),
+				code: row.code,
 				meaning: row.meaning,
 				values: row.values,
 				...(scope === '' ? {} : { scope })

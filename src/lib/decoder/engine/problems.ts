@@ -116,7 +116,6 @@ export function lookAlikes(
 		if (!lost || field.name === 'unknown' || field.derived_from !== undefined) continue;
 		const offers: Offer[] = [];
 		for (const other of exchanged(cells, field.from, field.to)) {
-			if (offers.length === MOST_OFFERS) break;
 			if (!fits(prepared, other)) continue;
 			const meaning = reread(other, field.name);
 			if (meaning !== null) offers.push({ text: textOf(other), why: text.wouldRead(meaning) });
@@ -127,7 +126,7 @@ export function lookAlikes(
 				position: field.from,
 				code: 'look_alike',
 				message: text.lookAlike(field.label, field.code),
-				offers
+				offers: offers.slice(0, MOST_OFFERS)
 			});
 	}
 	return problems;

@@ -1,7 +1,7 @@
 /** The order of readings, and the sentence that says why each stands where it does. */
 import type { ReadContext, Reading } from '../../types';
 import { decoderText as text } from '../../text/en/decoder';
-import { fieldsOf, isOutOfRun, type Draft } from './reading';
+import { fieldsOf, strayNumber, type Draft } from './reading';
 
 /** At most so many readings come back; the rest is counted. */
 export const MOST_READINGS = 24;
@@ -51,7 +51,7 @@ function keyOf(draft: Draft, context: ReadContext): Key {
 	}
 	return {
 		notUsed: outcomes.not_used,
-		outOfRun: isOutOfRun(draft) ? 1 : 0,
+		outOfRun: strayNumber(draft) === undefined ? 0 : 1,
 		hintsMissed: hintsMissed(draft, context),
 		found,
 		thin,

@@ -63,7 +63,9 @@ describe('a whole serial', () => {
 
 	it('says where a sequence number stands in its run', () => {
 		expect(field(reading, 'sequence_number').detail).toContain('number 1 of the run');
-		expect(field(inYear('2H37T6P099', 1966), 'sequence_number').detail).toContain('Below the first');
+		expect(field(inYear('2H37T6P099', 1966), 'sequence_number').detail).toContain(
+			'Below the first'
+		);
 		expect(field(inYear('2H37T6P900', 1966), 'sequence_number').detail).toContain('Above the last');
 		expect(field(first('2H37T7P600'), 'sequence_number').detail).toContain('number 101');
 		expect(field(first('2H37T5P600'), 'sequence_number').detail).toContain('not told');
@@ -236,6 +238,42 @@ describe('outcomes', () => {
 	it('an unread division is each division that has a row', () => {
 		const { readings } = ask('?H37T7P600');
 		expect(readings.map((own) => own.division)).toEqual(['Pontiac', 'Chevrolet']);
+	});
+});
+
+describe('facts of a row', () => {
+	it('become fields of their own, and leave no field where the row has none', () => {
+		const lines = first('2H37T6P100').fields.filter((own) => own.name === 'line');
+		expect(lines.map((own) => own.meaning)).toEqual(['Heron', 'Heron']);
+		const extra = withRows({
+			rows: [
+				buildRow('gm', 'engine', 'Y', 'One', { years: [1967, 1967] }),
+				buildRow('gm', 'engine', 'Y', 'Two', { n: 2, years: [1967, 1967] }),
+				buildRow('gm', 'engine', 'V', 'Alone', { years: [1967, 1967] })
+			]
+		});
+		for (const text of ['2H37Y7P600', '2H37V7P600']) {
+			const own = read(extra, { text, layouts: INVENTED_LAYOUTS }).readings[0] as Reading;
+			expect(field(own, 'cylinder_group')).toBeUndefined();
+		}
+	});
+
+	it('tell the same again when the same row is read again', () => {
+		expect(first('2H37T6P100')).toEqual(first('2H37T6P100'));
+	});
+});
+
+describe('a division given beside a text', () => {
+	it('stands in where no row names one', () => {
+		expect(first('9H37T7P600', { division: 'Pontiac' }).division).toBe('Pontiac');
+		expect(first('9H37T7P600', { division: 'Mercury' }).division).toBeNull();
+	});
+});
+
+describe('many characters that could be either', () => {
+	it('spell no list that nobody would read', () => {
+		const own = field(first('2H[0123456789][0123456789]T7P600'), 'body_style');
+		expect(own.possible.map((one) => one.code)).toEqual(['37', '45', '67', '69']);
 	});
 });
 

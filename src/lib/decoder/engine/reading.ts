@@ -24,8 +24,7 @@ export interface Draft {
 /** The divisions that the naming field may stand for in a year; empty when no row tells. */
 function divisionsIn(reader: Reader): string[] {
 	const { prepared, tables, cells, scope } = reader;
-	const question = prepared.questions[prepared.division];
-	if (question === null || question === undefined) return [];
+	const question = prepared.questions[prepared.division] as Question;
 	const divisions: string[] = [];
 	const add = (name: string): void => {
 		if (!divisions.includes(name)) divisions.push(name);
@@ -38,22 +37,15 @@ function divisionsIn(reader: Reader): string[] {
 	return divisions.length > 1 ? divisions.sort() : divisions;
 }
 
-/** Divisions other than those named whose run on record holds the running number. */
-function divisionsByRun(reader: Reader, named: readonly string[]): string[] {
-	const { prepared, tables, scope, text: whole } = reader;
-	const field = prepared.layout.fields.find(({ reads }) => reads.by === 'sequence');
-	if (whole === null || field === undefined) return [];
-	const number = Number(whole.slice(field.from - 1, field.to));
-	const runs =
-		(tables.tables.get(prepared.ids.sequence)?.byCode.get('') as CodeEntry | undefined) ?? null;
-	const holding = (runs === null ? [] : rowsInYear(runs, scope.year)).filter(({ values }) => {
-		const { first_sequence: first, last_sequence: last } = values;
-		return (
-			typeof first === 'number' && first <= number && (typeof last !== 'number' || number <= last)
-		);
+/** Divisions whose run on record holds a running number. */
+function divisionsByRun(reader: Reader, number: number): string[] {
+	const { prepared, tables, scope } = reader;
+	const runs = tables.tables.get(prepared.ids.sequence)?.byCode.get('') as CodeEntry;
+	const holding = rowsInYear(runs, scope.year).filter(({ values }) => {
+		const { first_sequence: first = 0, last_sequence: last = Infinity } = values;
+		return Number(first) <= number && number <= Number(last);
 	});
-	const divisions = holding.flatMap((row) => row.division);
-	return [...new Set(divisions)].filter((division) => !named.includes(division)).sort();
+	return [...new Set(holding.flatMap((row) => row.division))].sort();
 }
 
 /** Scope that the characters themselves give, whatever the order of look-ups. */
@@ -171,18 +163,25 @@ export function draftsOf(
 	const open = readerOf(undefined);
 	const named = divisionsIn(open);
 	const { division: given } = context;
-	if (named.length === 0)
-		named.push(...(given !== undefined && makerOf(given) === layout.maker ? [given] : []));
-	if (named.length === 0) return [draft(undefined)];
+	if (named.length === 0) {
+		const own = given !== undefined && makerOf(given) === layout.maker;
+		return [draft(own ? given : undefined)];
+	}
 	const drafts = named.map(draft);
-	if (layout.divisionInferred === true && drafts.every(isOutOfRun))
-		drafts.push(...divisionsByRun(open, named).map(draft));
+	const strays = drafts.map(strayNumber);
+	const [number] = strays;
+	if (layout.divisionInferred === true && number !== undefined && !strays.includes(undefined)) {
+		const others = divisionsByRun(open, number).filter((division) => !named.includes(division));
+		drafts.push(...others.map(draft));
+	}
 	return drafts;
 }
 
-/** Whether the running number stands outside the run on record of the reading's division. */
-export const isOutOfRun = (draft: Draft): boolean =>
-	draft.results.some((result) => result.outOfRun === true);
+/** The running number where it stands outside the run on record of the reading's division. */
+export function strayNumber(draft: Draft): number | undefined {
+	const stray = draft.results.find((result) => result.outOfRun === true);
+	return stray === undefined ? undefined : Number(stray.field.code);
+}
 
 /** The fields of a draft, with the questions they put to the tables when asked for. */
 export const fieldsOf = (draft: Draft, lookups: boolean): readonly ReadingField[] =>

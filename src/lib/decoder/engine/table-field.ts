@@ -121,8 +121,8 @@ function missingDetail(head: FieldHead, code: string, { prepared }: Reader): str
 
 /** What the same code meant on the same division in the years on either side. */
 function nearby(rows: readonly CompiledRow[], scope: Scope) {
-	const { year, division } = scope;
-	if (year === null) return [];
+	const { division } = scope;
+	const year = scope.year ?? NaN;
 	const distance = (row: CompiledRow): number =>
 		Math.max((row.years_from ?? year) - year, year - (row.years_to ?? year), 0);
 	const near = rows

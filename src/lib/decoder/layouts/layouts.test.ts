@@ -13,6 +13,7 @@ const tables = compile(
 	buildContent({
 		rows: [
 			buildRow('other', 'wmi', '1G4', 'Buick', { values: { maker_name: 'Buick' } }),
+			buildRow('other', 'wmi', '1A9', 'Makers of few, United States', { n: 9, values: {} }),
 			buildRow('other', 'wmi', '1J9/644', 'A maker of few', { values: {} }),
 			buildRow('other', 'layout', 'iso-17', 'Seventeen characters'),
 			buildRow('other', 'country', '1A-10', 'United States'),
@@ -124,6 +125,8 @@ describe('seventeen characters', () => {
 		});
 		const fine = read(tables, { text: '1G4AH59H45G118341', kind: 'serial' });
 		expect(fine.problems.filter((own) => own.position === 9)).toEqual([]);
+		const abroad = read(tables, { text: 'VF1AH59H55G118341', kind: 'serial' });
+		expect(abroad.problems.filter((own) => own.position === 9)).toEqual([]);
 		const hopeless = read(tables, { text: '3TT4M7T4WJTT47343', kind: 'serial' });
 		expect(hopeless.problems.filter((own) => own.position === 9)).toEqual([]);
 	});
@@ -133,6 +136,11 @@ describe('seventeen characters', () => {
 		expect(readings(text)[0]?.layout).toBe('iso-17-few');
 		expect(field(text, 'wmi')).toMatchObject({ code: '1J9/644', meaning: 'A maker of few' });
 		expect(field(text, 'sequence_number')).toMatchObject({ code: '345', strength: 'not_rated' });
+	});
+
+	it('falls back on the shared first part where the whole identifier has no row', () => {
+		expect(field('1A9RP1A36A1999345', 'wmi').meaning).toBe('Makers of few, United States');
+		expect(field('5A9RP1A36A1999345', 'wmi').outcome).toBe('not_listed');
 	});
 
 	it('says how much of the maker’s description is unread', () => {
