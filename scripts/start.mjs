@@ -1,6 +1,7 @@
 // npm start: from a fresh clone to a running product. Node built-ins only, until packages are there.
 import { endCommands } from './lib/commands.mjs';
 import { ensureBuild } from './lib/build.mjs';
+import { ensureMariadb } from './lib/mariadb.mjs';
 import { fillDatabase, openDatabase } from './lib/own-database.mjs';
 import { ensurePackages, packagesAreThere } from './lib/packages.mjs';
 import { BUILD } from './lib/project.mjs';
@@ -41,6 +42,8 @@ async function start() {
 	if (Number.isInteger(port) && port >= 0 && port < 65_536) await checkPort(host, port);
 
 	console.log('Tallyplate');
+	// Before the packages too: whoever has to install MariaDB by hand hears it at once.
+	if (!process.env.DATABASE_URL) await ensureMariadb(announce);
 	if (!packagesAreThere()) announce('Installing packages');
 	await step('Packages', async (say) => say((await ensurePackages()) ? 'installed' : 'in place'));
 	const database = await openDatabase();
