@@ -52,10 +52,17 @@ export async function withScratchDatabase<T>(
 	}
 }
 
+/** What went wrong and why, without the statements that a database error carries along. */
+function reasonOf(error: unknown): string {
+	if (!(error instanceof Error)) return String(error);
+	const [line = ''] = error.message.split('\n');
+	return error.cause === undefined ? line : `${line} ${reasonOf(error.cause)}`;
+}
+
 /** Runs a command: what went wrong is said in one line, in full with DEBUG set. */
 export function runCommand(command: () => Promise<void>): void {
 	command().catch((error: unknown) => {
-		console.error(process.env.DEBUG ? error : error instanceof Error ? error.message : error);
+		console.error(process.env.DEBUG ? error : reasonOf(error));
 		process.exitCode = 1;
 	});
 }

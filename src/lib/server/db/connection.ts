@@ -1,4 +1,4 @@
-import { Sequelize } from 'sequelize';
+import { QueryTypes, Sequelize } from 'sequelize';
 import { asking } from './errors';
 import { defineModels, type Models } from './models';
 
@@ -36,5 +36,5 @@ export function connect(url: string, { pool = 10 }: ConnectOptions = {}): Databa
  */
 export const ping = (database: Database): Promise<void> =>
 	asking(async () => {
-		await database.sequelize.query('SELECT 1');
+		await database.sequelize.query('SELECT 1', { type: QueryTypes.SELECT });
 	});

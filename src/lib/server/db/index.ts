@@ -2,4 +2,4 @@ export { connect, ping, type ConnectOptions, type Database } from './connection'
 export { dumpSchema } from './dump';
 export { asking, DatabaseAwayError, isAway } from './errors';
 export { migrateDown, migrateUp, pendingMigrations } from './migrator';
-export { inTransaction } from './transaction';
+export { inTransaction, type Transaction } from './transaction';

@@ -3,6 +3,8 @@ import { DatabaseError, type Transaction } from 'sequelize';
 import type { Database } from './connection';
 import { asking } from './errors';
 
+export type { Transaction };
+
 const LOCK_WAIT_TIMEOUT = 1205;
 const DEADLOCK = 1213;
 const ATTEMPTS = 6;

@@ -55,8 +55,8 @@ export class CompiledEditions {
 		if (shared) return shared;
 		// Before it stands in line: a number that does not exist takes nobody's place.
 		const head = await headOf(this.database, number);
-		const begun = this.#underWay.get(number);
-		if (begun) return begun;
+		const meanwhile = this.#compiled.get(number) ?? this.#underWay.get(number);
+		if (meanwhile) return meanwhile;
 		if (!urgent && this.#underWay.size > MOST_WAITING) throw new ServiceBusyError();
 		const work = this.#line
 			.then(() => this.#compile(head))

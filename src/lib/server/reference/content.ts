@@ -1,5 +1,4 @@
-import type { Transaction } from 'sequelize';
-import type { Database } from '../db';
+import type { Database, Transaction } from '../db';
 import { claims, referenceRows, sources, type RowEntry } from '../db/repositories';
 import type { Entries } from './entries';
 

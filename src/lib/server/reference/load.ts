@@ -1,11 +1,11 @@
 import { gunzipSync, gzipSync } from 'node:zlib';
 import type { EditionContent } from '../../types';
 import { inTransaction, type Database } from '../db';
-import { editions, releases } from '../db/repositories';
+import { editions, releases, type ReleaseConflict } from '../db/repositories';
 import { entriesAt } from './content';
 import { digestOf } from './digest';
 import { contentOfEntries, entriesOf, NO_ENTRIES, type Entries } from './entries';
-import { isEmpty, mergeRelease, type MergeConflict } from './merge';
+import { isEmpty, mergeRelease } from './merge';
 import { writeEdition } from './write-edition';
 
 export interface LoadReport {
@@ -19,7 +19,7 @@ export interface LoadReport {
 	readonly written: number;
 	readonly retired: number;
 	/** What a correction made here had changed as well: it stays, and moderators are shown both. */
-	readonly conflicts: readonly MergeConflict[];
+	readonly conflicts: readonly ReleaseConflict[];
 }
 
 /** The stored form keeps the base of the next merge whole: live rows alone could not tell it. */

@@ -1,7 +1,6 @@
 /** The three-way merge of a new release with what corrections made of the last one. Pure. */
 import type { Claim, Source } from '../../types';
-import type { ReleaseConflictRecord } from '../db/models';
-import type { RowEntry } from '../db/repositories';
+import type { ReleaseConflict, RowEntry } from '../db/repositories';
 import { claimText, entryText, sourceText } from './canonical';
 import { citedSources, type Entries } from './entries';
 
@@ -15,15 +14,11 @@ export interface ContentChanges {
 	readonly sources: Changes<Source>;
 	readonly claims: Changes<Claim>;
 }
-export type MergeConflict = Pick<
-	ReleaseConflictRecord,
-	'kind' | 'entry_key' | 'reason' | 'base' | 'theirs' | 'ours'
->;
 export interface Merge {
 	/** What the release changes here. */
 	readonly changes: ContentChanges;
 	/** What it could not change, because a correction had. */
-	readonly conflicts: readonly MergeConflict[];
+	readonly conflicts: readonly ReleaseConflict[];
 	/** All entries as they then stand. */
 	readonly merged: Entries;
 }
@@ -32,11 +27,11 @@ type Sides<T> = { readonly [side in 'base' | 'theirs' | 'ours']: ReadonlyMap<str
 interface Part<T> {
 	readonly changes: Changes<T>;
 	readonly merged: Map<string, T>;
-	readonly conflicts: MergeConflict[];
+	readonly conflicts: ReleaseConflict[];
 }
 
 /** Why both sides cannot be had, given that they differ from the base and from each other. */
-function reasonOf<T>(base?: T, theirs?: T, ours?: T): MergeConflict['reason'] {
+function reasonOf<T>(base?: T, theirs?: T, ours?: T): ReleaseConflict['reason'] {
 	if (base === undefined) return 'added_in_both';
 	if (ours === undefined) return 'retired_here';
 	return theirs === undefined ? 'retired_in_release' : 'changed_in_both';
@@ -44,14 +39,14 @@ function reasonOf<T>(base?: T, theirs?: T, ours?: T): MergeConflict['reason'] {
 
 /** Merges one sort of entry, key by key: what the release alone changed is taken, all else stays. */
 function mergePart<T>(
-	kind: MergeConflict['kind'],
+	kind: ReleaseConflict['kind'],
 	sides: Sides<T>,
 	textOf: (entry: T) => string
 ): Part<T> {
 	const text = (entry: T | undefined) => entry && textOf(entry);
 	const merged = new Map(sides.ours);
 	const changes: Changes<T> = { put: [], retire: [] };
-	const conflicts: MergeConflict[] = [];
+	const conflicts: ReleaseConflict[] = [];
 	for (const key of new Set([...sides.base.keys(), ...sides.theirs.keys()])) {
 		const base = sides.base.get(key);
 		const theirs = sides.theirs.get(key);
@@ -81,7 +76,7 @@ function mergePart<T>(
 /** A source that the release retires stays as long as something that stands here cites it. */
 function keepCitedSources(part: Part<Source>, sides: Sides<Source>, merged: Entries): Part<Source> {
 	const kept = new Map(part.merged);
-	const keptConflicts: MergeConflict[] = [];
+	const keptConflicts: ReleaseConflict[] = [];
 	const retired = new Set(part.changes.retire);
 	// A source that is kept may itself repeat another one.
 	for (let found = true; found;) {

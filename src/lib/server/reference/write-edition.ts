@@ -1,6 +1,5 @@
-import type { Transaction } from 'sequelize';
 import type { EditionCause } from '../../types';
-import type { Database } from '../db';
+import type { Database, Transaction } from '../db';
 import { claims, editions, referenceRows, sources } from '../db/repositories';
 import { digestOf } from './digest';
 import type { Entries } from './entries';

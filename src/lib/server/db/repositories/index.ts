@@ -4,3 +4,4 @@ export * as referenceRows from './reference-rows';
 export * as releases from './releases';
 export * as sources from './sources';
 export type { RowEntry, RowVersion } from './reference-rows';
+export type { ReleaseConflict } from './releases';

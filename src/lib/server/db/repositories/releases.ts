@@ -2,6 +2,12 @@ import type { Transaction } from 'sequelize';
 import type { Database } from '../connection';
 import type { ReleaseConflictRecord, ReleaseLoadRecord } from '../models';
 
+/** What a release and a correction made here both changed, as it is found. */
+export type ReleaseConflict = Pick<
+	ReleaseConflictRecord,
+	'kind' | 'entry_key' | 'reason' | 'base' | 'theirs' | 'ours'
+>;
+
 /** Number, edition and digest of the last release that was loaded; null before the first. */
 export async function lastLoad(
 	{ models }: Database,
@@ -33,10 +39,7 @@ export async function loadContent(
 export async function addLoad(
 	{ models }: Database,
 	load: ReleaseLoadRecord,
-	conflicts: readonly Pick<
-		ReleaseConflictRecord,
-		'kind' | 'entry_key' | 'reason' | 'base' | 'theirs' | 'ours'
-	>[],
+	conflicts: readonly ReleaseConflict[],
 	transaction: Transaction
 ): Promise<void> {
 	await models.releaseLoads.create(load, { transaction });
