@@ -106,6 +106,7 @@ describe('one figure for two years', () => {
 	});
 
 	it('takes maker, division and plant as hints as well', () => {
+		expect(ask('2H37T6P100', { maker: 'gm', plant: 'P' }).readings[0]?.rank).toBe(1);
 		expect(ask('2H37T6P100', { maker: 'ford', plant: 'b' }).readings).toHaveLength(2);
 		expect(ask('2H37T6P100', { division: 'Chevrolet' }).readings[0]?.division).toBe('Pontiac');
 	});
@@ -186,6 +187,48 @@ describe('outcomes', () => {
 		expect(ask('2H99T6P100').readings[1]?.why).toContain('not used');
 	});
 
+	it('says what a code meant wherever rows hold for all years', () => {
+		const extra = withRows({
+			rows: [
+				buildRow('gm', 'engine', 'S', 'Always so', { division: ['Pontiac'], line: ['Dunlin'] })
+			]
+		});
+		const own = read(extra, { text: '2H37S7P600', layouts: INVENTED_LAYOUTS }).readings[0];
+		expect(field(own as Reading, 'engine')).toMatchObject({
+			outcome: 'not_listed',
+			possible: [{ code: 'S', meaning: 'Always so', scope: 'Pontiac, Dunlin' }]
+		});
+	});
+
+	it('lists a meaning once, whatever the number of rows that say so', () => {
+		const extra = withRows({
+			rows: [
+				buildRow('gm', 'engine', 'S', 'The same', { years: [1967, 1967], line: ['Heron'] }),
+				buildRow('gm', 'engine', 'S', 'The same', { n: 2, years: [1967, 1968], line: ['Heron'] })
+			]
+		});
+		const own = read(extra, { text: '2H37[RS]7P600', layouts: INVENTED_LAYOUTS }).readings[0];
+		expect(field(own as Reading, 'engine').possible.map((one) => one.code)).toEqual(['S', 'R']);
+	});
+
+	it('takes the line from rows that agree on it', () => {
+		const extra = withRows({
+			rows: [
+				buildRow('gm', 'line', 'G', 'Heron, early', {
+					division: ['Pontiac'],
+					values: { line: 'Heron', series: 'A' }
+				}),
+				buildRow('gm', 'line', 'G', 'Heron, late', {
+					n: 2,
+					division: ['Pontiac'],
+					values: { line: 'Heron', series: 'B' }
+				})
+			]
+		});
+		const own = read(extra, { text: '2G69T7P600', layouts: INVENTED_LAYOUTS }).readings[0];
+		expect(field(own as Reading, 'body_style').meaning).toBe('4-door sedan');
+	});
+
 	it('illegible: lists what it could be under the rest', () => {
 		const own = field(first('2H37?7P600'), 'engine');
 		expect(own.outcome).toBe('illegible');
@@ -238,6 +281,11 @@ describe('outcomes', () => {
 	it('an unread division is each division that has a row', () => {
 		const { readings } = ask('?H37T7P600');
 		expect(readings.map((own) => own.division)).toEqual(['Pontiac', 'Chevrolet']);
+		const extra = withRows({
+			rows: [buildRow('gm', 'division', '3', 'Pontiac abroad', { values: { division: 'Pontiac' } })]
+		});
+		const twice = read(extra, { text: '?H37T7P600', layouts: INVENTED_LAYOUTS }).readings;
+		expect(twice.map((own) => own.division)).toEqual(['Pontiac', 'Chevrolet']);
 	});
 });
 

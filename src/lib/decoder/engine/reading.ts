@@ -124,7 +124,9 @@ function resultsOf(prepared: PreparedLayout, reader: Reader): FieldResult[] {
 	const results: FieldResult[] = [];
 	primary.forEach((own, index) => {
 		results.push(own);
-		for (const { field, head, question } of prepared.derived[index] ?? []) {
+		for (const { field, head, question } of prepared.derived[
+			index
+		] as PreparedLayout['derived'][number]) {
 			const result = derivedField(field, head, question, own, reader);
 			if (result !== null) results.push(result);
 		}
