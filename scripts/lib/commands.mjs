@@ -6,13 +6,15 @@ import { ROOT } from './project.mjs';
 /** @type {Set<import('node:child_process').ChildProcess>} */
 const running = new Set();
 
-/** Said when a command that has to succeed did not; `output` is what it printed. */
+const LINES = 40;
+
+/** Said when a command that has to succeed did not: the end of what it printed, and which it was. */
 export class CommandError extends Error {
 	/** @param {string} what @param {number | string | null} ended @param {string} output */
 	constructor(what, ended, output) {
-		super(`${what} failed (${ended}).`);
+		const last = output.trim().split('\n').slice(-LINES).join('\n');
+		super(`${last}\n\n${what} failed (${ended}).`);
 		this.name = 'CommandError';
-		this.output = output;
 	}
 }
 

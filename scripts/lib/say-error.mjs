@@ -1,20 +1,15 @@
 // How a command says why it stopped.
-import { CommandError } from './commands.mjs';
+import { inspect } from 'node:util';
 
 /** Errors whose message is all that their reader needs. */
-const PLAIN = new Set(['SetupError', 'ListenError', 'ConfigurationError', 'CommandError']);
-const LINES = 40;
+const FORESEEN = new Set(['SetupError', 'ListenError', 'ConfigurationError', 'CommandError']);
 
 /**
- * Prints an error: one sentence when it was foreseen, the end of the output of a command that failed,
- * else the stack.
- * @param {unknown} error
+ * What to say of an error: its message when it was foreseen, else the stack too.
+ * @param {unknown} error @returns {string}
  */
-export function sayError(error) {
-	if (error instanceof CommandError) {
-		console.error(error.output.trim().split('\n').slice(-LINES).join('\n'));
-		console.error();
-	}
-	const plain = error instanceof Error && PLAIN.has(error.name);
-	console.error(plain ? error.message : error);
-}
+export const wordsOf = (error) =>
+	error instanceof Error && FORESEEN.has(error.name) ? error.message : inspect(error);
+
+/** @param {unknown} error */
+export const sayError = (error) => console.error(wordsOf(error));

@@ -1,6 +1,7 @@
 // Serves the build with the database that DATABASE_URL names: what a deployment runs.
 import { fileURLToPath } from 'node:url';
-import { ListenError, serve } from './serve.mjs';
+import { sayError } from '../lib/say-error.mjs';
+import { serve } from './serve.mjs';
 
 const build = fileURLToPath(new URL('../../build', import.meta.url));
 
@@ -10,8 +11,6 @@ try {
 	for (const signal of ['SIGINT', 'SIGTERM'])
 		process.once(signal, () => void running.close(signal).then(() => process.exit(0)));
 } catch (error) {
-	const expected =
-		error instanceof ListenError || /** @type {Error} */ (error).name === 'ConfigurationError';
-	console.error(expected ? /** @type {Error} */ (error).message : error);
+	sayError(error);
 	process.exit(1);
 }

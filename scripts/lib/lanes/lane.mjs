@@ -1,4 +1,6 @@
 // A lane of the tests: one kind of check, with a count, a time, and what it printed.
+import { SetupError } from '../debian.mjs';
+import { wordsOf } from '../say-error.mjs';
 import { seconds } from '../steps.mjs';
 
 /**
@@ -21,7 +23,7 @@ const broken = (error) => ({
 	passed: 0,
 	failed: 1,
 	skipped: 0,
-	output: error instanceof Error ? (error.stack ?? error.message) : String(error)
+	output: wordsOf(error)
 });
 
 /** @param {Lane} lane @returns {Promise<Result>} */
@@ -75,7 +77,9 @@ export async function runLanes(lanes, atOnce = 2) {
 		}
 		const [lane] = /** @type {[Lane]} */ (waiting.splice(index, 1));
 		const failed = forerunners(lane).find((name) => results.get(name)?.failed);
-		const run = failed ? () => Promise.reject(`${failed} failed, on which this rests.`) : lane.run;
+		const run = failed
+			? () => Promise.reject(new SetupError(`${failed} failed, on which this rests.`))
+			: lane.run;
 		const work = runLane({ ...lane, run }).then((result) => {
 			results.set(lane.name, result);
 			print(result);

@@ -16,7 +16,9 @@ const LEFT_ALONE: ReadonlySet<string> = new Set([
 	'error_id',
 	'reader',
 	'request_id',
-	'time'
+	'time',
+	// Masked by maskAddress, which knows its parts.
+	'url'
 ]);
 const DEEPEST = 6;
 

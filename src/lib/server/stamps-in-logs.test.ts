@@ -39,7 +39,7 @@ describe('maskStamps', () => {
 		fc.assert(
 			fc.property(
 				stamp,
-				fc.constantFrom('', ' ', '-', '.', ' - ', '/', '\n', '%20'),
+				fc.constantFrom('', ' ', '-', '.', ' - ', ' / ', '\n', '%20'),
 				fc.constantFrom('', '*', '-', '**'),
 				fc.constantFrom('', 'no layout fits ', 'GET /?text=', '"'),
 				(characters, divider, end, before) => {
