@@ -24,11 +24,22 @@ export function canonicalJson(value: unknown): string {
 	);
 }
 
+/** Whether two JSON values are the same, whatever the order of keys. */
+export function sameContent(a: unknown, b: unknown): boolean {
+	if (a === b) return true;
+	if (typeof a !== 'object' || typeof b !== 'object' || a === null || b === null) return false;
+	const keys = Object.keys(a);
+	if (Array.isArray(a) !== Array.isArray(b) || keys.length !== Object.keys(b).length) return false;
+	return keys.every((key) =>
+		sameContent((a as Record<string, unknown>)[key], (b as Record<string, unknown>)[key])
+	);
+}
+
 /** Whether two rows give a code the same meaning and facts; notes do not count. */
 export const saysTheSame = (
 	a: Pick<ReferenceRow, 'meaning' | 'values'>,
 	b: Pick<ReferenceRow, 'meaning' | 'values'>
-): boolean => a.meaning === b.meaning && canonicalJson(a.values) === canonicalJson(b.values);
+): boolean => a.meaning === b.meaning && sameContent(a.values, b.values);
 
 /**
  * Whether two rows of one code hold for the same cars: their years meet, and each scope column is either

@@ -1,8 +1,15 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { buildCitation, buildContent, buildRow } from '../../../../tests/fixtures/builders';
+import {
+	buildCitation,
+	buildClaim,
+	buildContent,
+	buildRow,
+	buildSource
+} from '../../../../tests/fixtures/builders';
 import { INVENTED } from '../../../../tests/fixtures/invented';
-import { compareRows, overlaps, saysTheSame } from './compare';
+import type { SourceKind } from '../../types';
+import { canonicalJson, compareRows, overlaps, sameContent, saysTheSame } from './compare';
 import { compile, compileInSteps } from './compile';
 import { claimFor, lookUp, lookUpByScope, lookUpRange } from './look-up';
 import { rowsInYear, tableId, type CompiledTable } from './table-set';
@@ -57,6 +64,40 @@ describe('compiling', () => {
 		expect(next.rows.get('gm.engine.t.1')?.strength).toBe('thin');
 	});
 
+	it('notices a changed work behind a copy of it, and copies that copy each other', () => {
+		const rows = [buildRow('gm', 'engine', 'Q', 'One'), buildRow('gm', 'roof', 'Q', 'Two')];
+		const works = (kind: SourceKind) => [
+			buildSource('work', { kind }),
+			buildSource('copy', { kind: 'web_page', repeats: 'work' }),
+			buildSource('a', { repeats: 'b' }),
+			buildSource('b', { repeats: 'a' })
+		];
+		const content = (kind: SourceKind) =>
+			buildContent({
+				rows,
+				citations: [buildCitation('gm.engine.q.1', 'copy'), buildCitation('gm.roof.q.1', 'a')],
+				sources: works(kind)
+			});
+		const before = compile(content('web_page'));
+		const after = compile(content('factory_paper'), before);
+		expect(after.rows.get('gm.engine.q.1')?.strength).toBe('firm');
+		expect(after.tables.get('gm/roof')).toBe(before.tables.get('gm/roof'));
+	});
+
+	it('compiles a table anew when a row, a citation or a claim was added', () => {
+		const row = buildRow('gm', 'engine', 'Q', 'New');
+		const more = [
+			{ rows: [...INVENTED.rows, row] },
+			{ citations: [...INVENTED.citations, buildCitation('gm.engine.t.1', 'web-one')] },
+			{ claims: [...INVENTED.claims, buildClaim('gm.engine.all', 'gm', 'engine', 'marsh-book')] }
+		];
+		for (const parts of more) {
+			const next = compile({ ...INVENTED, ...parts }, tables);
+			expect(next.tables.get('gm/engine')).not.toBe(tables.tables.get('gm/engine'));
+			expect(next.tables.get('gm/line')).toBe(tables.tables.get('gm/line'));
+		}
+	});
+
 	it('pauses often while it compiles a large table', () => {
 		const rows = Array.from({ length: 1000 }, (_, n) =>
 			buildRow('gm', 'engine', String(n), `Engine ${n}`)
@@ -84,6 +125,20 @@ describe('comparing rows', () => {
 		expect(saysTheSame(one, { meaning: 'A', values: { b: [{ c: 2, d: 1 }], a: 1 } })).toBe(true);
 		expect(saysTheSame(one, { meaning: 'A', values: { a: 2 } })).toBe(false);
 		expect(saysTheSame(one, { ...one, meaning: 'B' })).toBe(false);
+	});
+
+	it('writes one text for one content', () => {
+		expect(canonicalJson({ b: [{ d: null, c: 2 }], a: 1 })).toBe('{"a":1,"b":[{"c":2,"d":null}]}');
+	});
+
+	it('tells lists from objects and values from nothing', () => {
+		expect(sameContent([1], [1])).toBe(true);
+		expect(sameContent([1], [1, 2])).toBe(false);
+		expect(sameContent([1], { 0: 1 })).toBe(false);
+		expect(sameContent(null, {})).toBe(false);
+		expect(sameContent({}, null)).toBe(false);
+		expect(sameContent({}, 'a')).toBe(false);
+		expect(sameContent(1, {})).toBe(false);
 	});
 
 	it('lets rows meet in years and in each scope column', () => {

@@ -9,8 +9,7 @@ import {
 	type ReferenceRow,
 	type Source
 } from '../../types';
-import { compareRows, overlaps, saysTheSame } from './compare';
-import { fingerprint } from './fingerprint';
+import { compareRows, overlaps, sameContent, saysTheSame } from './compare';
 import { strengthOf } from './strength';
 import {
 	tableId,
@@ -60,7 +59,7 @@ function markContested(drafts: readonly Draft[]): void {
 
 function finish(draft: Draft, sources: ReadonlyMap<string, Source>): CompiledRow {
 	const { row, finding, citations, contested_by } = draft;
-	return Object.freeze({
+	return {
 		...row,
 		strength: contested_by.length > 0 ? 'contested' : finding.strength,
 		strength_why: finding.why,
@@ -84,7 +83,7 @@ function finish(draft: Draft, sources: ReadonlyMap<string, Source>): CompiledRow
 							}
 						];
 			})
-	} satisfies CompiledRow);
+	};
 }
 
 function entryOf(code: string, rows: readonly CompiledRow[]): CodeEntry {
@@ -97,6 +96,36 @@ function entryOf(code: string, rows: readonly CompiledRow[]): CodeEntry {
 	return { code, all: rows, years };
 }
 
+/** Sources that say what they said in the edition before, and so do the works that they copy. */
+function steadySources(
+	sources: ReadonlyMap<string, Source>,
+	previous: TableSet | undefined
+): ReadonlySet<string> {
+	const changed = (key: string, seen: readonly string[] = []): boolean => {
+		const source = sources.get(key);
+		if (!sameContent(source, previous?.sources.get(key))) return true;
+		const repeats = source?.repeats ?? null;
+		return repeats !== null && !seen.includes(repeats) && changed(repeats, [...seen, key]);
+	};
+	return new Set(previous === undefined ? [] : [...sources.keys()].filter((key) => !changed(key)));
+}
+
+const ROW_KEYS = [
+	'row_key',
+	'maker',
+	'table',
+	...SCOPE_COLUMNS,
+	'years_from',
+	'years_to',
+	'code',
+	'meaning',
+	'values',
+	'note'
+] as const satisfies readonly (keyof ReferenceRow)[];
+
+const sameRow = (a: ReferenceRow, b: ReferenceRow): boolean =>
+	ROW_KEYS.every((key) => sameContent(a[key], b[key]));
+
 /**
  * Compiles in steps, so that a server can answer requests in between.
  * Tables whose rows, citations, sources and claims did not change are taken over from `previous`.
@@ -107,6 +136,7 @@ export function* compileInSteps(
 	previous?: TableSet
 ): Generator<void, TableSet, void> {
 	const sources = new Map(content.sources.map((source) => [source.key, source]));
+	const steady = steadySources(sources, previous);
 	const citationsOf = group(content.citations, (citation) => citation.row_key);
 	yield;
 	const claims = [...content.claims].sort((a, b) => (a.claim_key < b.claim_key ? -1 : 1));
@@ -117,20 +147,25 @@ export function* compileInSteps(
 	const rows = new Map<string, CompiledRow>();
 	for (const id of [...rowsOf.keys()].sort()) {
 		const list = (rowsOf.get(id) as ReferenceRow[]).sort(compareRows);
-		const parts: string[] = [JSON.stringify(claimsOf.get(id) ?? [])];
+		const known = previous?.tables.get(id);
+		const own = claimsOf.get(id) ?? [];
+		let same =
+			known !== undefined && known.rows.length === list.length && sameContent(known.claims, own);
 		const drafts: Draft[] = [];
 		for (const [index, row] of list.entries()) {
 			const citations = (citationsOf.get(row.row_key) ?? []).sort((a, b) =>
 				`${a.source} ${a.stance}` < `${b.source} ${b.stance}` ? -1 : 1
 			);
 			drafts.push({ row, finding: strengthOf(citations, sources), citations, contested_by: [] });
-			const cited = citations.map((citation) => sources.get(citation.source));
-			parts.push(fingerprint(JSON.stringify([row, citations, cited])));
+			const before = known?.rows[index];
+			same &&=
+				before !== undefined &&
+				sameRow(before, row) &&
+				sameContent(before.citations, citations) &&
+				citations.every(({ source }) => steady.has(source));
 			if (index % STEP === STEP - 1) yield;
 		}
-		const print = fingerprint(parts.join());
-		const known = previous?.tables.get(id);
-		if (known?.fingerprint === print) {
+		if (known !== undefined && same) {
 			tables.set(id, known);
 			for (const row of known.rows) rows.set(row.row_key, row);
 			yield;
@@ -155,8 +190,7 @@ export function* compileInSteps(
 			table,
 			rows: compiled,
 			byCode,
-			claims: claimsOf.get(id) ?? [],
-			fingerprint: print
+			claims: own
 		});
 		yield;
 	}

@@ -41,8 +41,6 @@ export interface CompiledTable {
 	readonly rows: readonly CompiledRow[];
 	readonly byCode: ReadonlyMap<string, CodeEntry>;
 	readonly claims: readonly Claim[];
-	/** Equal fingerprints: the table is the same and is shared between editions. */
-	readonly fingerprint: string;
 }
 
 /** Everything one edition says, compiled once and immutable. Unchanged tables are shared between editions. */
