@@ -1,0 +1,69 @@
+/** The form that a stamp is typed into, and the page around it before anything is read. */
+export const entryText = {
+	pageTitle: 'Read a stamp',
+	heading: 'Read what is stamped on the car',
+	label: 'Serial number or code, as it stands on the car',
+	labelShort: 'Serial number or code',
+	read: 'Read',
+	hint: {
+		before: 'Write ',
+		unread: '?',
+		between: ' for a character you cannot read, ',
+		either: '[38]',
+		after: ' for one that could be either. Spaces and dividers do not matter.'
+	},
+	kind: {
+		legend: 'Read as',
+		any: 'whatever fits',
+		serial: 'serial number',
+		code: 'single code'
+	},
+	/** Under the field, as soon as something stands in it. */
+	detected: {
+		seventeen: '17 characters: a serial number in the standard form.',
+		serial: (n: number) => `${n} characters: a serial number.`,
+		sequence: 'Six figures: the sequence of a serial number, or a code.',
+		code: (n: number) => `${n === 1 ? 'One character' : `${n} characters`}: a single code.`,
+		short: (n: number) => `${n} characters: the beginning of a serial number, or a code.`,
+		long: (n: number) => `${n} characters: more than any serial number has.`
+	},
+	wasRead: {
+		serial: (n: number) => `Read as a serial number, ${n} characters.`,
+		code: 'Read as a single code.'
+	},
+	maker: 'Maker, if known',
+	year: 'Model year, if known',
+	makerShort: 'Maker',
+	yearShort: 'Model year',
+	any: 'any',
+	wholeMaker: (name: string) => `${name}, any division`,
+	more: 'Maker, year, kind',
+	try: {
+		heading: 'Three to try',
+		note: 'Real code patterns, invented sequence numbers.',
+		stamps: [
+			{
+				text: 'RH23L0E904127',
+				about: '1970 Plymouth. A field on which sources differ, and both stand.'
+			},
+			{
+				text: '242379P9?4117',
+				about: '1969 Pontiac with a character lost to corrosion. What is still certain.'
+			},
+			{
+				text: '1G1AY8760B5900417',
+				about: 'The 17-character form, with its check digit worked through.'
+			}
+		]
+	},
+	example: {
+		heading: 'What a reading tells',
+		text: 'RM23N0G904127',
+		about:
+			'Each character, what it stands for, and how well that is supported. The sequence number is invented.',
+		open: 'Open this reading',
+		codes: 'What the codes say',
+		car: 'The car itself',
+		half: 'A reading is one half. Nobody has looked at the car: what is fitted to it, and what is struck where, is the other.'
+	}
+} as const;

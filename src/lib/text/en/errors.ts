@@ -1,0 +1,34 @@
+/** What a page says when it cannot be shown. */
+export const errorText = {
+	missing: {
+		title: 'No such page',
+		body: 'The address may be mistyped, or what it named is not in this installation. A row or an edition that is gone from the tables keeps its address, so a slip in copying is more likely.',
+		offers: [
+			{ name: 'Read a stamp', address: '/' },
+			{ name: 'Look through the tables', address: '/tables' },
+			{ name: 'Help', address: '/help' }
+		]
+	},
+	refused: {
+		title: 'This address cannot be read',
+		offer: 'Begin again'
+	},
+	busy: {
+		title: 'Busy for a moment',
+		body: 'What you asked for is being prepared, or too much is asked at once. Try again in a few seconds.'
+	},
+	away: {
+		title: 'Part of the workshop is closed',
+		body: 'This page needs the database, and the database does not answer. Reading goes on without it.',
+		offer: 'Read a stamp'
+	},
+	broken: {
+		title: 'Something broke here',
+		body: 'It is our fault and not yours, and it is on record. What you typed is still in the address; going back and trying again may work.',
+		offer: 'Read a stamp'
+	},
+	foreign: 'What changes something here has to come from our own pages.',
+	id: 'Error',
+	idNote: 'Name this number when you report it.',
+	again: 'Try again'
+} as const;

@@ -1,0 +1,53 @@
+/** What the form offers beside the field: makers and model years. */
+import type { Choice, ChoiceGroup } from '$lib/components/form/SelectField.svelte';
+import { MAKER_LIST, makerNamed } from '$lib/server/readings';
+import { entryText as words } from '$lib/text/en/entry';
+import { FIRST_YEAR } from '$lib/types';
+
+const any: Choice = { value: '', label: words.any };
+/** A name that is a corporation's too means the corporation: it stands for both. */
+const isOwnName = (division: string): boolean => makerNamed(division)?.division === division;
+
+/** Corporations, each over its divisions. */
+export const makerChoices: readonly (Choice | ChoiceGroup)[] = [
+	any,
+	...MAKER_LIST.filter(({ key }) => key !== 'other').map(({ key, name, divisions }) => {
+		const own = divisions.filter((division) => isOwnName(division.name));
+		const whole = { value: key, label: own.length === 0 ? name : words.wholeMaker(name) };
+		return {
+			label: name,
+			choices: [
+				whole,
+				...own.map((division) => ({ value: division.name.toLowerCase(), label: division.name }))
+			]
+		};
+	})
+];
+
+/** The corporation behind each choice, for the drawing of places. */
+export const corporations: Readonly<Record<string, string>> = Object.fromEntries(
+	makerChoices.flatMap((choice) =>
+		'choices' in choice
+			? choice.choices.map(({ value }) => [value, makerNamed(value)?.maker ?? ''])
+			: []
+	)
+);
+
+/** The choice that a name stands for; empty when it is none. */
+export function makerChoice(name: string): string {
+	const named = makerNamed(name);
+	if (named === null) return '';
+	return named.division?.toLowerCase() ?? named.maker;
+}
+
+/** Model years from the first that we speak of to the next. */
+export function yearChoices(now: Date): readonly Choice[] {
+	const last = now.getUTCFullYear() + 1;
+	return [
+		any,
+		...Array.from({ length: last - FIRST_YEAR + 1 }, (_, offset) => {
+			const year = String(FIRST_YEAR + offset);
+			return { value: year, label: year };
+		})
+	];
+}
