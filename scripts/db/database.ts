@@ -1,3 +1,5 @@
+import { rmSync } from 'node:fs';
+import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { connect, type Database } from '../../src/lib/server/db';
 import { DATABASE_FOLDER, runningServerUrl, startPrivateServer } from '../lib/mariadb.mjs';
@@ -32,6 +34,10 @@ export async function withDatabase<T>(work: (database: Database) => Promise<T>):
 		await server.stop();
 	}
 }
+
+/** Lets the next start look at the schema again, although no source has changed. */
+export const forgetPrepared = (): void =>
+	rmSync(join(PROJECT, DATABASE_FOLDER, 'prepared.sha256'), { force: true });
 
 /** Runs work on an empty database beside the given one, which is dropped again. */
 export async function withScratchDatabase<T>(

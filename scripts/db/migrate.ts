@@ -6,8 +6,9 @@
  *   npm run db:migrate -- --dump          writes the schema that the migrations make to schema.sql
  */
 import { writeFileSync } from 'node:fs';
-import { dumpSchema, migrateDown, migrateUp, type Database } from '../../src/lib/server/db';
-import { PROJECT, runCommand, withDatabase, withScratchDatabase } from './database';
+import type { Database } from '../../src/lib/server/db';
+import { dumpSchema, migrateDown, migrateUp } from '../../src/lib/server/db/schema';
+import { forgetPrepared, PROJECT, runCommand, withDatabase, withScratchDatabase } from './database';
 import { loadData } from './load-data';
 
 const SCHEMA = `${PROJECT}src/lib/server/db/schema.sql`;
@@ -35,6 +36,7 @@ runCommand(async () => {
 	await withDatabase(async (database) => {
 		if (option === '--dump') return dump(database);
 		if (option === '--down') {
+			forgetPrepared();
 			const names = await migrateDown(database, stepsOf(argument));
 			console.log(names.length > 0 ? `Took back ${names.join(', ')}` : 'Nothing to take back');
 			return;

@@ -2,7 +2,7 @@
  * Throws away everything in a database and makes it anew from the migrations and the release in data/.
  *   npm run db:reset -- --yes
  */
-import { migrateDown, migrateUp } from '../../src/lib/server/db';
+import { migrateDown, migrateUp } from '../../src/lib/server/db/schema';
 import { runCommand, withDatabase } from './database';
 import { loadData } from './load-data';
 

@@ -1,7 +1,12 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { QueryTypes } from 'sequelize';
 import { describe, expect, it } from 'vitest';
-import { dumpSchema, migrateDown, migrateUp, pendingMigrations } from '../../src/lib/server/db';
+import {
+	dumpSchema,
+	migrateDown,
+	migrateUp,
+	pendingMigrations
+} from '../../src/lib/server/db/schema';
 import { MIGRATIONS } from '../../src/lib/server/db/migrations';
 import { openTestDatabase } from '../fixtures/database';
 
