@@ -224,6 +224,16 @@ describe('refusals', () => {
 		expect(answer).toMatchObject({ status: 405, headers: { allow: 'GET, HEAD' } });
 	});
 
+	it('refuses a form under /api, which takes JSON', async () => {
+		const { port } = await start(json({}));
+		const headers = { 'content-type': 'application/x-www-form-urlencoded' };
+		const answer = await ask(port, '/api/v1/readings', { method: 'POST', headers, body: 'a=b' });
+		expect(problemOf(answer)).toMatchObject({ status: 415 });
+		expect(await ask(port, '/', { method: 'POST', headers, body: 'a=b' })).toMatchObject({
+			status: 200
+		});
+	});
+
 	it('refuses a body above the limit before it is read', async () => {
 		const { port } = await start(json({}));
 		const answer = await ask(port, '/api/v1/readings', { method: 'POST', body: 'x'.repeat(2049) });

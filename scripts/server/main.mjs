@@ -1,15 +1,23 @@
 // Serves the build with the database that DATABASE_URL names: what a deployment runs.
-import { fileURLToPath } from 'node:url';
 import { sayError } from '../lib/say-error.mjs';
+import { BUILD } from '../lib/project.mjs';
 import { serve } from './serve.mjs';
 
-const build = fileURLToPath(new URL('../../build', import.meta.url));
+/** @type {import('./serve.mjs').Running | undefined} */
+let running;
+
+/** @param {NodeJS.Signals} signal */
+async function end(signal) {
+	await running?.close(signal);
+	process.exit(0);
+}
+// Before it says that it listens: whoever hears that may end it at once.
+process.on('SIGINT', end);
+process.on('SIGTERM', end);
 
 try {
-	const running = await serve({ build });
+	running = await serve({ build: BUILD });
 	console.log(`Tallyplate is at ${running.origin} (port ${running.port})`);
-	for (const signal of ['SIGINT', 'SIGTERM'])
-		process.once(signal, () => void running.close(signal).then(() => process.exit(0)));
 } catch (error) {
 	sayError(error);
 	process.exit(1);

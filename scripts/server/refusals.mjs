@@ -1,10 +1,12 @@
 // What is refused before the application sees it.
 import { STATUS_CODES } from 'node:http';
+import { isApiPath, splitAddress } from './guarded-response.mjs';
 import { PROBLEM_TYPE, problemBody } from './problems.mjs';
-import { splitAddress } from './guarded-response.mjs';
 import { securityHeaders } from './security-headers.mjs';
 
 const METHODS = ['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS'];
+
+const FORM = /^(?:text\/plain|multipart\/form-data|application\/x-www-form-urlencoded)\b/i;
 
 /** @type {Readonly<Record<string, number>>} */
 const STATUS_OF_CODE = {
@@ -58,6 +60,8 @@ export function refuseEarly(request, response, { bodyLimit, isFile }) {
 	if (!path.startsWith('/')) return refuse(response, 400);
 	const taken = isFile(path) ? ['GET', 'HEAD'] : METHODS;
 	if (!taken.includes(method)) return refuse(response, 405, { allow: taken.join(', ') });
+	// The framework would take it for a form from another site, and say 403.
+	if (isApiPath(path) && FORM.test(headers['content-type'] ?? '')) return refuse(response, 415);
 	if (Number(headers['content-length']) > bodyLimit) {
 		request.resume();
 		return refuse(response, 413, { connection: 'close' });
