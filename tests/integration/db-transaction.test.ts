@@ -60,6 +60,22 @@ describe('a transaction', () => {
 		expect(await countOf(1)).toBe(11);
 	});
 
+	it('that loses at its commit, as in a cluster, is run again', async () => {
+		await database.sequelize.query('UPDATE places SET n = 0');
+		let attempts = 0;
+		await inTransaction(database, async (transaction) => {
+			attempts += 1;
+			await database.sequelize.query('UPDATE places SET n = n + 1 WHERE id = 1', { transaction });
+			if (attempts > 1) return;
+			transaction.commit = async () => {
+				await transaction.rollback();
+				throw new DatabaseError(Object.assign(new Error('lost'), { errno: 1213, sql: '' }));
+			};
+		});
+		expect(attempts).toBe(2);
+		expect(await countOf(1)).toBe(1);
+	});
+
 	it('that goes on losing is given up after six attempts', async () => {
 		const lost = Object.assign(new Error('lost'), { errno: 1213, sql: '' });
 		let attempts = 0;

@@ -89,10 +89,6 @@ export async function editionAt(number: number): Promise<CompiledEdition> {
 	return number === edition.status().tables ? edition.get() : edition.compiled.get(number);
 }
 
-/** The tables of an edition; see `editionAt`. */
-export const tablesAt = async (number: number): Promise<TableSet> =>
-	(await editionAt(number)).tables;
-
 /** Heads of editions, newest first, beginning below a number when one is given. @throws {DatabaseAwayError} */
 export const editions = (page: { below?: number; limit?: number } = {}): Promise<EditionHead[]> =>
 	headsBelow(started().database, page.below ?? null, page.limit ?? 50);
