@@ -6,6 +6,12 @@ export default {
 	preprocess: vitePreprocess(),
 	kit: {
 		adapter: adapter({ out: 'build' }),
+		typescript: {
+			config: (config) => ({
+				...config,
+				include: [...config.include, '../scripts/**/*.ts', '../scripts/**/*.mjs']
+			})
+		},
 		// Hashes, not nonces: a page can then be kept in a cache without carrying a stale nonce.
 		csp: {
 			mode: 'hash',
