@@ -2,7 +2,7 @@
 import { randomBytes } from 'node:crypto';
 import { createServer as createHttpServer } from 'node:http';
 import { chooseEncoding } from './compression.mjs';
-import { FixedReadings, keyOf } from './fixed-readings.mjs';
+import { FixedReadings, mayBeFixed } from './fixed-readings.mjs';
 import { GuardedResponse, splitAddress } from './guarded-response.mjs';
 import { answerClientError, refuseEarly } from './refusals.mjs';
 import { introduce, originsOf, visitorAddress } from './visitor.mjs';
@@ -87,39 +87,59 @@ export function createServer({
 	}
 
 	/** @param {Request} request @param {GuardedResponse} response */
-	async function answer(request, response) {
+	function receive(request, response) {
 		const passed = request.headers['x-request-id'];
-		const id =
+		response.requestId =
 			trustProxy > 0 && typeof passed === 'string' && PASSED_ID.test(passed) ? passed : nextId();
-		response.requestId = id;
 		if (events.answered) {
 			const started = performance.now();
 			response.once('close', () => events.answered?.(request, response, started));
 		}
-		try {
-			const key = keyOf(request);
-			if (key !== null && (await sendKept(key, request, response))) return;
-			if (draining && splitAddress(request.url)[0] === '/readyz') return sayDraining(response);
-			if (refuseEarly(request, response, { bodyLimit, isFile })) return;
-			request.headers['x-request-id'] = id;
-			introduce(request, originOf(request.headers.host), visitorAddress(request, trustProxy));
-			if (key !== null) response.keep = (...answered) => void readings.keep(key, ...answered);
-			await handler(request, response, () => response.writeHead(404).end());
-		} catch (error) {
+		answer(request, response)?.catch((error) => {
 			if (response.headersSent) response.destroy();
 			else response.writeHead(500).end();
-			events.failed(error, id);
-		}
+			events.failed(error, response.requestId);
+		});
 	}
 
-	/** @param {string} key @param {Request} request @param {GuardedResponse} response */
-	async function sendKept(key, request, response) {
-		const entry = readings.get(key);
-		if (!entry) return false;
-		const encoding = chooseEncoding(request.headers['accept-encoding']) ?? 'identity';
-		const form = entry.forms.get(encoding) ?? (await readings.formOf(entry, encoding));
-		response.sendReady(isKnown(request.headers['if-none-match'], entry.etag), form);
-		return true;
+	/**
+	 * Answers at once where no application is needed.
+	 * @param {Request} request @param {GuardedResponse} response
+	 * @returns {Promise<void> | undefined}
+	 */
+	function answer(request, response) {
+		const address = request.url ?? '';
+		const kept = mayBeFixed(request);
+		const entry = kept ? readings.get(address) : undefined;
+		if (entry) return sendKept(entry, request, response);
+		if (draining && splitAddress(address)[0] === '/readyz') {
+			sayDraining(response);
+			return;
+		}
+		if (refuseEarly(request, response, { bodyLimit, isFile })) return;
+		if (kept) response.keep = (...answered) => void readings.keep(address, ...answered);
+		request.headers['x-request-id'] = response.requestId;
+		introduce(request, originOf(request.headers.host), visitorAddress(request, trustProxy));
+		return ask(request, response);
+	}
+
+	/** @param {Request} request @param {GuardedResponse} response */
+	async function ask(request, response) {
+		await handler(request, response, () => response.writeHead(404).end());
+	}
+
+	/**
+	 * @param {import('./fixed-readings.mjs').Entry} entry
+	 * @param {Request} request @param {GuardedResponse} response
+	 * @returns {Promise<void> | undefined}
+	 */
+	function sendKept(entry, { headers }, response) {
+		const known = isKnown(headers['if-none-match'], entry.etag);
+		const encoding = chooseEncoding(headers['accept-encoding']) ?? 'identity';
+		const ready = entry.forms.get(encoding);
+		if (!ready)
+			return readings.formOf(entry, encoding).then((form) => response.sendReady(known, form));
+		response.sendReady(known, ready);
 	}
 
 	const server = createHttpServer(
@@ -130,7 +150,7 @@ export function createServer({
 			headersTimeout: HEADERS_TIMEOUT_MS,
 			requestTimeout: REQUEST_TIMEOUT_MS
 		},
-		(request, response) => void answer(request, response)
+		receive
 	);
 	server.on('clientError', (error, socket) => answerClientError(error, socket, secure));
 	return { server: /** @type {any} */ (server), drain: () => void (draining = true) };

@@ -4,6 +4,9 @@ import { compressWhole, SMALLEST, weakTag } from './compression.mjs';
 const READINGS = '/api/v1/readings?';
 /** Larger answers are rare, and would push out many small ones. */
 const LARGEST = 256 * 1024;
+/** The longest text that is read has 600 characters. */
+const LONGEST_ADDRESS = 2048;
+const MOST_ADDRESSES = 8192;
 /** What an entry costs beside its bodies: key, headers, bookkeeping. */
 const OVERHEAD = 1024;
 
@@ -19,19 +22,23 @@ const OVERHEAD = 1024;
  */
 
 /**
- * The key of a request whose answer could be kept, or null.
+ * Whether an answer to a request could be kept, or come from what is kept.
  * @param {import('node:http').IncomingMessage} request
- * @returns {string | null} parameters in order of their names, decoded
  */
-export function keyOf(request) {
-	const { method, url = '', headers } = request;
-	if (method !== 'GET' || !url.startsWith(READINGS)) return null;
-	if (headers.cookie !== undefined || headers.authorization !== undefined) return null;
+export function mayBeFixed({ method, url = '', headers }) {
+	if (method !== 'GET' || !url.startsWith(READINGS) || url.length > LONGEST_ADDRESS) return false;
+	if (!url.includes('edition=') || !url.includes('reader=')) return false;
+	if (headers.cookie !== undefined || headers.authorization !== undefined) return false;
 	const { accept } = headers;
-	if (accept !== undefined && !/\*\/\*|application\/(?:json|\*)/.test(accept)) return null;
-	const query = url.slice(READINGS.length);
-	if (!query.includes('edition=') || !query.includes('reader=')) return null;
-	const parameters = [...new URLSearchParams(query)];
+	return accept === undefined || /\*\/\*|application\/(?:json|\*)/.test(accept);
+}
+
+/**
+ * One key for all ways to write an address: parameters in order of their names, decoded.
+ * @param {string} address
+ */
+function keyOf(address) {
+	const parameters = [...new URLSearchParams(address.slice(READINGS.length))];
 	// Order of equal names is kept: which of them counts is the application's decision.
 	parameters.sort(([a], [b]) => (a < b ? -1 : a > b ? 1 : 0));
 	return JSON.stringify(parameters);
@@ -44,6 +51,8 @@ const OWN_TO_ONE = new Set(['connection', 'content-length', 'date', 'x-request-i
 export class FixedReadings {
 	/** @type {Map<string, Entry>} oldest use first */
 	#entries = new Map();
+	/** Keys of addresses as they were written, to be spared the reading of them. @type {Map<string, string>} */
+	#keys = new Map();
 	#bytes = 0;
 	#most;
 	#mostBytes;
@@ -62,9 +71,12 @@ export class FixedReadings {
 		return this.#bytes;
 	}
 
-	/** @param {string} key @returns {Entry | undefined} */
-	get(key) {
+	/** @param {string} address path and query @returns {Entry | undefined} */
+	get(address) {
+		const written = this.#keys.get(address);
+		const key = written ?? keyOf(address);
 		const entry = this.#entries.get(key);
+		if (entry && written === undefined) this.#remember(address, key);
 		if (entry) {
 			this.#entries.delete(key);
 			this.#entries.set(key, entry);
@@ -72,15 +84,22 @@ export class FixedReadings {
 		return entry;
 	}
 
+	/** @param {string} address @param {string} key */
+	#remember(address, key) {
+		if (this.#keys.size >= MOST_ADDRESSES) this.#keys.clear();
+		this.#keys.set(address, key);
+	}
+
 	/**
 	 * Keeps an answer when it says of itself that it cannot change.
-	 * @param {string} key
+	 * @param {string} address path and query
 	 * @param {number} status
 	 * @param {import('node:http').OutgoingHttpHeaders} headers
 	 * @param {Buffer} body as it was before compression
 	 * @returns {boolean} whether it was kept
 	 */
-	keep(key, status, headers, body) {
+	keep(address, status, headers, body) {
+		const key = keyOf(address);
 		if (!isFixed(status, headers) || body.length > LARGEST) return false;
 		/** @type {[string, string][]} */
 		const kept = [];

@@ -2,17 +2,18 @@ import { describe, expect, it } from 'vitest';
 import { FixedReadings } from './fixed-readings.mjs';
 
 const HEADERS = { 'cache-control': 'immutable', 'content-type': 'application/json' };
+const at = (name: string) => `/api/v1/readings?text=${name}`;
 const keep = (readings: FixedReadings, key: string, size = 10) =>
-	readings.keep(key, 200, HEADERS, Buffer.alloc(size, key));
+	readings.keep(at(key), 200, HEADERS, Buffer.alloc(size, key));
 
 describe('FixedReadings', () => {
 	it('lets go what was not asked for longest when there are too many', () => {
 		const readings = new FixedReadings({ most: 2 });
 		keep(readings, 'a');
 		keep(readings, 'b');
-		readings.get('a');
+		readings.get(at('a'));
 		keep(readings, 'c');
-		expect(['a', 'b', 'c'].filter((key) => readings.get(key))).toEqual(['a', 'c']);
+		expect(['a', 'b', 'c'].filter((key) => readings.get(at(key)))).toEqual(['a', 'c']);
 	});
 
 	it('lets go what was not asked for longest when it holds too much', () => {
@@ -25,7 +26,7 @@ describe('FixedReadings', () => {
 	it('counts compressed forms, once, and not those of an answer let go meanwhile', async () => {
 		const readings = new FixedReadings({ most: 1 });
 		keep(readings, 'a', 5000);
-		const entry = readings.get('a')!;
+		const entry = readings.get(at('a'))!;
 		const before = readings.bytes;
 		const forms = await Promise.all([readings.formOf(entry, 'br'), readings.formOf(entry, 'br')]);
 		expect(readings.bytes).toBe(before + forms[0].body.length);

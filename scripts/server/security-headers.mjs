@@ -18,25 +18,16 @@ const PAGE_POLICY = [
 	"frame-ancestors 'none'"
 ].join('; ');
 
+/** What a page could ask the visitor for and ours never do. */
 const UNUSED_FEATURES = [
-	'accelerometer',
-	'autoplay',
-	'browsing-topics',
 	'camera',
 	'display-capture',
-	'encrypted-media',
-	'fullscreen',
 	'geolocation',
-	'gyroscope',
-	'magnetometer',
 	'microphone',
 	'midi',
 	'payment',
-	'picture-in-picture',
-	'publickey-credentials-get',
-	'screen-wake-lock',
-	'usb',
-	'xr-spatial-tracking'
+	'serial',
+	'usb'
 ]
 	.map((feature) => `${feature}=()`)
 	.join(', ');
