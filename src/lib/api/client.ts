@@ -57,7 +57,7 @@ export class ApiUnreachable extends Error {
 type Query = Readonly<Record<string, string | number | undefined>>;
 
 /** Parameters in the order in which they are given; what is undefined or empty is left out. */
-export function queryString(query: Query): string {
+function queryString(query: Query): string {
 	const parameters = new URLSearchParams();
 	for (const [name, value] of Object.entries(query))
 		if (value !== undefined && value !== '') parameters.set(name, String(value));

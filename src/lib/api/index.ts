@@ -1,9 +1,2 @@
 /** The typed client of the interface. */
-export {
-	ApiProblem,
-	ApiUnreachable,
-	apiClient,
-	everyItem,
-	queryString,
-	type ApiClient
-} from './client';
+export { ApiProblem, ApiUnreachable, apiClient, everyItem, type ApiClient } from './client';

@@ -5,15 +5,11 @@
  */
 import { z } from 'zod';
 import { FIELD_NAMES } from './fields';
-import { STAMP_KINDS, type StampKind } from './readings';
+import type { StampKind } from './readings';
 import { FIRST_YEAR, LAST_YEAR, SOURCE_KINDS } from './rows';
 
 /** Kinds of stamp that can be read. The others are refused by name. */
 export const AVAILABLE_KINDS = ['serial', 'code'] as const satisfies readonly StampKind[];
-/** Kinds that will come. */
-export const COMING_KINDS = STAMP_KINDS.filter(
-	(kind) => !(AVAILABLE_KINDS as readonly StampKind[]).includes(kind)
-);
 
 const maker = z.string().describe('Corporation or division, by any name that /makers lists');
 const division = z.string().describe('Division, by any name that /makers lists');

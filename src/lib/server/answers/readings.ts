@@ -1,25 +1,42 @@
-import { answerJson, etagOf, IMMUTABLE, REVALIDATE } from '../http';
+import {
+	answerJson,
+	answerPosted,
+	counted,
+	etagOf,
+	IMMUTABLE,
+	REVALIDATE,
+	type Asked
+} from '../http';
 import { isThisReader, READER, readAgainst, type ReadRequest } from '../readings';
 import { current, editionAt, type CompiledEdition } from '../reference';
+import { editionAsked } from './edition';
 
-/**
- * Answers a reading. Synchronous, from memory, unless an older edition is asked for.
- * An address that carries edition and this reader never changes its answer, and says so.
- * @param question the address’s query: with edition and reader, what the validator stands for
- */
+/** Only such an address never changes its answer: it carries the edition, and the reader that we are. */
+const isPermanent = ({ edition, reader }: ReadRequest): boolean =>
+	edition !== undefined && reader !== undefined && isThisReader(reader);
+
+/** Answers a reading. Synchronous, from memory, unless an older edition is asked for. */
 export function answerReading(
-	request: Request,
-	asked: ReadRequest,
-	question: string
+	{ url, request, getClientAddress }: Asked,
+	asked: ReadRequest
 ): Response | Promise<Response> {
-	const lasts =
-		asked.edition !== undefined && asked.reader !== undefined && isThisReader(asked.reader);
-	const cacheControl = lasts ? IMMUTABLE : REVALIDATE;
-	const answer = (edition: CompiledEdition) =>
-		answerJson(request, { etag: etagOf(edition.head.digest, READER, question), cacheControl }, () =>
-			readAgainst(edition, asked)
+	const cacheControl = isPermanent(asked) ? IMMUTABLE : REVALIDATE;
+	const answer = (edition: CompiledEdition): Response => {
+		const etag = etagOf(edition.head.digest, READER, url.search);
+		return answerJson(request, { etag, cacheControl }, () =>
+			counted(getClientAddress(), () => readAgainst(edition, asked))
 		);
+	};
 	const present = current();
 	if (asked.edition === undefined || asked.edition === present.head.number) return answer(present);
 	return editionAt(asked.edition).then(answer);
+}
+
+/** Answers a reading that was posted. */
+export async function answerPostedReading(
+	{ getClientAddress }: Asked,
+	asked: ReadRequest
+): Promise<Response> {
+	const edition = await editionAsked(asked.edition);
+	return answerPosted(counted(getClientAddress(), () => readAgainst(edition, asked)));
 }

@@ -2,19 +2,10 @@
 export { chooseType } from './accept';
 export { answerCsv, answerJson, answerPosted, answerWritten } from './answer';
 export { etagOf, IMMUTABLE, REVALIDATE } from './caching';
-export {
-	filtersOf,
-	MOST,
-	pageOf,
-	readLimit,
-	startOf,
-	writeCursor,
-	type Page,
-	type Place
-} from './cursor';
+export { filtersOf, MOST, pageOf, readLimit, startOf, writeCursor } from './cursor';
 export { refusalOf } from './domain-errors';
-export { admit, endpoint, jsonEndpoint, otherMethods, type Asked } from './endpoint';
+export { admit, counted, endpoint, jsonEndpoint, otherMethods, type Asked } from './endpoint';
 export { readJsonObject } from './json-body';
 export { readParameters, type Parameters } from './parameters';
-export { PROBLEM_TYPE, problemDetails, problemResponse, refuse } from './problem';
+export { problemResponse } from './problem';
 export { fault, invalid, malformed, notFound, Refusal } from './refusal';

@@ -16,10 +16,10 @@ const TITLES: Readonly<Record<number, string>> = {
 	503: 'Service Unavailable'
 };
 
-export const PROBLEM_TYPE = 'application/problem+json';
+const PROBLEM_TYPE = 'application/problem+json';
 
 /** Problem details (RFC 9457) of a status. */
-export const problemDetails = (
+const problemDetails = (
 	status: number,
 	detail: string,
 	errors: readonly FieldError[] = []

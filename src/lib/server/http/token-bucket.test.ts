@@ -35,6 +35,20 @@ describe('a token bucket', () => {
 		expect(buckets.take('192.0.2.1')).toBe(12);
 	});
 
+	it('takes tokens afterwards, and lets nobody owe more than a minute', () => {
+		let now = 0;
+		const buckets = new TokenBuckets(60, () => now);
+		buckets.take('192.0.2.1');
+		buckets.charge('192.0.2.1', 58);
+		expect(buckets.take('192.0.2.1')).toBe(0);
+		buckets.charge('192.0.2.1', 1_000_000);
+		expect(buckets.take('192.0.2.1')).toBe(61);
+		now = 61_000;
+		expect(buckets.take('192.0.2.1')).toBe(0);
+		buckets.charge('192.0.2.9', 1);
+		expect(buckets.size).toBe(1);
+	});
+
 	it('stays bounded, and forgets full buckets before empty ones', () => {
 		let now = 0;
 		const buckets = new TokenBuckets(10, () => now, 10);

@@ -55,6 +55,12 @@ export class TokenBuckets {
 		return Math.max(1, Math.ceil(((price - bucket.tokens) * 60) / this.#perMinute));
 	}
 
+	/** Takes tokens for what is done already; a bucket can owe a minute's tokens at most. */
+	charge(address: string, cost: number): void {
+		const bucket = this.#buckets.get(accountOf(address));
+		if (bucket) bucket.tokens = Math.max(-this.#perMinute, bucket.tokens - cost);
+	}
+
 	#fill(bucket: Bucket, now: number): void {
 		const gained = ((now - bucket.at) * this.#perMinute) / 60_000;
 		bucket.tokens = Math.min(this.#perMinute, bucket.tokens + gained);

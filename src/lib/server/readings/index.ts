@@ -1,7 +1,7 @@
 /** Readings: what one stamp says against one edition. */
-export { divisionNamed, MAKER_LIST, makerNamed, type Named } from './aliases';
+export { divisionNamed, MAKER_LIST, makerNamed } from './aliases';
 export { parametersOfBody } from './body';
-export { readAgainst, readStamp } from './read';
+export { readAgainst } from './read';
 export { isThisReader, READER, READER_DIGEST } from './reader';
 export {
 	READING_PARAMETERS,

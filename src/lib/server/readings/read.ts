@@ -1,6 +1,6 @@
 import { read } from '../../decoder';
 import { MAKER_NAMES, type ReadAnswer, type Reading } from '../../types';
-import { current, editionAt, type CompiledEdition } from '../reference';
+import type { CompiledEdition } from '../reference';
 import { READER } from './reader';
 import type { ReadRequest } from './request';
 
@@ -33,13 +33,4 @@ export function readAgainst(
 		more: result.more,
 		problems: result.problems
 	};
-}
-
-/**
- * Reads a stamp against the present edition, or against the one that is asked for.
- * @throws {UnknownEditionError} and what else `reference.editionAt` throws
- */
-export async function readStamp(request: ReadRequest): Promise<ReadAnswer> {
-	if (request.edition === undefined) return readAgainst(current(), request);
-	return readAgainst(await editionAt(request.edition), request);
 }
