@@ -1,5 +1,5 @@
-import type { ParamMatcher } from '@sveltejs/kit';
-import { MAKERS } from '$lib/types';
+import { MAKERS, type Maker } from '$lib/types/makers';
 
 /** A corporation's key. */
-export const match: ParamMatcher = (param) => (MAKERS as readonly string[]).includes(param);
+export const match = (param: string): param is Maker =>
+	(MAKERS as readonly string[]).includes(param);

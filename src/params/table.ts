@@ -1,5 +1,5 @@
-import type { ParamMatcher } from '@sveltejs/kit';
-import { TABLE_NAMES } from '$lib/types';
+import { TABLE_NAMES, type TableName } from '$lib/types/tables';
 
 /** The name of a table. */
-export const match: ParamMatcher = (param) => (TABLE_NAMES as readonly string[]).includes(param);
+export const match = (param: string): param is TableName =>
+	(TABLE_NAMES as readonly string[]).includes(param);

@@ -7,5 +7,5 @@ export { refusalOf } from './domain-errors';
 export { admit, counted, endpoint, jsonEndpoint, otherMethods, type Asked } from './endpoint';
 export { readJsonObject } from './json-body';
 export { readParameters, type Parameters } from './parameters';
-export { problemResponse } from './problem';
+export { problemResponse, refuse } from './problem';
 export { fault, invalid, malformed, notFound, Refusal } from './refusal';
