@@ -1,4 +1,10 @@
-import { DIVISIONS, type Citation, type EditionContent, type ReferenceRow, type TableName } from '../../src/lib/types';
+import {
+	DIVISIONS,
+	type Citation,
+	type EditionContent,
+	type ReferenceRow,
+	type TableName
+} from '../../src/lib/types';
 import { buildCitation, buildRow, buildSource } from '../fixtures/builders';
 
 const LETTERS = 'ABCDEFGHJKLMNPRSTUVWXYZ';
@@ -9,19 +15,26 @@ const pad = (n: number): string => String(n).padStart(2, '0');
 /** Rows that every invented edition has, so that the same serials read the same whatever its size. */
 function base(maker: SerialMaker): ReferenceRow[] {
 	const rows: ReferenceRow[] = [];
-	const add = (table: TableName, code: string, meaning: string, parts: Parameters<typeof buildRow>[4]) =>
-		rows.push(buildRow(maker, table, code, meaning, { ...parts, n: rows.length + 1 }));
+	const add = (
+		table: TableName,
+		code: string,
+		meaning: string,
+		parts: Parameters<typeof buildRow>[4]
+	) => rows.push(buildRow(maker, table, code, meaning, { ...parts, n: rows.length + 1 }));
 	DIVISIONS[maker].forEach((division, index) => {
 		const own = { division: [division], years: [1960, 1980] as const };
 		const line = `Line ${division}`;
 		if (maker === 'gm') add('division', String(index + 1), division, { values: { division } });
 		for (let n = 0; n < 20; n += 1) {
 			const values = { line, series: `Series ${n}` };
-			if (maker === 'gm') add('series', `${n % 10}${n % 7}`, `Series ${n}`, { ...own, values, line: [] });
+			if (maker === 'gm')
+				add('series', `${n % 10}${n % 7}`, `Series ${n}`, { ...own, values, line: [] });
 			if (maker === 'gm') add('series', LETTERS.charAt(n), `Series ${n}`, { ...own, values });
-			if (maker === 'ford') add('body_serial', pad(index * 30 + n), `Body ${n}`, { ...own, values });
+			if (maker === 'ford')
+				add('body_serial', pad(index * 30 + n), `Body ${n}`, { ...own, values });
 		}
-		if (maker === 'chrysler') add('line', LETTERS.charAt(index), line, { ...own, values: { division, line } });
+		if (maker === 'chrysler')
+			add('line', LETTERS.charAt(index), line, { ...own, values: { division, line } });
 	});
 	for (const code of LETTERS) {
 		const years = [1960, 1980] as const;
@@ -40,18 +53,33 @@ function base(maker: SerialMaker): ReferenceRow[] {
  */
 export function inventedEdition(size: number): EditionContent {
 	const rows = MAKERS.flatMap(base);
-	const tables: readonly TableName[] = ['paint', 'trim', 'unit_code', 'casting_number', 'engine', 'assembly_plant', 'series', 'body_style'];
+	const tables: readonly TableName[] = [
+		'paint',
+		'trim',
+		'unit_code',
+		'casting_number',
+		'engine',
+		'assembly_plant',
+		'series',
+		'body_style'
+	];
 	for (let n = 0; rows.length < size; n += 1) {
 		const maker = MAKERS[n % 3] as SerialMaker;
 		const table = tables[n % tables.length] as TableName;
 		const year = 1960 + (n % 20);
 		rows.push(
-			buildRow(maker, table, `${LETTERS.charAt(n % 23)}${n % 10}${n.toString(36).toUpperCase()}`, `Meaning ${n}`, {
-				n: 100_000 + n,
-				years: [year, year],
-				line: [`Other ${n % 50}`],
-				values: { displacement_cuin: 200 + (n % 300) }
-			})
+			buildRow(
+				maker,
+				table,
+				`${LETTERS.charAt(n % 23)}${n % 10}${n.toString(36).toUpperCase()}`,
+				`Meaning ${n}`,
+				{
+					n: 100_000 + n,
+					years: [year, year],
+					line: [`Other ${n % 50}`],
+					values: { displacement_cuin: 200 + (n % 300) }
+				}
+			)
 		);
 	}
 	const sources = Array.from({ length: 50 }, (_, n) =>

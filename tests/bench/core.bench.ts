@@ -1,0 +1,89 @@
+import { readFileSync } from 'node:fs';
+import { parse } from 'csv-parse/sync';
+import { readContent } from '../../scripts/data/read';
+import { inProject } from '../../scripts/lib/project.mjs';
+import { inventedEdition, inventedSerials } from './invented-edition';
+import { bundledDecoder } from './lib/decoder';
+import { median, rateOf, ratioOf } from './lib/rounds';
+
+const { compile, read } = await bundledDecoder();
+const released = compile(readContent(inProject('data')));
+
+/** Serials as published, their masks filled with figures: mixed layouts, each sequence number another. */
+const published: string[] = ['gm', 'chrysler', 'ford']
+	.flatMap((maker) =>
+		(
+			parse(readFileSync(inProject('tests', 'published', 'serials', `${maker}.csv`), 'utf8'), {
+				columns: true
+			}) as { text: string; known_miss: string }[]
+		).filter((sample) => sample.known_miss === '')
+	)
+	.map(({ text }) => text.replaceAll('-', ''))
+	.filter((text) => text.length === 11 || text.length === 13);
+const serials = [
+	...Array.from({ length: 20_000 }, (_, n) => {
+		const text = published[n % published.length] as string;
+		return text.slice(0, -6) + String(100_001 + ((n * 37) % 890_000));
+	}),
+	...Array.from({ length: 4000 }, (_, n) => `1G4AH59H4${'5678'.charAt(n % 4)}G${118_341 + n}`)
+];
+
+const reading = (tables: typeof released, texts: readonly string[]) => (times: number) => {
+	for (let n = 0; n < times; n += 1)
+		read(tables, { text: texts[n % texts.length] as string, kind: 'serial' });
+};
+
+/** Seconds a reading against an invented edition of some size. */
+const cost = (size: number) => {
+	const work = reading(compile(inventedEdition(size)), inventedSerials(20_000));
+	return () => {
+		const started = performance.now();
+		work(40_000);
+		return performance.now() - started;
+	};
+};
+const base = cost(2_000);
+
+const marked = ['RM23N0G10????', '24237?P?1?41?7'.slice(0, 13), '9F?1H5?1?3?', '1G4AH59H?5?11?34?'];
+
+export const figures = [
+	{
+		name: 'Serials a second, one core, released tables',
+		bound: 150_000,
+		unit: '/s',
+		direction: 'at least',
+		run: () => rateOf(reading(released, serials), { times: 24_000, rounds: 9 })
+	},
+	{
+		name: 'Four unread characters, the slowest of four forms',
+		bound: 20,
+		unit: 'ms',
+		direction: 'at most',
+		run: () =>
+			Math.max(
+				...marked.map((text) =>
+					median(
+						Array.from({ length: 41 }, () => {
+							const started = performance.now();
+							read(released, { text, kind: 'serial' });
+							return performance.now() - started;
+						})
+					)
+				)
+			)
+	},
+	{
+		name: 'Time a reading, ten times the rows',
+		bound: 1.1,
+		unit: '×',
+		direction: 'at most',
+		run: () => ratioOf(cost(20_000), base)
+	},
+	{
+		name: 'Time a reading, a hundred times the rows',
+		bound: 1.3,
+		unit: '×',
+		direction: 'at most',
+		run: () => ratioOf(cost(200_000), base)
+	}
+] as const;
