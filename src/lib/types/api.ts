@@ -14,8 +14,7 @@ import {
 	sourceKindSchema,
 	sourceSchema
 } from './rows';
-import { makerSchema } from './makers';
-import { tableNameSchema } from './tables';
+import { makerSchema, tableNameSchema } from './name-schemas';
 import { factsSchema, itemSchema } from './values';
 
 /** One thing wrong with a request: which parameter, why, and what would be taken. */

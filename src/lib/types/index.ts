@@ -2,6 +2,7 @@ export * from './api';
 export * from './api-requests';
 export * from './fields';
 export * from './makers';
+export * from './name-schemas';
 export * from './readings';
 export * from './rows';
 export * from './tables';

@@ -1,9 +1,6 @@
-import { z } from 'zod';
-
 /** A maker is a corporation; a division is the name on the car. */
 export const MAKERS = ['gm', 'chrysler', 'ford', 'amc', 'other'] as const;
-export const makerSchema = z.enum(MAKERS);
-export type Maker = z.infer<typeof makerSchema>;
+export type Maker = (typeof MAKERS)[number];
 
 export const MAKER_NAMES: Readonly<Record<Maker, string>> = {
 	gm: 'General Motors',
@@ -23,7 +20,6 @@ export const DIVISIONS = {
 } as const satisfies Record<Maker, readonly string[]>;
 
 export const ALL_DIVISIONS = Object.values(DIVISIONS).flat();
-export const divisionSchema = z.enum(ALL_DIVISIONS as [string, ...string[]]);
 export type Division = (typeof DIVISIONS)[Maker][number];
 
 /** Which corporation a division belongs to. */

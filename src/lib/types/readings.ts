@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import type { FieldName, Outcome, Strength } from './fields';
-import { makerSchema, type Maker } from './makers';
+import type { Maker } from './makers';
+import { makerSchema } from './name-schemas';
 import { yearSchema, type SourceKind } from './rows';
 import type { TableName } from './tables';
 import type { RowValues } from './values';

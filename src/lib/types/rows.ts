@@ -1,6 +1,5 @@
 import { z } from 'zod';
-import { makerSchema } from './makers';
-import { tableNameSchema } from './tables';
+import { makerSchema, tableNameSchema } from './name-schemas';
 
 /** Model years that the product speaks of. */
 export const FIRST_YEAR = 1955;

@@ -1,5 +1,3 @@
-import { z } from 'zod';
-
 /**
  * Every kind of row. `match` says how a code is held against the rows:
  * - `exact`: the code as it stands;
@@ -45,7 +43,10 @@ export const TABLES = {
 	model_year: code('Model years', 'The character that stands for the model year.'),
 	assembly_plant: code('Assembly plants', 'The character that names the assembly plant.'),
 	restraint: code('Restraint systems', 'The restraint character of a 17-character number.'),
-	serial_transmission: code('Transmissions in the serial', 'The transmission character of a serial.'),
+	serial_transmission: code(
+		'Transmissions in the serial',
+		'The transmission character of a serial.'
+	),
 	sequence: {
 		label: 'Sequence numbers',
 		about: 'First and last sequence numbers by division, line, plant and year.',
@@ -88,5 +89,4 @@ export const TABLES = {
 
 export type TableName = keyof typeof TABLES;
 export const TABLE_NAMES = Object.keys(TABLES) as TableName[];
-export const tableNameSchema = z.enum(TABLE_NAMES as [TableName, ...TableName[]]);
 export const tableDefinition = (name: TableName): TableDefinition => TABLES[name];
