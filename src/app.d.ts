@@ -8,6 +8,8 @@ declare global {
 			id?: string;
 			/** Which foreseen failure it was, as `database_away`; absent for what was not foreseen. */
 			code?: string;
+			/** The status that was answered, where the framework takes it for 500. */
+			status?: number;
 		}
 		interface Locals {
 			/** Stands in the log and on the answer as X-Request-Id. */

@@ -67,15 +67,16 @@ export const handleError: HandleServerError = ({ error, event, status, message }
 	const id = randomBytes(5).toString('hex');
 	const refusal = refusalOf(error);
 	event.locals.failure = { id, refusal };
-	const fields = {
-		err: error,
-		error_id: id,
-		request_id: event.locals.requestId,
-		route: event.route.id
+	const told = refusal && {
+		message: refusal.message,
+		status: refusal.status,
+		code: refusal.errors[0]?.code
 	};
-	if (refusal) log().warn(fields, 'foreseen');
+	// Somebody asked for what is not there.
+	if (told && told.status < 500) return told;
+	const { requestId } = event.locals;
+	const fields = { err: error, error_id: id, request_id: requestId, route: event.route.id };
+	if (told) log().warn(fields, 'foreseen');
 	else log().error(fields, 'unforeseen');
-	return refusal
-		? { message: refusal.message, id, code: refusal.errors[0]?.code }
-		: { message: errorText.broken.title, id };
+	return { message: errorText.broken.title, ...told, id };
 };
