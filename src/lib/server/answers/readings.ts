@@ -1,13 +1,13 @@
 import {
-	answerJson,
 	answerPosted,
+	answerWritten,
 	counted,
 	etagOf,
 	IMMUTABLE,
 	REVALIDATE,
 	type Asked
 } from '../http';
-import { isThisReader, READER, readAgainst, type ReadRequest } from '../readings';
+import { isThisReader, READER, readAgainst, writeAnswer, type ReadRequest } from '../readings';
 import { current, editionAt, type CompiledEdition } from '../reference';
 import { editionAsked } from './edition';
 
@@ -23,8 +23,8 @@ export function answerReading(
 	const cacheControl = isPermanent(asked) ? IMMUTABLE : REVALIDATE;
 	const answer = (edition: CompiledEdition): Response => {
 		const etag = etagOf(edition.head.digest, READER, url.search);
-		return answerJson(request, { etag, cacheControl }, () =>
-			counted(getClientAddress(), () => readAgainst(edition, asked))
+		return answerWritten(request, { etag, cacheControl }, () =>
+			counted(getClientAddress(), () => writeAnswer(readAgainst(edition, asked)))
 		);
 	};
 	const present = current();

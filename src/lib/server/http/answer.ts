@@ -16,8 +16,12 @@ const ANY_ORIGIN = '*';
 export const answerJson = (request: Request, kept: Kept, make: () => unknown): Response =>
 	answerWritten(request, kept, () => JSON.stringify(make()));
 
-/** As `answerJson`, for what is written already. */
-export function answerWritten(request: Request, kept: Kept, write: () => string): Response {
+/** As `answerJson`, for what writes itself, as text or in UTF-8. */
+export function answerWritten(
+	request: Request,
+	kept: Kept,
+	write: () => string | Uint8Array<ArrayBuffer>
+): Response {
 	const { etag, cacheControl = REVALIDATE } = kept;
 	if (holds(request.headers.get('if-none-match'), etag)) return notModified(kept);
 	const body = write();

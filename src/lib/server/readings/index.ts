@@ -10,3 +10,4 @@ export {
 	type ReadingParameter,
 	type ReadRequest
 } from './request';
+export { writeAnswer } from './write';
