@@ -1,10 +1,11 @@
 import tailwindcss from '@tailwindcss/vite';
 import { sveltekit } from '@sveltejs/kit/vite';
 import { defineConfig } from 'vitest/config';
+import { helpPlugin } from './scripts/vite/help.ts';
 import { readerPlugin } from './scripts/vite/reader.ts';
 
 export default defineConfig({
-	plugins: [readerPlugin(), tailwindcss(), sveltekit()],
+	plugins: [readerPlugin(), helpPlugin(), tailwindcss(), sveltekit()],
 	build: {
 		// Fonts under 4 kB would become data: addresses, which the policy refuses.
 		assetsInlineLimit: 0

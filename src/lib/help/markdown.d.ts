@@ -1,0 +1,4 @@
+declare module '*.md' {
+	const page: import('./pages').HelpPage;
+	export default page;
+}

@@ -1,0 +1,2 @@
+// Texts and links: nothing here needs a script.
+export const csr = false;
