@@ -44,6 +44,9 @@ export interface CoverageGroupView {
 /** The model years that the drawing shows. */
 export const COVERAGE_YEARS: readonly number[] = Array.from({ length: 21 }, (_, n) => 1960 + n);
 
+/** Below this a share rests on too little to be drawn as one. */
+export const FEW_ROWS = 10;
+
 /** Years within the drawing for which a make built no cars. */
 const NO_CARS: Readonly<Record<string, readonly [from: number, to: number]>> = {
 	// Gone after 1975, a name of Chrysler's until 1981 (memory).

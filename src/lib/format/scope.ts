@@ -22,7 +22,8 @@ export function scopeWords({ maker, division, line, body, engine, plant, market 
 		plant.length > 0 ? text.plant(plant.join(', ')) : '',
 		market.join(', ')
 	].filter(Boolean);
-	if (division.length === 0) parts.unshift(wholeMaker(maker));
+	if (division.length === 0)
+		parts.unshift(maker === 'other' ? text.everyMaker : MAKER_NAMES[maker]);
 	return parts.join('; ');
 }
 

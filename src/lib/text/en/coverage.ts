@@ -1,0 +1,82 @@
+/** How far the tables reach, and where they end. */
+import { counted } from './counts';
+
+export const coverageText = {
+	title: 'Coverage',
+	intro:
+		'How many rows we have for each make and model year, how well they are supported, and what is not there at all.',
+	notCurated: 'One Ford line of April 1964 is not curated.',
+	byYear: 'By make and model year',
+	drawing: 'A cell fills from below with the share of its rows that are firm or fair.',
+	legend: {
+		share: 'share of rows that are firm or fair',
+		few: (n: number) => `the same, of fewer than ${n} rows`,
+		none: 'no rows yet',
+		blank: 'blank: no cars that year'
+	},
+	asTable: 'The same as a table',
+	asTableCaption: 'Rows that hold for a make in a model year, and the share that is firm or fair',
+	make: 'Make',
+	cell: (rows: number, share: number): string => `${counted(rows, 'row', 'rows')}, ${share} %`,
+	cellTitle: (division: string, year: number, rows: number, share: number): string =>
+		rows === 0
+			? `${division} ${year}: no rows yet`
+			: `${division} ${year}: ${counted(rows, 'row', 'rows')}, ${share} % firm or fair`,
+	noRows: 'no rows',
+	noCars: 'no cars',
+	yearsOf: (division: string): string => `${division}: tables of every year`,
+
+	byTable: 'By table',
+	byTableNote:
+		'Rows of every strength. A thin row rests on one web page, on memory or on practice.',
+	layouts: 'Serial numbers that are read',
+	layoutsNote:
+		'A number in another form is refused, with the nearest layout named; it is not guessed at.',
+	layoutHeads: { layout: 'Layout', years: 'Model years', length: 'Characters' },
+	gaps: 'What is not there',
+	gapsNote: 'What is missing says nothing against a car. These are the gaps that we know of.',
+	notCuratedTitle: 'Left out on purpose',
+	gapList: [
+		{
+			title: 'General Motors of 1964 and before',
+			text: 'Each division had a form of its own until 1965, so that there is no one layout to read by. The 12-character Chevrolet of 1964 is told apart from later numbers, not read.'
+		},
+		{
+			title: 'Cadillac, 1965 to 1970',
+			text: 'The numbers may have been shorter than those of the other divisions. We have no source that settles it.'
+		},
+		{
+			title: 'Chrysler Corporation of 1964 and 1965',
+			text: 'Ten characters in another order. We found no published page to rest a table on.'
+		},
+		{
+			title: 'Ford Motor Company of 1955 to 1959',
+			text: 'Ten characters in another order than from 1960 on. The later layout refuses them.'
+		},
+		{
+			title: 'American Motors',
+			text: 'Rows can be looked up; serial numbers are not read yet. For 1966 and 1967 we found no published form.'
+		},
+		{
+			title: 'Studebaker, and makers of trucks',
+			text: 'No tables.'
+		},
+		{
+			title: 'Body tags, engine pads, castings, dates and glass',
+			text: 'Their codes stand in the tables and can be looked up one by one. Whole tags and stamps are not read yet.'
+		},
+		{
+			title: 'Trim, paint and tops',
+			text: 'Whole charts for some makes and years, scattered codes for others. A code that is not listed is usual here.'
+		},
+		{
+			title: 'Cars built outside the United States and Canada',
+			text: 'For the 17-character standard the maker’s own characters, 4 to 8, have no table. Older numbers of other countries are not read.'
+		}
+	],
+	complete: {
+		none: 'No table carries a claim of completeness: none of our sources lists every code of its scope, so a code that we lack is “not listed” and never “not used”.',
+		some: (n: number): string =>
+			`${counted(n, 'claim', 'claims')} of completeness, each by a named source. Only there can a code be “not used”; everywhere else a code that we lack is “not listed”.`
+	}
+} as const;

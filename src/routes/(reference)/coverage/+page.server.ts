@@ -1,0 +1,24 @@
+import { LAYOUTS } from '$lib/decoder';
+import { drawnCoverage } from '$lib/format/coverage';
+import { yearSpan } from '$lib/format/years';
+import { admit } from '$lib/server/http';
+import { coverage, current } from '$lib/server/reference';
+import type { PageServerLoad } from './$types';
+import { coverageByTable } from './by-table';
+
+export const load: PageServerLoad = ({ getClientAddress }) => {
+	admit(getClientAddress());
+	const { tables, head } = current();
+	return {
+		edition: head.number,
+		coverage: drawnCoverage(coverage(tables).divisions),
+		makers: coverageByTable(tables),
+		claims: tables.claims.length,
+		layouts: LAYOUTS.filter(({ kind }) => kind === 'serial').map(({ id, title, years, length }) => ({
+			id,
+			title,
+			years: yearSpan(...years),
+			length
+		}))
+	};
+};
