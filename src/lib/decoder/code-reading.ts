@@ -75,12 +75,11 @@ function readField(
 	scope: Scope
 ): ReadingField | null {
 	const { cells, normalised } = characters;
-	const open = cells.filter((cell) => !isRead(cell)).length;
-	if (open > 0)
+	if (!cells.every(isRead))
 		return fieldOf(head, {
 			code: normalised,
 			outcome: 'illegible',
-			detail: text.fields.unread(open, cells.length),
+			detail: text.fields.unread(cells),
 			possible: possibleOf(rows)
 		});
 	const answer = answerOf(rows, scope);

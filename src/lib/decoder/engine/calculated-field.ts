@@ -22,9 +22,6 @@ export function layoutRows(reader: Reader, layout: Layout): readonly CompiledRow
 	return table?.byCode.get(layout.id)?.all ?? [];
 }
 
-const unreadCount = (code: readonly string[]): number =>
-	code.filter((cell) => !isRead(cell)).length;
-
 /** The model year: the layout's rule, with the row that says so where there is one. */
 export function yearField(head: FieldHead, layout: Layout, reader: Reader): FieldResult {
 	const cells = reader.cells.slice(head.from - 1, head.to);
@@ -99,10 +96,7 @@ export function sequenceField(head: FieldHead, layout: Layout, reader: Reader): 
 	const cells = reader.cells.slice(head.from - 1, head.to);
 	const code = reader.text?.slice(head.from - 1, head.to) ?? textOf(cells);
 	if (reader.text === null && !cells.every(isRead)) {
-		const detail =
-			head.from > reader.typed
-				? text.fields.notTyped
-				: text.fields.unread(unreadCount(cells), cells.length);
+		const detail = head.from > reader.typed ? text.fields.notTyped : text.fields.unread(cells);
 		return {
 			field: fieldOf(head, { code, outcome: 'illegible', detail }),
 			rows: [],
@@ -159,7 +153,7 @@ export function checkField(head: FieldHead, layout: Layout, reader: Reader): Fie
 	});
 	const expected = checkDigitOf(cells);
 	if (!isRead(digit)) {
-		const detail = head.from > reader.typed ? text.fields.notTyped : text.fields.unread(1, 1);
+		const detail = head.from > reader.typed ? text.fields.notTyped : text.fields.unread([digit]);
 		const possible =
 			expected === null
 				? []

@@ -233,7 +233,9 @@ describe('outcomes', () => {
 		const own = field(first('2H37?7P600'), 'engine');
 		expect(own.outcome).toBe('illegible');
 		expect(own.possible.map((one) => one.code)).toEqual(['T', 'W', 'W', 'X']);
+		expect(own.detail).toBe('Unread.');
 		const either = field(first('2H37[TQ]7P600'), 'engine');
+		expect(either.detail).toBe('Could be Q or T.');
 		expect(either.possible.map((one) => [one.code, one.meaning])).toEqual([
 			['T', '300-cubic-inch V8, two-barrel carburetor'],
 			['Q', 'Not in the tables']

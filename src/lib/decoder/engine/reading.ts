@@ -80,14 +80,14 @@ function linesOf(rows: readonly CompiledRow[]): readonly string[] | undefined {
 
 function unknownField(head: FieldHead, reader: Reader): FieldResult {
 	const cells = reader.cells.slice(head.from - 1, head.to);
-	const open = cells.filter((cell) => !isRead(cell)).length;
+	const open = !cells.every(isRead);
 	const unread = (): string =>
-		head.from > reader.typed ? text.fields.notTyped : text.fields.unread(open, cells.length);
+		head.from > reader.typed ? text.fields.notTyped : text.fields.unread(cells);
 	return {
 		field: fieldOf(head, {
 			code: textOf(cells),
-			outcome: open > 0 ? 'illegible' : 'not_listed',
-			detail: open > 0 ? unread() : text.fields.noTable
+			outcome: open ? 'illegible' : 'not_listed',
+			detail: open ? unread() : text.fields.noTable
 		}),
 		rows: [],
 		counts: false,

@@ -155,7 +155,6 @@ function unread(
 		rows.push(...own);
 	}
 	const code = textOf(cells);
-	const open = cells.filter((cell) => !isRead(cell)).length;
 	const possible = possibleOf(rows);
 	const named = new Set(rows.map((row) => row.code));
 	for (const candidate of spelled(cells))
@@ -165,8 +164,7 @@ function unread(
 		field: fieldOf(head, {
 			code,
 			outcome: 'illegible',
-			detail:
-				head.from > reader.typed ? text.fields.notTyped : text.fields.unread(open, cells.length),
+			detail: head.from > reader.typed ? text.fields.notTyped : text.fields.unread(cells),
 			possible
 		}),
 		rows,

@@ -110,7 +110,21 @@ export const decoderText = {
 			'The maker decides what these say. We have no table for them, and that says nothing against the car.',
 		notUsed: (code: string, source: string) =>
 			`${code} stands in no row, and ${source} lists every code of this scope.`,
-		unread: (n: number, of: number) => `${count(n)} of ${lower(count(of))} unread.`,
+		/** `cells` as they were read: `?` for unread, `38` for one of these. */
+		unread: (cells: readonly string[]): string => {
+			const unread = cells.filter((cell) => cell === '?').length;
+			const either = cells.filter((cell) => cell.length > 1);
+			const parts: string[] = [];
+			if (unread > 0)
+				parts.push(
+					cells.length === 1
+						? 'Unread.'
+						: `${count(unread)} of ${lower(count(cells.length))} unread.`
+				);
+			for (const cell of either)
+				parts.push(`Could be ${listed([...cell]).replace(' and ', ' or ')}.`);
+			return parts.join(' ');
+		},
 		notTyped: 'Not typed yet.',
 		noRowFor: 'Not in the tables'
 	},
