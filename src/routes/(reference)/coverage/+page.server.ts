@@ -14,11 +14,13 @@ export const load: PageServerLoad = ({ getClientAddress }) => {
 		coverage: drawnCoverage(coverage(tables).divisions),
 		makers: coverageByTable(tables),
 		claims: tables.claims.length,
-		layouts: LAYOUTS.filter(({ kind }) => kind === 'serial').map(({ id, title, years, length }) => ({
-			id,
-			title,
-			years: yearSpan(...years),
-			length
-		}))
+		layouts: LAYOUTS.filter(({ kind }) => kind === 'serial').map(
+			({ id, title, years, length }) => ({
+				id,
+				title,
+				years: yearSpan(...years),
+				length
+			})
+		)
 	};
 };
