@@ -18,14 +18,14 @@ export const entryText = {
 		serial: 'serial number',
 		code: 'single code'
 	},
-	/** Under the field, as soon as something stands in it. */
+	/** Under the field while something is typed; {n} is the number of characters. */
 	detected: {
-		seventeen: '17 characters: a serial number in the standard form.',
-		serial: (n: number) => `${n} characters: a serial number.`,
+		code: 'Characters: {n}. A single code.',
 		sequence: 'Six figures: the sequence of a serial number, or a code.',
-		code: (n: number) => `${n === 1 ? 'One character' : `${n} characters`}: a single code.`,
-		short: (n: number) => `${n} characters: the beginning of a serial number, or a code.`,
-		long: (n: number) => `${n} characters: more than any serial number has.`
+		short: '{n} characters: the beginning of a serial number, or a code.',
+		serial: '{n} characters: a serial number.',
+		seventeen: '17 characters: a serial number in the standard form.',
+		long: '{n} characters: more than any serial number has.'
 	},
 	wasRead: {
 		serial: (n: number) => `Read as a serial number, ${n} characters.`,
@@ -44,7 +44,8 @@ export const entryText = {
 		stamps: [
 			{
 				text: 'RH23L0E904127',
-				about: '1970 Plymouth. A field on which sources differ, and both stand.'
+				about:
+					'1970 Plymouth. Its year figure stands for two years: two readings, ranked, each with its reason.'
 			},
 			{
 				text: '242379P9?4117',

@@ -48,6 +48,7 @@ export const readingText = {
 	illegible: 'Cannot be read',
 	notTyped: 'Not typed yet',
 	nearby: 'Known nearby',
+	oneOf: 'One of these',
 	couldBe: 'Could be',
 	andMorePossible: (n: number) => `${n} more that it could be`,
 	contestedNote: (n: number) =>

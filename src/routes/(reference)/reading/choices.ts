@@ -24,14 +24,8 @@ export const makerChoices: readonly (Choice | ChoiceGroup)[] = [
 	})
 ];
 
-/** The corporation behind each choice, for the drawing of places. */
-export const corporations: Readonly<Record<string, string>> = Object.fromEntries(
-	makerChoices.flatMap((choice) =>
-		'choices' in choice
-			? choice.choices.map(({ value }) => [value, makerNamed(value)?.maker ?? ''])
-			: []
-	)
-);
+/** The corporation that a name stands for or belongs to, for the drawing of places; empty for none. */
+export const corporationOf = (name: string): string => makerNamed(name)?.maker ?? '';
 
 /** The choice that a name stands for; empty when it is none. */
 export function makerChoice(name: string): string {

@@ -69,8 +69,8 @@ export interface EntryView {
 	readonly years: readonly Choice[];
 }
 export interface EmptyView {
-	/** The corporation behind each maker of the form, for the drawing of places. */
-	readonly corporations: Readonly<Record<string, string>>;
+	/** The corporation that the chosen maker is or belongs to, for the drawing of places; empty for none. */
+	readonly corporation: string;
 	/** The worked example; null when the tables do not read it. */
 	readonly example: { readonly reading: ReadingView; readonly address: string } | null;
 }

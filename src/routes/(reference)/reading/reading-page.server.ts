@@ -5,7 +5,7 @@ import { readAgainst, readRequest } from '$lib/server/readings';
 import { current, editionAt } from '$lib/server/reference';
 import { entryText } from '$lib/text/en/entry';
 import { answerView } from './answer-view';
-import { corporations, makerChoice, makerChoices, yearChoices } from './choices';
+import { corporationOf, makerChoice, makerChoices, yearChoices } from './choices';
 import type { AskedView, EmptyView, FieldFault, ReadingPage } from './page-data';
 import { viewOf } from './view';
 
@@ -55,12 +55,12 @@ function entryOf(asked: Asked, typed: string, faults: readonly FieldFault[], now
 }
 
 /** The worked example, read against the present tables like anything else. */
-function emptyView(): EmptyView {
+function emptyView(asked: Asked): EmptyView {
 	const { text } = entryText.example;
 	const answer = readAgainst(current(), readRequest({ text, kind: 'serial' }));
 	const [reading] = answer.readings;
 	return {
-		corporations,
+		corporation: corporationOf(asked.maker ?? ''),
 		example:
 			reading === undefined
 				? null
@@ -83,7 +83,7 @@ export async function readingPage(url: URL, now: Date): Promise<ReadingPage> {
 	const blank = (faults: readonly FieldFault[]): ReadingPage => ({
 		entry: entryOf(asked, typed, faults, now),
 		answer: null,
-		empty: emptyView(),
+		empty: emptyView(asked),
 		present
 	});
 	if (!url.searchParams.has('text')) return blank([]);

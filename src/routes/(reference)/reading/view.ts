@@ -173,8 +173,13 @@ function widthOf(group: GroupView): number {
 	const longest = Math.max(
 		...own.flatMap((field) => field.meaning.split(' ').map((word) => word.length))
 	);
-	const volume = Math.max(...own.map((field) => field.meaning.length * 2 + field.detail.length));
-	const roomy = volume > 160 ? 180 : volume > 90 ? 150 : 120;
+	const volume = Math.max(
+		...own.map(
+			({ meaning, detail, sources }) =>
+				meaning.length * 2 + detail.length + (sources[0]?.title.length ?? 0)
+		)
+	);
+	const roomy = volume > 260 ? 190 : volume > 90 ? 160 : volume > 45 ? 140 : 120;
 	return Math.min(220, Math.max(roomy, Math.ceil((longest * 10.5 + 28) / 10) * 10));
 }
 
@@ -197,7 +202,8 @@ export function titleOf(reading: AnsweredReading): string {
 	const [only] = reading.fields;
 	if (reading.layout === null && only !== undefined) {
 		const name = text.codeTitle(only.label, only.code);
-		return only.outcome === 'found' && only.meaning !== null ? `${name}: ${only.meaning}` : name;
+		const told = only.outcome === 'found' && only.possible.length === 0;
+		return told && only.meaning !== null ? `${name}: ${only.meaning}` : name;
 	}
 	return readingTitle(reading) ?? (reading.layout_title || text.untitled);
 }
