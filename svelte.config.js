@@ -24,7 +24,9 @@ export default {
 		typescript: {
 			config: (config) => ({
 				...config,
-				include: [...config.include, '../scripts/**/*.ts', '../scripts/**/*.mjs']
+				include: [...config.include, '../scripts/**/*.ts', '../scripts/**/*.mjs'],
+				// An application of its own, with its own configuration.
+				exclude: [...config.exclude, '../tests/bench/bare/**']
 			})
 		},
 		// Hashes, not nonces: a page can then be kept in a cache without carrying a stale nonce.

@@ -1,5 +1,8 @@
 // A lane of the tests: one kind of check, with a count, a time, and what it printed.
+import { mkdirSync, writeFileSync } from 'node:fs';
+import { dirname, join, relative } from 'node:path';
 import { SetupError } from '../debian.mjs';
+import { LOCAL, ROOT } from '../project.mjs';
 import { wordsOf } from '../say-error.mjs';
 import { seconds } from '../steps.mjs';
 
@@ -43,10 +46,19 @@ function lineOf({ name, ms, passed, failed, skipped }) {
 	return `  ${name.padEnd(14)}${seconds(ms).padStart(8)}   ${counts.filter(Boolean).join(', ')}`;
 }
 
+/** Enough to see what went wrong; the whole of it is kept in a file. */
+const SHOWN_LINES = 200;
+
 /** @param {Result} result */
 function print(result) {
 	console.log(lineOf(result));
-	if (result.failed > 0) console.log(`\n${result.output.trim()}\n`);
+	if (result.failed === 0) return;
+	const lines = result.output.trim().split('\n');
+	const file = join(LOCAL, 'reports', `${result.name}.log`);
+	mkdirSync(dirname(file), { recursive: true });
+	writeFileSync(file, result.output);
+	if (lines.length > SHOWN_LINES) console.log(`\nThe last lines of ${relative(ROOT, file)}:`);
+	console.log(`\n${lines.slice(-SHOWN_LINES).join('\n')}\n`);
 }
 
 /**
