@@ -139,8 +139,8 @@ export function planLabels(all: readonly StampPlace[], year: number | null): Pla
 			leader: `M${textX + 6.5} ${from}V${turn}L${x} ${spotY}`,
 			textX,
 			textY: below ? bottom : carTop - 36 - (lines.length - 1) * LINE,
-			numberX: textX + 1,
-			numberY: below ? bottom + 4 : carTop - 36
+			numberX: textX,
+			numberY: below ? bottom + 8 : carTop - 36
 		};
 	};
 	return {
