@@ -1,4 +1,5 @@
 declare module '*.md' {
-	const page: import('./pages').HelpPage;
+	import type { HelpPage } from '$lib/help/pages';
+	const page: HelpPage;
 	export default page;
 }

@@ -39,7 +39,7 @@ export const coverageText = {
 	gapList: [
 		{
 			title: 'General Motors of 1964 and before',
-			text: 'Each division had a form of its own until 1965, so that there is no one layout to read by. The 12-character Chevrolet of 1964 is told apart from later numbers, not read.'
+			text: 'Each division had a form of its own until 1965, so that there is no one layout to read by. The 12 characters of a Chevrolet of 1964 are refused as one too few for the later form: do not add one to make them fit.'
 		},
 		{
 			title: 'Cadillac, 1965 to 1970',
@@ -51,7 +51,7 @@ export const coverageText = {
 		},
 		{
 			title: 'Ford Motor Company of 1955 to 1959',
-			text: 'Ten characters in another order than from 1960 on. The later layout refuses them.'
+			text: 'Ten characters in another order than from 1960 on, and not read.'
 		},
 		{
 			title: 'American Motors',

@@ -18,8 +18,8 @@ export const tablesText = {
 	json: 'The same as JSON',
 
 	find: {
-		heading: 'Find a code or a word',
-		query: 'Code or word',
+		heading: 'Search the tables',
+		query: 'Find a code or a word',
 		queryHint: 'One or two characters are taken as a code.',
 		table: 'Table',
 		allTables: 'all tables',
