@@ -26,7 +26,11 @@ export default defineConfig(
 				'error',
 				{ argsIgnorePattern: '^_', varsIgnorePattern: '^_' }
 			],
-			'@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
+			'@typescript-eslint/consistent-type-imports': [
+				'error',
+				// An ambient declaration names a type by import(), there is no other way.
+				{ fixStyle: 'inline-type-imports', disallowTypeAnnotations: false }
+			],
 			eqeqeq: 'error'
 		}
 	},

@@ -91,6 +91,8 @@ export async function serve({ build }) {
 			/** @type {NodeJS.ErrnoException} */ (error).code
 		);
 	}
+	// One request's forgotten promise is no reason to leave all others without an answer.
+	process.on('unhandledRejection', (error) => log.error({ err: error }, 'unhandled rejection'));
 	log.info({ origin: config.origin, port: config.port }, 'listening');
 
 	/** @param {string} reason */
