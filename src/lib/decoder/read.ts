@@ -57,7 +57,8 @@ export function candidatesOf(
 		if (!fits(own, cells)) continue;
 		const missing = own.layout.length - cells.length;
 		const whole = missing > 0 ? [...cells, ...Array<Cell>(missing).fill('?')] : cells;
-		const years = own.layout.yearsOf(whole);
+		const open = missing > 0 && own.layout.beginsWithoutYear === true;
+		const years = open ? [null] : own.layout.yearsOf(whole);
 		if (years.length > 0) found.push({ prepared: own, years });
 	}
 	return found;

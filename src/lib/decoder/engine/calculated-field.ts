@@ -36,11 +36,11 @@ export function yearField(head: FieldHead, layout: Layout, reader: Reader): Fiel
 		table: 'model_year'
 	});
 	if (!cells.every(isRead)) {
-		const detail = head.from > reader.typed ? text.fields.notTyped : text.year.unread;
+		if (head.from > reader.typed)
+			return done(fieldOf(head, { code, outcome: 'illegible', detail: text.fields.notTyped }));
 		const candidates = layout.yearsOf(reader.cells).filter((other) => other !== null);
-		return done(
-			fieldOf(head, { code, outcome: 'illegible', detail, possible: yearPossible(candidates) })
-		);
+		const possible = yearPossible(candidates);
+		return done(fieldOf(head, { code, outcome: 'illegible', detail: text.year.unread, possible }));
 	}
 	const table = reader.tables.tables.get(reader.prepared.ids.year);
 	if (year === null) {

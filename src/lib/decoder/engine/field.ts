@@ -31,6 +31,8 @@ export interface FieldResult {
 	readonly rows: readonly CompiledRow[];
 	/** Whether the field counts as standing in the tables. */
 	readonly counts: boolean;
+	/** What the field could mean, listed only for readings that are told: with many marks there are many more. */
+	readonly possible?: () => Pick<ReadingField, 'detail' | 'possible'>;
 	/** Whether a running number stands outside the run on record. */
 	readonly outOfRun?: boolean;
 	/** The table that was asked; null when none was. */

@@ -77,6 +77,8 @@ export interface Layout {
 	 * division named brings in the divisions whose run holds it.
 	 */
 	readonly divisionInferred?: boolean;
+	/** Whether a beginning without its year is read once, with the year open: nothing in it turns on the year. */
+	readonly beginsWithoutYear?: boolean;
 	/** A gap of the tables that a line without a row may fall into, in words. */
 	readonly gap?: string;
 	/** Why the year is what it is, where the layout has more to say than "by the layout". */

@@ -70,7 +70,7 @@ const compareKeys = (a: Key, b: Key): number =>
 	b.found - a.found ||
 	a.thin - b.thin;
 
-function whyOf(key: Key, first: Key, alone: boolean): string {
+function whyOf(key: Key, first: Key, equalFirst: boolean): string {
 	const words = text.why;
 	let why = words.first(key.told, key.fields);
 	const add = (n: number, words: (n: number) => string): void => {
@@ -80,7 +80,7 @@ function whyOf(key: Key, first: Key, alone: boolean): string {
 	add(key.notListed, words.notListed);
 	add(key.illegible, words.illegible);
 	add(key.notUsed, words.notUsed);
-	if (alone) return why;
+	if (key === first) return equalFirst ? `${why} ${words.equalFirst}` : why;
 	if (compareKeys(key, first) === 0) return `${why} ${words.equal}`;
 	if (key.hintsMissed > first.hintsMissed) return `${why} ${words.fewerHints}`;
 	if (key.outOfRun > first.outOfRun) return `${why} ${words.outOfRun}`;
@@ -116,7 +116,7 @@ export function ranked(
 			model_year: draft.year,
 			state: draft.complete ? 'complete' : 'partial',
 			rank,
-			why: whyOf(key, first as Key, index === 0 && !equalFirst),
+			why: whyOf(key, first as Key, equalFirst),
 			fields: fieldsOf(draft, lookups)
 		});
 	}

@@ -321,6 +321,16 @@ describe('a division given beside a text', () => {
 });
 
 describe('many characters that could be either', () => {
+	it('count what is possible where a list would be too long', () => {
+		const rows = Array.from({ length: 50 }, (_, n) =>
+			buildRow('gm', 'body_style', String(n + 10), `Body ${n}`, { n: 50 + n })
+		);
+		const own = read(withRows({ rows }), { text: '2H??T7P600', layouts: INVENTED_LAYOUTS });
+		const body = field(own.readings[0] as Reading, 'body_style');
+		expect(body.possible).toEqual([]);
+		expect(body.detail).toMatch(/^Two of two unread. 5\d meanings are possible/);
+	});
+
 	it('spell no list that nobody would read', () => {
 		const own = field(first('2H[0123456789][0123456789]T7P600'), 'body_style');
 		expect(own.possible.map((one) => one.code)).toEqual(['37', '45', '67', '69']);

@@ -187,6 +187,8 @@ export function strayNumber(draft: Draft): number | undefined {
 
 /** The fields of a draft, with the questions they put to the tables when asked for. */
 export const fieldsOf = (draft: Draft, lookups: boolean): readonly ReadingField[] =>
-	draft.results.map((result) =>
-		lookups ? { ...result.field, lookups: lookupsOf(result) } : result.field
-	);
+	draft.results.map((result) => {
+		const field =
+			result.possible === undefined ? result.field : { ...result.field, ...result.possible() };
+		return lookups ? { ...field, lookups: lookupsOf(result) } : field;
+	});

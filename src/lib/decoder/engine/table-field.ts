@@ -142,9 +142,17 @@ function unread(
 	cells: readonly Cell[],
 	reader: Reader
 ): FieldResult {
-	const compiled = reader.tables.tables.get(id);
+	const code = textOf(cells);
+	// What is not typed yet could be anything: listing all of it would tell nobody anything.
+	if (head.from > reader.typed)
+		return {
+			field: fieldOf(head, { code, outcome: 'illegible', detail: text.fields.notTyped }),
+			rows: NONE,
+			counts: false,
+			table
+		};
 	const rows: CompiledRow[] = [];
-	for (const entry of entriesMatching(compiled, cells)) {
+	for (const entry of entriesMatching(reader.tables.tables.get(id), cells)) {
 		const answer = choose(rowsInYear(entry, reader.scope.year), reader.scope);
 		const own =
 			answer.kind === 'contested'
@@ -154,23 +162,28 @@ function unread(
 					: answer.rows;
 		rows.push(...own);
 	}
-	const code = textOf(cells);
+	return {
+		field: fieldOf(head, { code, outcome: 'illegible', detail: text.fields.unread(cells) }),
+		rows,
+		possible: () => couldBe(cells, rows),
+		counts: false,
+		table
+	};
+}
+
+/** A longer list would be read by nobody: its length is told in its place. */
+const MOST_POSSIBLE = 40;
+
+function couldBe(cells: readonly Cell[], rows: readonly CompiledRow[]) {
 	const possible = possibleOf(rows);
 	const named = new Set(rows.map((row) => row.code));
 	for (const candidate of spelled(cells))
 		if (!named.has(candidate))
 			possible.push({ code: candidate, meaning: text.fields.noRowFor, values: {} });
-	return {
-		field: fieldOf(head, {
-			code,
-			outcome: 'illegible',
-			detail: head.from > reader.typed ? text.fields.notTyped : text.fields.unread(cells),
-			possible
-		}),
-		rows,
-		counts: false,
-		table
-	};
+	const detail = text.fields.unread(cells);
+	return possible.length > MOST_POSSIBLE
+		? { detail: `${detail} ${text.fields.manyPossible(possible.length)}`, possible: [] }
+		: { detail, possible };
 }
 
 /** The few codes that "could be either" places spell; nothing when a place is unread altogether. */

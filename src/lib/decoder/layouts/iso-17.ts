@@ -143,7 +143,8 @@ const common = {
 		}
 	],
 	yearsOf,
-	yearDetail
+	yearDetail,
+	beginsWithoutYear: true
 } as const satisfies Partial<Layout>;
 
 /** Makers of 1,000 and more vehicles of a type a year. */

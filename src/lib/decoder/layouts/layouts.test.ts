@@ -149,6 +149,11 @@ describe('seventeen characters', () => {
 		expect(field('1G4AH', 'check_digit').detail).toBe('Not typed yet.');
 	});
 
+	it('is read once while its year is not typed', () => {
+		expect(readings('1G4').filter((own) => own.layout === 'iso-17')).toHaveLength(1);
+		expect(field('1G4', 'model_year')).toMatchObject({ outcome: 'illegible', possible: [] });
+	});
+
 	it('takes the check digit’s standing from the layout’s row, where there is one', () => {
 		expect(field('1J9RP1A36A1644345', 'check_digit').strength).toBe('not_rated');
 	});

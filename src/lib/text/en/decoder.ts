@@ -125,6 +125,7 @@ export const decoderText = {
 				parts.push(`Could be ${listed([...cell]).replace(' and ', ' or ')}.`);
 			return parts.join(' ');
 		},
+		manyPossible: (n: number) => `${n} meanings are possible: too many to list.`,
 		notTyped: 'Not typed yet.',
 		noRowFor: 'Not in the tables'
 	},
@@ -184,6 +185,7 @@ export const decoderText = {
 		outOfRun: 'Its running number stands outside the run that we have on record for the division.',
 		fewerFound: 'Fewer of its fields are in the tables than in the first.',
 		thinner: 'More of it rests on thin rows than in the first.',
+		equalFirst: 'Nothing on the plate settles it: another reading is as likely.',
 		equal: 'Nothing on the plate settles it: this reading is as likely as the first.',
 		table: (label: string) => `Stands in ${lower(label)}.`
 	},
