@@ -11,7 +11,7 @@ const ENVIRONMENT =
 	'lib/server/config.ts is the only reader of the environment: it checks each variable and says what is wrong. Take what you need from config().';
 
 export default defineConfig(
-	globalIgnores(['**/.svelte-kit/', '.local/', 'build/', 'coverage/']),
+	globalIgnores(['.svelte-kit/', '.local/', 'build/', 'coverage/']),
 	js.configs.recommended,
 	...ts.configs.recommended,
 	...svelte.configs.recommended,

@@ -24,9 +24,7 @@ export default {
 		typescript: {
 			config: (config) => ({
 				...config,
-				include: [...config.include, '../scripts/**/*.ts', '../scripts/**/*.mjs'],
-				// An application of its own, with its own configuration.
-				exclude: [...config.exclude, '../tests/bench/bare/**']
+				include: [...config.include, '../scripts/**/*.ts', '../scripts/**/*.mjs']
 			})
 		},
 		// Hashes, not nonces: a page can then be kept in a cache without carrying a stale nonce.

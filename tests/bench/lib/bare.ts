@@ -1,6 +1,6 @@
 import { execFile, spawn } from 'node:child_process';
 import { once } from 'node:events';
-import { mkdirSync, writeFileSync } from 'node:fs';
+import { cpSync, mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { createInterface } from 'node:readline';
 import { promisify } from 'node:util';
@@ -15,12 +15,32 @@ export interface BareServer {
 	readonly end: () => Promise<void>;
 }
 
-/** Builds the bare application. SvelteKit looks for it in the working directory. */
+/** What makes a folder a SvelteKit application, beside its sources. */
+const FRAME = {
+	'package.json': '{ "name": "bare", "private": true, "type": "module" }',
+	'svelte.config.js': `import adapter from '@sveltejs/adapter-node';
+export default { kit: { adapter: adapter({ out: ${JSON.stringify(BUILD)} }) } };`,
+	'vite.config.js': `import { sveltekit } from '@sveltejs/kit/vite';
+export default { plugins: [sveltekit()] };`
+};
+
+/**
+ * Builds the bare application: what SvelteKit costs by itself. SvelteKit looks for it in the working directory;
+ * a second configuration that stayed in the project would confuse every tool that looks for one.
+ */
 export async function buildBare(): Promise<void> {
-	await execute(process.execPath, [inProject('node_modules/vite/bin/vite.js'), 'build'], {
-		cwd: inProject('tests/bench/bare'),
-		env: { ...process.env, NODE_ENV: 'production' }
-	});
+	mkdirSync(LOCAL, { recursive: true });
+	const folder = mkdtempSync(join(LOCAL, 'bare-'));
+	try {
+		cpSync(inProject('tests/bench/bare'), join(folder, 'src'), { recursive: true });
+		for (const [name, content] of Object.entries(FRAME)) writeFileSync(join(folder, name), content);
+		await execute(process.execPath, [inProject('node_modules/vite/bin/vite.js'), 'build'], {
+			cwd: folder,
+			env: { ...process.env, NODE_ENV: 'production' }
+		});
+	} finally {
+		rmSync(folder, { recursive: true });
+	}
 }
 
 /**

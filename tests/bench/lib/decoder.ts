@@ -2,9 +2,10 @@ import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { build, type Rolldown } from 'vite';
+import type * as decoder from '../../../src/lib/decoder';
 import { inProject, LOCAL } from '../../../scripts/lib/project.mjs';
 
-type Decoder = typeof import('../../../src/lib/decoder');
+type Decoder = typeof decoder;
 
 /** The decoder as a build bundles it: what is measured is what runs. */
 export async function bundledDecoder(): Promise<Decoder> {
