@@ -136,6 +136,14 @@ describe('headers', () => {
 		expect(headers['content-security-policy']).toBe("default-src 'self'");
 	});
 
+	it('leave the policy of a page that has not changed as the browser keeps it', async () => {
+		const { port } = await start((_request, response) => response.writeHead(304).end());
+		const { status, headers } = await ask(port, '/tables');
+		expect(status).toBe(304);
+		expect(headers).not.toHaveProperty('content-security-policy');
+		expect(headers).toMatchObject({ 'x-content-type-options': 'nosniff' });
+	});
+
 	it('give a page without a policy one that lets it load its own files only', async () => {
 		const { port } = await start(json({}, { 'content-type': 'text/html' }));
 		const { headers } = await ask(port, '/');

@@ -108,7 +108,11 @@ export class GuardedResponse extends ServerResponse {
 			type: String(this.getHeader('content-type') ?? ''),
 			pagePolicy: pagePolicy(path)
 		});
-		for (const [name, value] of headers) if (!this.hasHeader(name)) this.setHeader(name, value);
+		for (const [name, value] of headers) {
+			// A browser puts the headers of a 304 over those that it kept: the page would lose its own policy.
+			if (this.statusCode === 304 && name === 'content-security-policy') continue;
+			if (!this.hasHeader(name)) this.setHeader(name, value);
+		}
 		if (this.requestId) this.setHeader('x-request-id', this.requestId);
 		if (isDraining()) this.setHeader('connection', 'close');
 	}
