@@ -5,7 +5,6 @@ import { defineConfig, globalIgnores } from 'eslint/config';
 import globals from 'globals';
 import ts from 'typescript-eslint';
 import { importBorders } from './scripts/lib/lint/import-borders.mjs';
-import svelteConfig from './svelte.config.js';
 
 const ENVIRONMENT =
 	'lib/server/config.ts is the only reader of the environment: it checks each variable and says what is wrong. Take what you need from config().';
@@ -36,7 +35,7 @@ export default defineConfig(
 	},
 	{
 		files: ['**/*.svelte', '**/*.svelte.ts'],
-		languageOptions: { parserOptions: { parser: ts.parser, svelteConfig } },
+		languageOptions: { parserOptions: { parser: ts.parser } },
 		rules: {
 			// The product stands at the root of its host, and its addresses are plain strings that the
 			// interface, reports and mails name too; resolve() would only repeat them.

@@ -16,7 +16,9 @@ export default defineConfig({
 				extends: true,
 				test: {
 					name: 'unit',
-					include: ['src/**/*.test.ts', 'scripts/**/*.test.ts', 'tests/published/**/*.test.ts']
+					include: ['src/**/*.test.ts', 'scripts/**/*.test.ts', 'tests/published/**/*.test.ts'],
+					// Another lane may have the processors at the same time.
+					testTimeout: 30_000
 				}
 			},
 			{
