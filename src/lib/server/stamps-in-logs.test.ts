@@ -24,6 +24,7 @@ describe('maskStamps', () => {
 		'Field year expects a number from 1955 to 2039',
 		'connect ECONNREFUSED 127.0.0.1:33071',
 		'ER_LOCK_DEADLOCK: try restarting transaction',
+		'(conn:5, no: 45009, SQLState: 08S01) socket has unexpectedly been closed',
 		'at read (src/lib/decoder/index.ts:12:5)',
 		'listening on port 3000 after 812 ms'
 	])('leaves prose alone: %s', (text) => {

@@ -12,7 +12,7 @@ const PIECE = /(?:\[[^[\]\s]*\]|[\p{L}\p{N}?_*])+/gu;
 /** What may stand between two pieces of one stamp: the plate's dividers, and a tag's line breaks. */
 const DIVIDER = /^(?:[\s.\-‐-―·,+]{1,3}|\s+\/\s+|\s*[\r\n]\s*)$/u;
 /** Prose, and not a piece of a stamp. A run of x stands for what cannot be read. */
-const WORD = /^(?!x+$)(?:[A-Z]?[a-z]{2,}|[A-Z]{6,})$/;
+const WORD = /^(?!x+$)(?:[A-Za-z]*[a-z]{2,}|[A-Z]{6,})$/;
 
 interface Run {
 	readonly from: number;
