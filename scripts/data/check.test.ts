@@ -44,10 +44,11 @@ describe('the checks', () => {
 	);
 
 	it('take less than five seconds for ten thousand rows', () => {
-		const started = performance.now();
+		// Of the processor: other tests run at the same time.
+		const before = process.cpuUsage();
 		const data = largeFolder(10_000);
 		const findings = CHECKS.flatMap(({ check }) => check(data));
 		expect(findings).toEqual([]);
-		expect(performance.now() - started).toBeLessThan(5_000);
+		expect(process.cpuUsage(before).user / 1000).toBeLessThan(5_000);
 	});
 });
