@@ -1,10 +1,11 @@
 /** What stands in the way of a reading, and what could be tried instead. Offers are never applied in silence. */
 import type { Offer, Problem, Reading } from '../../types';
 import { decoderText } from '../../text/en/decoder';
-import { isRead, textOf, UNREAD, type Cell, type Characters } from './characters';
+import { ANY, isRead, textOf, UNREAD, type Cell, type Characters } from './characters';
 import { checkDigitOf, isNorthAmerican } from './check-digit';
 import { expectedOf, fits, missOf, nearest, type Break } from './fit';
 import { alike, exchanged } from './look-alikes';
+import type { Layout, PrimaryField } from './layout';
 import type { PreparedLayout } from './plan';
 
 const text = decoderText.problems;
@@ -27,6 +28,15 @@ function mended(breaks: readonly Break[], cells: readonly Cell[]): Cell[] | null
 	return next;
 }
 
+/** Every place allows its character, and yet no model year comes of it: the year's own place is the break. */
+function yearBreak(layout: Layout, cells: readonly Cell[]): Break {
+	const { from } = layout.fields.find(({ reads }) => reads.by === 'year') as PrimaryField;
+	const found = cells[from - 1] as Cell;
+	const standsForYear = (character: string): boolean =>
+		layout.yearsOf(cells.map((cell, index) => (index === from - 1 ? character : cell))).length > 0;
+	return { position: from, found, allowed: [...ANY].filter(standsForYear).join('') };
+}
+
 /** Why nothing fits: the nearest layout, the character that broke it, and an offer where there is one. */
 export function misfit(prepared: readonly PreparedLayout[], cells: readonly Cell[]): Problem {
 	const miss = nearest(prepared.map((own) => missOf(own, cells)));
@@ -44,8 +54,8 @@ export function misfit(prepared: readonly PreparedLayout[], cells: readonly Cell
 			offers
 		};
 	}
-	const broken = first as Break;
-	const fixed = mended(miss.breaks, cells);
+	const broken = first ?? yearBreak(layout, cells);
+	const fixed = mended(first === undefined ? [broken] : miss.breaks, cells);
 	const found = /[0-9]/.test(broken.found)
 		? text.figureFound(broken.found)
 		: text.letterFound(broken.found);
@@ -53,7 +63,12 @@ export function misfit(prepared: readonly PreparedLayout[], cells: readonly Cell
 		layout: layout.id,
 		position: broken.position,
 		code: 'character',
-		message: text.character(layout.title, broken.position, found, expectation(broken)),
+		message: text.character(
+			layout.title,
+			broken.position,
+			found,
+			first === undefined ? text.yearCode : expectation(broken)
+		),
 		offers:
 			fixed === null
 				? []

@@ -100,6 +100,24 @@ describe('seventeen characters', () => {
 		expect(readings('?P0ZZZ91ZKS100001').map((own) => own.model_year)).toEqual([null, 1989]);
 	});
 
+	it('refuses a character that stands for no model year, and offers a look-alike that does', () => {
+		const { readings: none, problems } = read(tables, {
+			text: '1G4AH59H40G118341',
+			kind: 'serial'
+		});
+		expect(none).toEqual([]);
+		expect(problems).toEqual([
+			{
+				layout: 'iso-17',
+				position: 10,
+				code: 'character',
+				message:
+					'Nearest is 17 characters, ISO 3779 and 49 CFR 565. It breaks at character 10, where the figure 0 stands and a code of a model year is expected.',
+				offers: [{ text: '1G4AH59H4DG118341', why: 'D as character 10' }]
+			}
+		]);
+	});
+
 	it('says what a failed check does and does not mean, by region', () => {
 		const home = field('1G4AH59H55G118341', 'check_digit');
 		expect(home.meaning).toBe('5: does not fit, 4 is called for');

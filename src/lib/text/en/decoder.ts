@@ -198,6 +198,7 @@ export const decoderText = {
 				: `${count(typed - needed)} too many.`),
 		character: (title: string, position: number, found: string, expected: string) =>
 			`Nearest is ${title}. It breaks at character ${position}, where ${found} stands and ${expected} is expected.`,
+		yearCode: 'a code of a model year',
 		figure: 'a figure',
 		letter: 'a letter',
 		oneOf: (set: string) => `one of ${[...set].join(' ')}`,
