@@ -1,5 +1,6 @@
 import { coverageText as text } from '../text/en/coverage';
-import { MAKER_NAMES, type Maker } from '../types';
+// By the file, not by the index: the index brings zod to the browser.
+import { MAKER_NAMES, type Maker } from '../types/makers';
 
 /** What the tables have for one make and year; see `reference.coverage`. */
 interface CountedYear {
