@@ -212,6 +212,7 @@ export const tablesText = {
 		year: 'Year',
 		cited: 'Rows that rest on it',
 		citedBy: (n: number) => counted(n, 'row', 'rows'),
+		citedWord: (n: number) => (n === 1 ? 'row' : 'rows'),
 		notCited: 'No row rests on it now.',
 		memory:
 			'No source: what somebody who knows these cars remembers, marked so on every row. Such rows are thin at most and never make a “does not tally”.',
