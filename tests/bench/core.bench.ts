@@ -6,10 +6,10 @@ import { inventedEdition, inventedSerials } from './invented-edition';
 import { bundledDecoder } from './lib/decoder';
 import { median, rateOf, ratioOf } from './lib/rounds';
 
-const { compile, read } = await bundledDecoder();
+const { checkDigitOf, compile, read } = await bundledDecoder();
 const released = compile(readContent(inProject('data')));
 
-/** Serials as published, their masks filled with figures: mixed layouts, each sequence number another. */
+/** Serials as published, of which only the running number may be masked. */
 const published: string[] = ['gm', 'chrysler', 'ford']
 	.flatMap((maker) =>
 		(
@@ -19,13 +19,18 @@ const published: string[] = ['gm', 'chrysler', 'ford']
 		).filter((sample) => sample.known_miss === '')
 	)
 	.map(({ text }) => text.replaceAll('-', ''))
-	.filter((text) => text.length === 11 || text.length === 13);
+	.filter((text) => /^[0-9A-Z]{5}(?:[0-9A-Z]{2})?[0-9A-Zx]{6}$/.test(text));
+/** The federal sample with other years and running numbers. */
+const withCheckDigit = (text: string): string => text.replace('?', checkDigitOf([...text]) ?? '?');
+/** Mixed layouts, each with another running number. */
 const serials = [
 	...Array.from({ length: 20_000 }, (_, n) => {
 		const text = published[n % published.length] as string;
-		return text.slice(0, -6) + String(100_001 + ((n * 37) % 890_000));
+		return text.slice(0, -6) + String(500_001 + ((n * 37) % 390_000));
 	}),
-	...Array.from({ length: 4000 }, (_, n) => `1G4AH59H4${'5678'.charAt(n % 4)}G${118_341 + n}`)
+	...Array.from({ length: 4000 }, (_, n) =>
+		withCheckDigit(`1G4AH59H?${'5678'.charAt(n % 4)}G${118_341 + n}`)
+	)
 ];
 
 const reading = (tables: typeof released, texts: readonly string[]) => (times: number) => {

@@ -2,6 +2,7 @@
 import type { Problem, ReadContext, Reading, ReadResult, StampKind } from '../types';
 import { normalise, type Cell, type Characters } from './engine/characters';
 import { fits } from './engine/fit';
+import type { PrimaryField } from './engine/layout';
 import type { PreparedLayout } from './engine/plan';
 import {
 	bareSequence,
@@ -11,7 +12,7 @@ import {
 	misfit
 } from './engine/problems';
 import { ranked } from './engine/ranking';
-import { draftsOf, type Draft } from './engine/reading';
+import { draftsOf, hasRow, type Draft } from './engine/reading';
 import type { TableSet } from './engine/table-set';
 import { readCode } from './code-reading';
 import { PREPARED } from './layouts';
@@ -79,17 +80,23 @@ function firstProblems(
 ): Problem[] {
 	const { prepared } = candidate;
 	if (cells.length !== prepared.layout.length) return [];
-	const reread = (other: readonly Cell[], name: string): string | null => {
+	const meaning = (index: number, other: readonly Cell[]): string | null => {
+		const { from } = prepared.layout.fields[index] as PrimaryField;
 		for (const year of prepared.layout.yearsOf(other))
 			if (year === reading.model_year)
 				for (const draft of draftsOf(prepared, other, year, tables, context)) {
-					const own = draft.results.find(({ field, counts }) => field.name === name && counts);
+					const own = draft.results.find(({ field, counts }) => field.from === from && counts);
 					if (own !== undefined) return own.field.meaning;
 				}
 		return null;
 	};
+	const has = (index: number, other: readonly Cell[]): boolean =>
+		hasRow(prepared, index, other, tables);
 	const check = prepared.layout.length === 17 ? checkDigitOffers(prepared, cells) : null;
-	return [...lookAlikes(reading, prepared, cells, reread), ...(check === null ? [] : [check])];
+	return [
+		...lookAlikes(reading, prepared, cells, { hasRow: has, meaning }),
+		...(check === null ? [] : [check])
+	];
 }
 
 function readSerial(

@@ -3,6 +3,7 @@
  * Source: 49 CFR 565.15(c), tables III to VI.
  */
 import { ANY, isRead, UNREAD, type Cell } from './characters';
+import { alike } from './look-alikes';
 
 /** What each character counts. */
 export const VALUES: ReadonlyMap<string, number> = new Map([
@@ -94,4 +95,28 @@ export function narrowByCheckDigit(cells: readonly Cell[]): ReadonlyMap<number, 
 		if (fitting.length < set.length) narrowed.set(index + 1, fitting.join(''));
 	});
 	return narrowed;
+}
+
+/**
+ * Single look-alikes that would make a check digit fit that does not; empty when it fits, or when a character is unread.
+ * Each is tried by what it would add to the sum, without working the sum out again.
+ */
+export function mendingCheckDigit(
+	cells: readonly Cell[]
+): { readonly place: number; readonly character: string }[] {
+	const digit = cells[CHECK] as Cell;
+	const expected = checkDigitOf(cells);
+	if (expected === null || expected === digit || !/^[0-9X]$/.test(digit)) return [];
+	const residue = expected === 'X' ? 10 : Number(expected);
+	return cells.flatMap((cell, index) =>
+		[...alike(cell)]
+			.filter((character) => {
+				if (index === CHECK) return character === expected;
+				const value = VALUES.get(character);
+				if (value === undefined) return false;
+				const added = (value - (VALUES.get(cell) as number)) * (WEIGHTS[index] as number);
+				return written((((residue + added) % 11) + 11) % 11) === digit;
+			})
+			.map((character) => ({ place: index + 1, character }))
+	);
 }

@@ -11,7 +11,7 @@ import { INVENTED } from '../../../../tests/fixtures/invented';
 import type { SourceKind } from '../../types';
 import { canonicalJson, compareRows, overlaps, sameContent, saysTheSame } from './compare';
 import { compile, compileInSteps } from './compile';
-import { claimFor, lookUp, lookUpByScope, lookUpRange } from './look-up';
+import { claimFor, lookUp, lookUpByScope } from './look-up';
 import { rowsInYear, tableId, type CompiledTable } from './table-set';
 
 const tables = compile(INVENTED);
@@ -160,7 +160,6 @@ describe('looking up', () => {
 		expect(lookUp(table('engine'), '9', { year: 1966 }).kind).toBe('missing');
 		expect(lookUp(table('assembly_plant'), 'B', { year: 1980 }).kind).toBe('missing');
 		expect(lookUpByScope(undefined, { year: 1966, plant: 'P' }).kind).toBe('missing');
-		expect(lookUpRange(undefined, 'AA', { year: 1990 }).kind).toBe('missing');
 	});
 
 	it('asks all years when the year is open', () => {
@@ -211,23 +210,27 @@ describe('looking up', () => {
 		});
 	});
 
-	it('holds a range against the order of ISO 3780', () => {
+	it('spells out a range in the order of ISO 3780', () => {
 		const ranges = only(
 			buildRow('gm', 'country', 'AA-AH', 'South Africa'),
 			buildRow('gm', 'country', 'SN-ST', 'Germany', { n: 2 }),
-			buildRow('gm', 'country', 'VA', 'One pair', { n: 3 })
+			buildRow('gm', 'country', 'VX-V2', 'Over the letters', { n: 3 }),
+			buildRow('gm', 'country', 'VA', 'One pair', { n: 4 })
 		);
 		const ask = (code: string) => {
-			const answer = lookUpRange(ranges, code, { year: null });
+			const answer = lookUp(ranges, code, { year: null });
 			return answer.kind === 'found' ? answer.rows[0]?.meaning : answer.kind;
 		};
-		expect(['AA', 'AH', 'AJ', 'SP', 'S1', 'VA', 'VB'].map(ask)).toEqual([
+		expect(['AA', 'AH', 'AJ', 'SP', 'S1', 'VA', 'VB', 'VZ', 'V1', 'V3'].map(ask)).toEqual([
 			'South Africa',
 			'South Africa',
 			'missing',
 			'Germany',
 			'missing',
 			'One pair',
+			'missing',
+			'Over the letters',
+			'Over the letters',
 			'missing'
 		]);
 	});

@@ -10,6 +10,7 @@ import {
 	type Source
 } from '../../types';
 import { compareRows, overlaps, sameContent, saysTheSame } from './compare';
+import { codesOf } from './ranges';
 import { strengthOf } from './strength';
 import {
 	tableId,
@@ -183,8 +184,18 @@ export function* compileInSteps(
 		}
 		const { maker, table } = compiled[0] as CompiledRow;
 		const byCode = new Map<string, CodeEntry>();
-		for (const [code, own] of group(compiled, (row) => row.code))
-			byCode.set(code, entryOf(code, own));
+		const ranges = tableDefinition(table).match === 'range';
+		const spelled = compiled.flatMap((row) =>
+			(ranges ? codesOf(row.code) : [row.code]).map((code) => ({ code, row }))
+		);
+		for (const [code, own] of group(spelled, (one) => one.code))
+			byCode.set(
+				code,
+				entryOf(
+					code,
+					own.map(({ row }) => row)
+				)
+			);
 		tables.set(id, {
 			maker,
 			table,

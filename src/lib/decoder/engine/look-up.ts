@@ -94,26 +94,10 @@ export function choose(candidates: readonly CompiledRow[], scope: Scope): Answer
 	return { kind: 'depends', on, rows: all };
 }
 
-/** ISO 3780: the order in which ranges of two characters run. */
-const RANGE_ORDER = 'ABCDEFGHJKLMNPRSTUVWXYZ1234567890';
-const place = (code: string): number =>
-	RANGE_ORDER.indexOf(code.charAt(0)) * RANGE_ORDER.length + RANGE_ORDER.indexOf(code.charAt(1));
-
-function inRange(range: string, code: string): boolean {
-	const [from = '', to = from] = range.split('-');
-	return place(from) <= place(code) && place(code) <= place(to);
-}
-
-/** Asks an `exact` table. */
+/** Asks a table what a code means. */
 export function lookUp(table: CompiledTable | undefined, code: string, scope: Scope): Answer {
 	const entry = table?.byCode.get(code);
 	return entry === undefined ? MISSING : choose(rowsInYear(entry, scope.year), scope);
-}
-
-/** Asks a `range` table, whose codes are `AA-AH`. */
-export function lookUpRange(table: CompiledTable | undefined, code: string, scope: Scope): Answer {
-	const rows = (table?.rows ?? []).filter((row) => inRange(row.code, code));
-	return choose(rows, scope);
 }
 
 /** Asks a table whose rows are found by scope; rows of the plant's own code come with those of none. */

@@ -1,8 +1,8 @@
 /** What stands in the way of a reading, and what could be tried instead. Offers are never applied in silence. */
 import type { Offer, Problem, Reading } from '../../types';
 import { decoderText } from '../../text/en/decoder';
-import { ANY, isRead, textOf, UNREAD, type Cell, type Characters } from './characters';
-import { checkDigitOf, isNorthAmerican } from './check-digit';
+import { ANY, textOf, UNREAD, type Cell, type Characters } from './characters';
+import { isNorthAmerican, mendingCheckDigit } from './check-digit';
 import { expectedOf, fits, missOf, nearest, type Break } from './fit';
 import { alike, exchanged } from './look-alikes';
 import type { Layout, PrimaryField } from './layout';
@@ -117,22 +117,29 @@ export function foreignLetters(typed: string, characters: Characters): Problem[]
 
 /**
  * Look-alikes for the fields of a reading that found no row.
- * `reread` reads the changed text under the same layout and says what the field would mean, or null.
+ * `ask` has the tables: whether a changed text has any row for a field, and what the field would then mean.
  */
 export function lookAlikes(
 	reading: Reading,
 	prepared: PreparedLayout,
 	cells: readonly Cell[],
-	reread: (cells: readonly Cell[], name: string) => string | null
+	ask: {
+		readonly hasRow: (field: number, cells: readonly Cell[]) => boolean;
+		readonly meaning: (field: number, cells: readonly Cell[]) => string | null;
+	}
 ): Problem[] {
 	const problems: Problem[] = [];
-	for (const field of reading.fields) {
-		const lost = field.outcome === 'not_listed' || field.outcome === 'not_used';
-		if (!lost || field.name === 'unknown' || field.derived_from !== undefined) continue;
+	const lost = reading.fields.filter(
+		({ outcome, derived_from }) =>
+			derived_from === undefined && (outcome === 'not_listed' || outcome === 'not_used')
+	);
+	for (const field of lost) {
+		const index = prepared.layout.fields.findIndex(({ from }) => from === field.from);
 		const offers: Offer[] = [];
 		for (const other of exchanged(cells, field.from, field.to)) {
-			if (!fits(prepared, other)) continue;
-			const meaning = reread(other, field.name);
+			// A look-up is cheap, a reading is not.
+			if (!ask.hasRow(index, other) || !fits(prepared, other)) continue;
+			const meaning = ask.meaning(index, other);
 			if (meaning !== null) offers.push({ text: textOf(other), why: text.wouldRead(meaning) });
 		}
 		if (offers.length > 0)
@@ -149,25 +156,29 @@ export function lookAlikes(
 
 /** Look-alikes that would make a failed check digit fit. */
 export function checkDigitOffers(prepared: PreparedLayout, cells: readonly Cell[]): Problem | null {
-	const expected = checkDigitOf(cells);
-	const digit = cells[8] as Cell;
 	// Elsewhere a check that does not fit means nothing, and there is nothing to mend.
 	if (!isNorthAmerican(cells[0] as Cell)) return null;
-	if (expected === null || expected === digit || !isRead(digit)) return null;
-	const offers: Offer[] = [];
-	for (let place = 1; place <= cells.length; place += 1)
-		for (const other of exchanged(cells, place, place))
-			if (fits(prepared, other) && checkDigitOf(other) === other[8])
-				offers.push({
-					text: textOf(other),
-					why: text.tryInPlace(other[place - 1] as string, place)
-				});
+	const offers: Offer[] = mendingCheckDigit(cells)
+		.map(({ place, character }) => ({
+			place,
+			character,
+			other: withCharacter(cells, place, character)
+		}))
+		.filter(({ other }) => fits(prepared, other))
+		.slice(0, MOST_OFFERS)
+		.map(({ place, character, other }) => ({
+			text: textOf(other),
+			why: text.tryInPlace(character, place)
+		}));
 	if (offers.length === 0) return null;
 	return {
 		layout: prepared.layout.id,
 		position: 9,
 		code: 'look_alike',
 		message: text.lookAlikeCheck,
-		offers: offers.slice(0, MOST_OFFERS)
+		offers
 	};
 }
+
+const withCharacter = (cells: readonly Cell[], place: number, character: string): Cell[] =>
+	cells.map((cell, index) => (index === place - 1 ? character : cell));

@@ -185,6 +185,19 @@ export function strayNumber(draft: Draft): number | undefined {
 	return stray === undefined ? undefined : Number(stray.field.code);
 }
 
+/** Whether any row stands under the code that a field has in these cells. */
+export function hasRow(
+	prepared: PreparedLayout,
+	index: number,
+	cells: readonly Cell[],
+	tables: TableSet
+): boolean {
+	const question = prepared.questions[index] ?? null;
+	if (question === null) return false;
+	const table = tables.tables.get(question.id);
+	return entriesMatching(table, cellsOf(cells, question.parts)).length > 0;
+}
+
 /** The fields of a draft, with the questions they put to the tables when asked for. */
 export const fieldsOf = (draft: Draft, lookups: boolean): readonly ReadingField[] =>
 	draft.results.map((result) => {

@@ -13,15 +13,7 @@ import {
 } from './field';
 import type { PrimaryField, Span } from './layout';
 import type { PreparedLayout, Question } from './plan';
-import {
-	choose,
-	claimFor,
-	entriesMatching,
-	lookUp,
-	lookUpRange,
-	type Answer,
-	type Scope
-} from './look-up';
+import { choose, claimFor, entriesMatching, lookUp, type Answer, type Scope } from './look-up';
 import { rowsInYear, type CompiledRow, type TableSet } from './table-set';
 
 /** What a field is read against. */
@@ -202,12 +194,10 @@ export function tableField(head: FieldHead, question: Question, reader: Reader):
 	const code = readCells(reader, question.parts);
 	if (code === null) return unread(head, question, cellsOf(reader.cells, question.parts), reader);
 	const compiled = reader.tables.tables.get(question.id);
-	if (question.range)
-		return answered(head, question, code, lookUpRange(compiled, code, reader.scope), reader);
 	const answer = lookUp(compiled, code, reader.scope);
 	if (answer.kind === 'found' && answer.rows.length === 1) {
 		const row = answer.rows[0] as CompiledRow;
-		const before = toldBefore(row, head);
+		const before = question.range ? undefined : toldBefore(row, head);
 		return before ?? keepTold(row, head, answered(head, question, code, answer, reader));
 	}
 	if (answer.kind === 'missing' && question.otherwise !== null) {

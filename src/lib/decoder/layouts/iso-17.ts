@@ -18,11 +18,14 @@ const byCode: Record<string, number[]> = Object.fromEntries(
 );
 const bothCycles = yearsByCharacter(10, byCode);
 
+const OPEN = [null] as const;
+
 /**
  * Position 7 tells the thirty-year cycle on cars and light trucks for the United States: a figure to 2009, a letter from 2010.
  * Where the first character is not North American, the standard leaves the year open.
  */
-function yearsOf(cells: readonly Cell[]): (number | null)[] {
+function yearsOf(cells: readonly Cell[]): readonly (number | null)[] {
+	if (!isNorthAmerican(cells[0] as Cell) && isRead(cells[0] as Cell)) return OPEN;
 	const first = cells[0] as Cell;
 	const may = (test: (character: string) => boolean): boolean =>
 		first === UNREAD || [...first].some(test);
