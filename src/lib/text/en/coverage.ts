@@ -39,7 +39,7 @@ export const coverageText = {
 	gapList: [
 		{
 			title: 'General Motors of 1964 and before',
-			text: 'Each division had a form of its own until 1965, so that there is no one layout to read by. The 12 characters of a Chevrolet of 1964 are refused as one too few for the later form: do not add one to make them fit.'
+			text: 'Each division had a form of its own until 1965, so that there is no one layout to read by. The 12 characters of a Chevrolet of 1960 to 1964 are refused as one too few for the later form: do not add one to make them fit.'
 		},
 		{
 			title: 'Cadillac, 1965 to 1970',

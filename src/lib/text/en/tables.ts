@@ -1,5 +1,5 @@
 /** Code tables, rows and sources. */
-import type { READ_EXTENTS, STANCES, ScopeColumn, Strength } from '../../types';
+import type { READ_EXTENTS, ScopeColumn, Strength } from '../../types';
 import { counted, grouped } from './counts';
 
 type Read = (typeof READ_EXTENTS)[number];
@@ -27,13 +27,11 @@ export const tablesText = {
 		allDivisions: 'all makes',
 		allOf: (maker: string) => `all of ${maker}`,
 		year: 'Model year',
-		allYears: 'all years',
 		strength: 'Strength',
 		allStrengths: 'all',
 		sort: 'Order',
 		submit: 'Find',
 		show: 'Show',
-		clear: 'Clear',
 		codeTables: 'Looked up by a stamp',
 		knowledgeTables: 'Read beside the codes'
 	},
@@ -42,8 +40,7 @@ export const tablesText = {
 		table: (value: string) => `There is no table “${value}”.`,
 		year: (from: number, to: number) => `A model year is a whole number from ${from} to ${to}.`,
 		strength: (value: string) => `“${value}” is no strength.`,
-		search: (most: number) => `A search has ${most} characters at most.`,
-		help: 'The others were heeded, this one was not.'
+		search: (most: number) => `A search has ${most} characters at most.`
 	},
 	results: {
 		quoted: (query: string) => `“${query}”`,
@@ -115,8 +112,7 @@ export const tablesText = {
 		label: 'Pages',
 		previous: 'Previous',
 		next: 'Next',
-		page: (n: number, of: number) => `Page ${n} of ${of}`,
-		goTo: (n: number) => `Page ${n}`
+		page: (n: number, of: number) => `Page ${n} of ${of}`
 	},
 
 	scope: {
@@ -128,26 +124,21 @@ export const tablesText = {
 			plant: 'Plant',
 			market: 'Market'
 		} satisfies Record<ScopeColumn, string>,
-		maker: 'Corporation',
 		years: 'Model years',
-		all: 'all',
 		allOf: (maker: string) => `All of ${maker}`,
 		everyMaker: 'Every maker',
 		body: (codes: string) => `body ${codes}`,
 		engine: (codes: string) => `engine ${codes}`,
-		plant: (codes: string) => `plant ${codes}`,
-		everything: 'everything'
+		plant: (codes: string) => `plant ${codes}`
 	},
 
 	row: {
 		heading: (label: string, code: string) => (code === '' ? label : `${label}, ${code}`),
-		cells: 'The code, character by character',
 		holds: 'Where it holds',
 		values: 'Values',
 		note: 'Note',
 		rests: 'What it rests on',
 		against: 'against',
-		for: 'for',
 		nothing: 'Nothing is cited yet.',
 		read: {
 			whole: 'The whole was read',
@@ -155,9 +146,8 @@ export const tablesText = {
 			excerpt: 'An excerpt was read',
 			title: 'Only the title is known: counts as nothing'
 		} satisfies Record<Read, string>,
-		stance: { for: 'For', against: 'Against' } satisfies Record<(typeof STANCES)[number], string>,
+		isAgainst: 'Against',
 		seenOn: (day: string) => `seen on ${day}`,
-		kind: 'Kind',
 		contested: 'Sources differ',
 		contestedNote:
 			'Every value stands until a source settles it. A contested row never makes a “does not tally”.',
@@ -168,7 +158,6 @@ export const tablesText = {
 		between: (from: number, to: number) =>
 			from === to - 1 ? `edition ${from} only` : `editions ${from} to ${to - 1}`,
 		first: 'The first version.',
-		changed: 'Changed',
 		retired: (n: number) => `Retired in edition ${n}`,
 		retiredBody:
 			'This row is no longer in the tables. It is shown as it last stood, with the strength that it had then.',
@@ -177,9 +166,7 @@ export const tablesText = {
 		present: 'Show the present row',
 		historyAway: 'The history is kept in the database, and the database does not answer now.',
 		readCode: 'Read this code',
-		readCodeMore: (code: string) => `: ${code}`,
-		address: 'Key',
-		tableLink: 'Its table'
+		address: 'Key'
 	},
 
 	sources: {

@@ -12,7 +12,7 @@ const text = tablesText.sources;
 /** A row as this source speaks of it: where in it, and whether against. */
 function citingLine({ row, citations }: CitingRow) {
 	const places = citations.map(({ stance, locator }) =>
-		[stance === 'against' ? tablesText.row.stance.against : '', locator].filter(Boolean).join(': ')
+		[stance === 'against' ? tablesText.row.isAgainst : '', locator].filter(Boolean).join(': ')
 	);
 	return { ...rowLine(row), restsOn: places.filter(Boolean), more: 0 };
 }
