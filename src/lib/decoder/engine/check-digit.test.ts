@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { checkDigitOf, narrowByCheckDigit, VIN_CHARACTERS } from './check-digit';
+import { checkDigitOf, mendingCheckDigit, narrowByCheckDigit, VIN_CHARACTERS } from './check-digit';
 
 const cells = (text: string): string[] => text.split('');
 const vin = fc.string({ unit: fc.constantFrom(...VIN_CHARACTERS), minLength: 17, maxLength: 17 });
@@ -66,5 +66,39 @@ describe('narrowing by the check digit', () => {
 		const either = cells(whole);
 		either[16] = '17';
 		expect(narrowByCheckDigit(either).get(17)).toBe('1');
+	});
+});
+
+describe('mending a check digit by one look-alike', () => {
+	it('finds just the exchanges after which it fits', () => {
+		fc.assert(
+			fc.property(vin, (text) => {
+				fc.pre(/[0-9X]/.test(text.charAt(8)));
+				const found = mendingCheckDigit(cells(text)).map(({ place, character }) =>
+					set(text, place - 1, character)
+				);
+				const fitting = found.filter((own) => checkDigitOf(cells(own)) === own.charAt(8));
+				expect(found).toEqual(fitting);
+			}),
+			{ numRuns: 500 }
+		);
+	});
+
+	it('knows ten as X', () => {
+		// The worked example of the encyclopaedia, 1M8GDM9AXKP042788, with another check digit.
+		const mended = [...'0123456789'].flatMap((digit) => {
+			const text = `1M8GDM9A${digit}KP042788`;
+			return mendingCheckDigit(cells(text)).map(({ place, character }) =>
+				set(text, place - 1, character)
+			);
+		});
+		expect(mended.length).toBeGreaterThan(0);
+		for (const own of mended) expect(checkDigitOf(cells(own))).toBe(own.charAt(8));
+	});
+
+	it('has nothing to do where the digit fits, is none, or a character is unread', () => {
+		expect(mendingCheckDigit(cells('1M8GDM9AXKP042788'))).toEqual([]);
+		expect(mendingCheckDigit(cells('1M8GDM9AZKP042788'))).toEqual([]);
+		expect(mendingCheckDigit(cells('1M8GDM9A0KP04278?'))).toEqual([]);
 	});
 });

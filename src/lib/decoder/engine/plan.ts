@@ -27,6 +27,10 @@ export interface PreparedLayout {
 	readonly masks: readonly Uint8Array[];
 	/** Indexes of the primary fields in the order in which they are asked: what others depend on comes first. */
 	readonly order: readonly number[];
+	/** Indexes of the fields that turn on the running number or on the whole of it. */
+	readonly open: readonly number[];
+	/** The places of all other fields. */
+	readonly settling: readonly Span[];
 	/** For each primary field, what it asks; null when it asks no table. */
 	readonly questions: readonly (Question | null)[];
 	/** The primary field that names the division. */
@@ -99,11 +103,15 @@ export function prepare(layout: Layout): PreparedLayout {
 		...codeColumns.map(({ column, field }): [string, PrimaryField] => [column, field])
 	]);
 	const early = lookFirst.map(indexOf);
+	const isOpen = ({ reads }: PrimaryField): boolean =>
+		reads.by === 'sequence' || reads.by === 'check_digit';
 	return {
 		layout,
 		allowed,
 		masks: allowed.map(maskOf),
 		order: [...early, ...fields.keys()].filter((index, at, all) => all.indexOf(index) === at),
+		open: [...fields.keys()].filter((index) => isOpen(fields[index] as PrimaryField)),
+		settling: fields.filter((field) => !isOpen(field)).map(({ from, to }): Span => [from, to]),
 		questions: fields.map((field) => questionOf(layout, field.reads, [[field.from, field.to]])),
 		division,
 		codeColumns,

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { buildRow } from '../../../../tests/fixtures/builders';
 import { INVENTED } from '../../../../tests/fixtures/invented';
 import { INVENTED_LAYOUTS } from '../../../../tests/fixtures/invented-layout';
 import { read } from '../read';
@@ -60,6 +61,22 @@ describe('look-alikes', () => {
 				offers: [{ text: '2H37T60100', why: 'would read Ouzelville, Georgia' }]
 			}
 		]);
+	});
+});
+
+describe('a look-alike', () => {
+	it('is offered for the year of the reading, where one figure stands for two', () => {
+		expect(problem('2H37T6O100')?.offers).toEqual([
+			{ text: '2H37T60100', why: 'would read Ouzelville, Georgia' }
+		]);
+	});
+
+	it('is not offered when its row holds for other years', () => {
+		const row = buildRow('gm', 'assembly_plant', 'S', 'Smew Falls', { years: [1975, 1976] });
+		const other = compile({ ...INVENTED, rows: [...INVENTED.rows, row] });
+		const ask = (text: string) =>
+			read(other, { text, kind: 'serial', layouts: INVENTED_LAYOUTS }).problems;
+		expect(ask('2H37T75600')).toEqual([]);
 	});
 });
 

@@ -313,6 +313,20 @@ describe('facts of a row', () => {
 	});
 });
 
+describe('what is kept of beginnings', () => {
+	it('changes nothing, however many there are', () => {
+		const before = ask('2H37T7P600');
+		const letters = 'ABCDEFGHIJKLMNOPQRSTUVWXYZ';
+		for (let n = 0; n < 5000; n += 1) {
+			const body = String(n % 100).padStart(2, '0');
+			const line = letters.charAt(Math.floor(n / 100) % 26);
+			ask(`2${line}${body}${letters.charAt(Math.floor(n / 2600))}7P600`);
+		}
+		expect(ask('2H37T7P600')).toEqual(before);
+		expect(ask('2H37T7P601')).not.toEqual(before);
+	});
+});
+
 describe('a division given beside a text', () => {
 	it('stands in where no row names one', () => {
 		expect(first('9H37T7P600', { division: 'Pontiac' }).division).toBe('Pontiac');

@@ -1,6 +1,7 @@
 /** Makes the readings of one layout and model year: one for each division that the tables know. */
 import { makerOf, type Maker, type ReadContext, type ReadingField } from '../../types';
 import { decoderText as text } from '../../text/en/decoder';
+import { beginningOf, type Beginning, type Settled } from './beginnings';
 import { checkField, sequenceField, yearField } from './calculated-field';
 import { isRead, textOf, UNREAD, type Cell } from './characters';
 import { derivedField } from './derived-field';
@@ -112,24 +113,41 @@ function primaryField(index: number, prepared: PreparedLayout, reader: Reader): 
 	}
 }
 
-/** All fields under one division, derived ones after the last of their parents. */
-function resultsOf(prepared: PreparedLayout, reader: Reader): FieldResult[] {
+/** A primary field and those derived from it. */
+function withDerived(index: number, own: FieldResult, prepared: PreparedLayout, reader: Reader) {
+	const results = [own];
+	for (const { field, head, question } of prepared.derived[
+		index
+	] as PreparedLayout['derived'][number]) {
+		const result = derivedField(field, head, question, own, reader);
+		if (result !== null) results.push(result);
+	}
+	return results;
+}
+
+/** The fields that do not turn on the running number, and what they tell of the car. */
+function settle(prepared: PreparedLayout, reader: Reader): Settled {
 	const { scope } = reader;
 	const primary: FieldResult[] = [];
 	for (const index of prepared.order) {
+		if (prepared.open.includes(index)) continue;
 		const result = primaryField(index, prepared, reader);
 		primary[index] = result;
 		scope.line ??= linesOf(result.rows);
 	}
+	const results = prepared.layout.fields.map((_, index) => {
+		const own = primary[index];
+		return own === undefined ? null : withDerived(index, own, prepared, reader);
+	});
+	return { scope, results };
+}
+
+/** All fields under one division, derived ones after the last of their parents. */
+function resultsOf(prepared: PreparedLayout, settled: Settled, reader: Reader): FieldResult[] {
 	const results: FieldResult[] = [];
-	primary.forEach((own, index) => {
-		results.push(own);
-		for (const { field, head, question } of prepared.derived[
-			index
-		] as PreparedLayout['derived'][number]) {
-			const result = derivedField(field, head, question, own, reader);
-			if (result !== null) results.push(result);
-		}
+	settled.results.forEach((own, index) => {
+		const all = own ?? withDerived(index, primaryField(index, prepared, reader), prepared, reader);
+		for (const result of all) results.push(result);
 	});
 	return results;
 }
@@ -146,35 +164,46 @@ export function draftsOf(
 	const missing = layout.length - typed.length;
 	const cells = missing > 0 ? [...typed, ...Array<Cell>(missing).fill(UNREAD)] : typed;
 	const whole = cells.every(isRead) ? cells.join('') : null;
-	const readerOf = (division: string | undefined): Reader => ({
+	const readerOf = (scope: Scope): Reader => ({
 		tables,
 		prepared,
-		scope: scopeOf(prepared, cells, whole, year, division),
+		scope,
 		cells,
 		text: whole,
 		typed: typed.length
 	});
-	const draft = (division: string | undefined): Draft => ({
-		layout,
-		maker: (division === undefined ? undefined : makerOf(division)) ?? layout.maker,
-		division: division ?? null,
-		year,
-		complete: missing <= 0,
-		results: resultsOf(prepared, readerOf(division))
+	const begin = (): Beginning => ({
+		named: divisionsIn(readerOf({ year })),
+		settled: new Map()
 	});
-	const open = readerOf(undefined);
-	const named = divisionsIn(open);
+	const { named, settled } =
+		whole === null ? begin() : beginningOf(tables, prepared, whole, year, begin);
+	const draft = (division = ''): Draft => {
+		let own = settled.get(division);
+		if (own === undefined) {
+			const scope = scopeOf(prepared, cells, whole, year, division === '' ? undefined : division);
+			own = settle(prepared, readerOf(scope));
+			settled.set(division, own);
+		}
+		return {
+			layout,
+			maker: makerOf(division) ?? layout.maker,
+			division: division === '' ? null : division,
+			year,
+			complete: missing <= 0,
+			results: resultsOf(prepared, own, readerOf(own.scope))
+		};
+	};
 	const { division: given } = context;
-	if (named.length === 0) {
-		const own = given !== undefined && makerOf(given) === layout.maker;
-		return [draft(own ? given : undefined)];
-	}
-	const drafts = named.map(draft);
+	if (named.length === 0)
+		return [draft(given !== undefined && makerOf(given) === layout.maker ? given : undefined)];
+	const drafts = named.map((division) => draft(division));
 	const strays = drafts.map(strayNumber);
 	const [number] = strays;
 	if (layout.divisionInferred === true && number !== undefined && !strays.includes(undefined)) {
-		const others = divisionsByRun(open, number).filter((division) => !named.includes(division));
-		drafts.push(...others.map(draft));
+		const runs = divisionsByRun(readerOf({ year }), number);
+		const others = runs.filter((division) => !named.includes(division));
+		drafts.push(...others.map((division) => draft(division)));
 	}
 	return drafts;
 }
