@@ -1,6 +1,6 @@
 /** Reads one stamp against one edition. */
 import type { Problem, ReadContext, Reading, ReadResult, StampKind } from '../types';
-import { normalise, type Cell, type Characters } from './engine/characters';
+import { isRead, normalise, type Cell, type Characters } from './engine/characters';
 import { fits } from './engine/fit';
 import type { PrimaryField } from './engine/layout';
 import type { PreparedLayout } from './engine/plan';
@@ -109,8 +109,13 @@ function readSerial(
 	const { cells } = characters;
 	const candidates = candidatesOf(cells, layouts);
 	const drafts: Draft[] = [];
+	const whole = cells.every(isRead) ? characters.normalised : '';
 	for (const { prepared, years } of candidates)
-		for (const year of years) drafts.push(...draftsOf(prepared, cells, year, tables, context));
+		for (const year of years) {
+			const plain = whole.length === prepared.layout.length ? whole : null;
+			for (const draft of draftsOf(prepared, cells, year, tables, context, plain))
+				drafts.push(draft);
+		}
 	const { readings, more } = ranked(drafts, context, lookups);
 	const [first] = readings;
 	if (first === undefined) return { readings, more, problems: [misfit(layouts, cells)] };

@@ -2,6 +2,7 @@
  * Numbers that differ in nothing but the running number and the check digit say the same with all their other
  * places. What those say is worked out once and kept, for so many beginnings of an edition.
  */
+import { FIRST_YEAR } from '../../types';
 import type { FieldResult } from './field';
 import type { Scope } from './look-up';
 import type { PreparedLayout } from './plan';
@@ -23,13 +24,15 @@ export interface Beginning {
 }
 
 const MOST_KEPT = 4096;
-const kept = new WeakMap<TableSet, Map<string, Beginning>>();
+/** By layout, then by the characters that settle a number, then by model year (0: open). */
+type Kept = Map<PreparedLayout, Map<string, Beginning[]>>;
+const kept = new WeakMap<TableSet, Kept>();
 
-/** The places of a number that settle it, with layout and year. */
-function keyOf(prepared: PreparedLayout, whole: string, year: number | null): string {
-	let key = `${prepared.layout.id} ${year}`;
-	for (const [from, to] of prepared.settling) key += ` ${whole.slice(from - 1, to)}`;
-	return key;
+/** The characters in the places that settle a number. */
+function settling(prepared: PreparedLayout, whole: string): string {
+	let characters = '';
+	for (const [from, to] of prepared.settling) characters += whole.slice(from - 1, to);
+	return characters;
 }
 
 /** The beginning of a number that is read whole, made by `make` the first time; the oldest goes when there are too many. */
@@ -40,17 +43,24 @@ export function beginningOf(
 	year: number | null,
 	make: () => Beginning
 ): Beginning {
-	let own = kept.get(tables);
+	let layouts = kept.get(tables);
+	if (layouts === undefined) {
+		layouts = new Map();
+		kept.set(tables, layouts);
+	}
+	let own = layouts.get(prepared);
 	if (own === undefined) {
 		own = new Map();
-		kept.set(tables, own);
+		layouts.set(prepared, own);
 	}
-	const key = keyOf(prepared, whole, year);
-	const before = own.get(key);
-	if (before !== undefined) return before;
-	const beginning = make();
-	const [oldest] = own.size < MOST_KEPT ? [] : own.keys();
-	if (oldest !== undefined) own.delete(oldest);
-	own.set(key, beginning);
-	return beginning;
+	const key = settling(prepared, whole);
+	let years = own.get(key);
+	if (years === undefined) {
+		const [oldest] = own.size < MOST_KEPT ? [] : own.keys();
+		if (oldest !== undefined) own.delete(oldest);
+		years = [];
+		own.set(key, years);
+	}
+	const at = year === null ? 0 : year - FIRST_YEAR + 1;
+	return (years[at] ??= make());
 }

@@ -69,6 +69,15 @@ function tokenise(text: string): Token[] {
 }
 
 const PLAIN = /^[A-Z0-9]+$/;
+const IN_PLACE: number[][] = [];
+/** 0, 1, 2 … for a text in which nothing is folded; made once for each length that is likely. */
+function inPlace(length: number): readonly number[] {
+	const known = IN_PLACE[length];
+	if (known !== undefined) return known;
+	const origins = Array.from({ length }, (_, index) => index);
+	if (length <= 64) IN_PLACE[length] = origins;
+	return origins;
+}
 
 /**
  * Folds a typed stamp to its characters.
@@ -79,8 +88,7 @@ const PLAIN = /^[A-Z0-9]+$/;
  */
 export function normalise(text: string): Characters {
 	if (PLAIN.test(text)) {
-		const cells = text.split('');
-		return { cells, normalised: text, origins: cells.map((_, index) => index) };
+		return { cells: text.split(''), normalised: text, origins: inPlace(text.length) };
 	}
 	const tokens = tokenise(text);
 	const first = tokens.findIndex((token) => token.cell !== '*');

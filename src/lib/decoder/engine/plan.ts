@@ -69,6 +69,15 @@ const maskOf = (set: string): Uint8Array => {
 	return mask;
 };
 
+/** The spans between fields, in the order of their places. */
+function between(fields: readonly PrimaryField[], length: number): Span[] {
+	const starts = [1, ...fields.map(({ to }) => to + 1)];
+	const ends = [...fields.map(({ from }) => from - 1), length];
+	return starts
+		.map((start, index): Span => [start, ends[index] as number])
+		.filter(([start, end]) => start <= end);
+}
+
 function questionOf(
 	{ maker }: Layout,
 	reads: FieldReads | DerivedField['reads'],

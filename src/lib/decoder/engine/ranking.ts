@@ -70,22 +70,47 @@ const compareKeys = (a: Key, b: Key): number =>
 	b.found - a.found ||
 	a.thin - b.thin;
 
-function whyOf(key: Key, first: Key, equalFirst: boolean): string {
+/** Why a reading stands where it does, beside what it tells. */
+type Reason =
+	'none' | 'equalFirst' | 'equal' | 'fewerHints' | 'outOfRun' | 'fewerFound' | 'thinner';
+const REASONS = [
+	'none',
+	'equalFirst',
+	'equal',
+	'fewerHints',
+	'outOfRun',
+	'fewerFound',
+	'thinner'
+] as const satisfies readonly Reason[];
+
+function reasonOf(key: Key, first: Key, equalFirst: boolean): Reason {
+	if (key === first) return equalFirst ? 'equalFirst' : 'none';
+	if (compareKeys(key, first) === 0) return 'equal';
+	if (key.hintsMissed > first.hintsMissed) return 'fewerHints';
+	if (key.outOfRun > first.outOfRun) return 'outOfRun';
+	if (key.found < first.found) return 'fewerFound';
+	return key.thin > first.thin ? 'thinner' : 'none';
+}
+
+/** Sentences by what they say: there are few, and every reading carries one. */
+const said = new Map<number, string>();
+
+function whyOf(key: Key, reason: Reason): string {
+	const counts = [key.told, key.fields, key.contested, key.notListed, key.illegible, key.notUsed];
+	// No layout has as many as sixteen fields, so each count has a digit of its own.
+	const id = counts.reduce((sum, count) => sum * 16 + count, REASONS.indexOf(reason));
+	const before = said.get(id);
+	if (before !== undefined) return before;
 	const words = text.why;
-	let why = words.first(key.told, key.fields);
-	const add = (n: number, words: (n: number) => string): void => {
-		if (n > 0) why += ` ${words(n)}`;
-	};
-	add(key.contested, words.contested);
-	add(key.notListed, words.notListed);
-	add(key.illegible, words.illegible);
-	add(key.notUsed, words.notUsed);
-	if (key === first) return equalFirst ? `${why} ${words.equalFirst}` : why;
-	if (compareKeys(key, first) === 0) return `${why} ${words.equal}`;
-	if (key.hintsMissed > first.hintsMissed) return `${why} ${words.fewerHints}`;
-	if (key.outOfRun > first.outOfRun) return `${why} ${words.outOfRun}`;
-	if (key.found < first.found) return `${why} ${words.fewerFound}`;
-	return key.thin > first.thin ? `${why} ${words.thinner}` : why;
+	const parts = [words.first(key.told, key.fields)];
+	if (key.contested > 0) parts.push(words.contested(key.contested));
+	if (key.notListed > 0) parts.push(words.notListed(key.notListed));
+	if (key.illegible > 0) parts.push(words.illegible(key.illegible));
+	if (key.notUsed > 0) parts.push(words.notUsed(key.notUsed));
+	if (reason !== 'none') parts.push(words[reason]);
+	const why = parts.join(' ');
+	said.set(id, why);
+	return why;
 }
 
 /** Orders drafts and turns them into readings; equal keys share a rank. Ties run by layout id, then year, then division. */
@@ -116,7 +141,7 @@ export function ranked(
 			model_year: draft.year,
 			state: draft.complete ? 'complete' : 'partial',
 			rank,
-			why: whyOf(key, first as Key, equalFirst),
+			why: whyOf(key, reasonOf(key, first as Key, equalFirst)),
 			fields: fieldsOf(draft, lookups)
 		});
 	}

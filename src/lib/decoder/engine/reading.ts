@@ -152,18 +152,19 @@ function resultsOf(prepared: PreparedLayout, settled: Settled, reader: Reader): 
 	return results;
 }
 
-/** The readings of a text under one layout and year. `typed` may be shorter than the layout: the rest is unread. */
+/** The readings of a text under one layout and year. `typed` may be shorter than the layout: the rest is unread. `plain` is the text where every character of the layout is known to be read. */
 export function draftsOf(
 	prepared: PreparedLayout,
 	typed: readonly Cell[],
 	year: number | null,
 	tables: TableSet,
-	context: ReadContext
+	context: ReadContext,
+	plain: string | null = null
 ): Draft[] {
 	const { layout } = prepared;
 	const missing = layout.length - typed.length;
 	const cells = missing > 0 ? [...typed, ...Array<Cell>(missing).fill(UNREAD)] : typed;
-	const whole = cells.every(isRead) ? cells.join('') : null;
+	const whole = plain ?? (cells.every(isRead) ? cells.join('') : null);
 	const readerOf = (scope: Scope): Reader => ({
 		tables,
 		prepared,
@@ -198,9 +199,9 @@ export function draftsOf(
 	if (named.length === 0)
 		return [draft(given !== undefined && makerOf(given) === layout.maker ? given : undefined)];
 	const drafts = named.map((division) => draft(division));
-	const strays = drafts.map(strayNumber);
-	const [number] = strays;
-	if (layout.divisionInferred === true && number !== undefined && !strays.includes(undefined)) {
+	if (layout.divisionInferred !== true) return drafts;
+	const number = strayNumber(drafts[0] as Draft);
+	if (number !== undefined && drafts.every((own) => strayNumber(own) !== undefined)) {
 		const runs = divisionsByRun(readerOf({ year }), number);
 		const others = runs.filter((division) => !named.includes(division));
 		drafts.push(...others.map((division) => draft(division)));

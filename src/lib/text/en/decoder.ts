@@ -39,7 +39,8 @@ const listed = (parts: readonly string[]): string =>
 		: `${parts.slice(0, -1).join(', ')} and ${parts[parts.length - 1]}`;
 
 /** 12345 as 12,345; `toLocaleString` is a hundred times slower. */
-const grouped = (n: number): string => String(n).replace(/\B(?=(\d{3})+$)/g, ',');
+const grouped = (n: number): string =>
+	n < 1000 ? String(n) : `${grouped(Math.floor(n / 1000))},${String(n % 1000).padStart(3, '0')}`;
 const characters = (n: number): string => counted(n, 'character', 'characters');
 const numbered = (from: number, to: number): string =>
 	from === to ? `character ${from}` : `characters ${from}–${to}`;
