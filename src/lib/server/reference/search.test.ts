@@ -25,6 +25,12 @@ describe('a search', () => {
 		expect(keys('carburettor')).toContain('gm.engine.t.1');
 	});
 
+	it('finds nothing but what was typed, in any case, where there is such a thing', () => {
+		for (const query of ['plover', 'PLOVER', 'Plôver'])
+			for (const row of searchRows(tables, query).items)
+				expect(`${row.meaning} ${row.line.join(' ')} ${row.note}`).toMatch(/plover/i);
+	});
+
 	it('puts a code typed exactly first, in any case', () => {
 		expect(keys('w', { maker: 'gm', table: 'engine' }).slice(0, 2)).toEqual([
 			'gm.engine.w.1',

@@ -1,6 +1,7 @@
 import Fuse from 'fuse.js';
 import { compareRows, type CompiledRow, type CompiledTable, type TableSet } from '../../decoder';
 import { MAKERS, TABLE_NAMES, type Maker, type Strength, type TableName } from '../../types';
+import { findAsTyped, folded, type Found } from './search-as-typed';
 
 /** What narrows a search. Everything is optional; a row that is open in a column fits every value of it. */
 export interface RowFilters {
@@ -58,19 +59,25 @@ const wordsOf = (query: string): string[] =>
 		.slice(0, MOST_WORDS)
 		.map((word) => word.slice(0, LONGEST_WORD));
 
-/** Rows of one table that have every word somewhere, the best first; a code typed exactly before all. */
-function find(
-	table: CompiledTable,
-	words: readonly string[]
-): { row: CompiledRow; score: number }[] {
-	const exact = words.length === 1 ? words[0]?.toUpperCase() : undefined;
+/** Rows of one table that have every word somewhere, slips of spelling forgiven. */
+function find(table: CompiledTable, words: readonly string[]): Found[] {
 	const found = indexOf(table).search({
 		$and: words.map((word) => ({ $or: KEYS.map(({ name }) => ({ [name]: word })) }))
 	});
-	return found.map(({ item, score }) => ({
-		row: item,
-		score: item.code === exact ? -1 : (score ?? 1)
-	}));
+	return found.map(({ item, score }) => ({ row: item, score: score ?? 1 }));
+}
+
+/** Slips of spelling are forgiven where no row has the words as they were typed. */
+function findIn(
+	tables: readonly CompiledTable[],
+	words: readonly string[],
+	filters: RowFilters
+): Found[] {
+	const fitting = (found: readonly Found[]) => found.filter(({ row }) => fits(row, filters));
+	const typed = words.map(folded);
+	const asTyped = tables.flatMap((table) => fitting(findAsTyped(table, typed)));
+	if (asTyped.length > 0) return asTyped;
+	return tables.flatMap((table) => fitting(find(table, words)));
 }
 
 function fits(row: CompiledRow, { division, year, strength }: RowFilters): boolean {
@@ -94,7 +101,7 @@ export const tablesInOrder = (tables: TableSet, search: RowFilters = {}): Compil
 
 /**
  * Rows that fit the filters and have every word of the query, by how well they match; without a query all
- * that fit, in the order of the tables. Slips of spelling are forgiven.
+ * that fit, in the order of the tables. Slips of spelling are forgiven where nothing else is found.
  * @param page where to begin and how many to answer at most; all of them unless told
  */
 export function searchRows(
@@ -108,8 +115,7 @@ export function searchRows(
 	const rows =
 		words.length === 0
 			? searched.flatMap((table) => table.rows.filter((row) => fits(row, filters)))
-			: searched
-					.flatMap((table) => find(table, words).filter(({ row }) => fits(row, filters)))
+			: findIn(searched, words, filters)
 					.sort((a, b) => a.score - b.score || compareRows(a.row, b.row))
 					.map(({ row }) => row);
 	const end = offset + limit;
