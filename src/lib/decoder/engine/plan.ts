@@ -120,7 +120,7 @@ export function prepare(layout: Layout): PreparedLayout {
 		masks: allowed.map(maskOf),
 		order: [...early, ...fields.keys()].filter((index, at, all) => all.indexOf(index) === at),
 		open: [...fields.keys()].filter((index) => isOpen(fields[index] as PrimaryField)),
-		settling: fields.filter((field) => !isOpen(field)).map(({ from, to }): Span => [from, to]),
+		settling: between(fields.filter(isOpen), layout.length),
 		questions: fields.map((field) => questionOf(layout, field.reads, [[field.from, field.to]])),
 		division,
 		codeColumns,
