@@ -40,7 +40,8 @@ export default defineConfig({
 					globalSetup: ['tests/fixtures/built-server.ts'],
 					testTimeout: 60_000,
 					hookTimeout: 120_000,
-					fileParallelism: false
+					// Browser tests mostly wait; two files at a time fill what two cores have.
+					maxWorkers: 2
 				}
 			},
 			{
