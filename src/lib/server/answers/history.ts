@@ -1,4 +1,4 @@
-import { MAKER_NAMES, type RowHistoryAnswer } from '../../types';
+import type { RowHistoryAnswer } from '../../types';
 import {
 	answerJson,
 	etagOf,
@@ -9,6 +9,7 @@ import {
 	type Parameters
 } from '../http';
 import type { RowVersion } from '../reference';
+import { contentAnswer } from './rows';
 
 /** A version of a row as the interface gives it. */
 const versionAnswer = ({
@@ -19,22 +20,7 @@ const versionAnswer = ({
 	version: span.version,
 	edition_from: span.edition_from,
 	edition_to: span.edition_to,
-	row_key: row.row_key,
-	maker: MAKER_NAMES[row.maker],
-	maker_key: row.maker,
-	table: row.table,
-	division: [...row.division],
-	line: [...row.line],
-	body: [...row.body],
-	engine: [...row.engine],
-	plant: [...row.plant],
-	market: [...row.market],
-	years_from: row.years_from,
-	years_to: row.years_to,
-	code: row.code,
-	meaning: row.meaning,
-	values: row.values,
-	note: row.note,
+	...contentAnswer(row),
 	citations: citations.map(({ source, stance, read, locator, quotation, seen_on }) => ({
 		source,
 		stance,

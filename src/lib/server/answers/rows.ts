@@ -3,13 +3,14 @@ import {
 	MAKER_NAMES,
 	tableDefinition,
 	type ItemsAnswer,
+	type ReferenceRow,
 	type RowAnswer,
 	type RowDetail,
 	type TablesAnswer
 } from '../../types';
 
-/** A row as the interface gives it: the maker by name and key, nothing of how it is compiled. */
-export const rowAnswer = (row: CompiledRow): RowAnswer => ({
+/** What a row says, with its maker by name and key. */
+export const contentAnswer = (row: ReferenceRow) => ({
 	row_key: row.row_key,
 	maker: MAKER_NAMES[row.maker],
 	maker_key: row.maker,
@@ -25,7 +26,12 @@ export const rowAnswer = (row: CompiledRow): RowAnswer => ({
 	code: row.code,
 	meaning: row.meaning,
 	values: row.values,
-	note: row.note,
+	note: row.note
+});
+
+/** A row as the interface gives it: nothing of how it is compiled. */
+export const rowAnswer = (row: CompiledRow): RowAnswer => ({
+	...contentAnswer(row),
 	strength: row.strength,
 	strength_why: row.strength_why,
 	sources: [...row.sources],
