@@ -1,5 +1,6 @@
 export * from './api';
 export * from './api-requests';
+export * from './dates';
 export * from './fields';
 export * from './makers';
 export * from './name-schemas';

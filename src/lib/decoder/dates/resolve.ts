@@ -1,0 +1,88 @@
+/** From the values of the parts to intervals of days and their words. */
+import { datesText as text } from '../../text/en/dates';
+import {
+	calendarDay,
+	dayNumber,
+	dayOfYear,
+	daysInMonth,
+	daysInYear,
+	isoDay,
+	weekOfMonth,
+	type DaySpan
+} from './days';
+import type { DateMeaning, PartName } from './format';
+
+/** What one combination of part values names: a span of days, its words, or why there is none. */
+export type Told =
+	{ readonly span: DaySpan | null; readonly words: string } | { readonly impossible: string };
+
+/** Part values of one combination; months of a second year are folded to 1–12 before. */
+export type Values = Partial<Record<PartName, number>>;
+
+const wordsOfDay = (number: number): string => {
+	const { year, month, day } = calendarDay(number);
+	return text.day(year, month, day);
+};
+const oneDay = (number: number): Told => ({ span: [number, number], words: wordsOfDay(number) });
+
+/** 7 days from the first of the year on; the last week ends with the year. */
+function weekOfYear(year: number | null, week: number): Told {
+	const words = text.weekOfYear(year, week);
+	if (year === null) return { span: null, words };
+	const last = Math.min(7 * week, daysInYear(year));
+	return { span: [dayOfYear(year, 7 * week - 6), dayOfYear(year, last)], words };
+}
+
+function inMonth(year: number | null, month: number, { day, week }: Values): Told {
+	if (day !== undefined) {
+		const longest = daysInMonth(month, year);
+		if (day > longest)
+			return { impossible: text.faults.shortMonth(text.inMonth(year, month), longest) };
+		if (year !== null) return oneDay(dayNumber(year, month, day));
+		return { span: null, words: text.day(null, month, day) };
+	}
+	if (week !== undefined) {
+		const span = year === null ? null : weekOfMonth(year, month, week);
+		return { span, words: text.weekOfMonth(year, month, week) };
+	}
+	const words = text.inMonth(year, month);
+	if (year === null) return { span: null, words };
+	const last = daysInMonth(month, year);
+	return { span: [dayNumber(year, month, 1), dayNumber(year, month, last)], words };
+}
+
+/** The days that a combination of values names. */
+export function tell(values: Values, year: number | null, dayZero: number): Told {
+	if (values.day_count !== undefined) return oneDay(dayZero + values.day_count);
+	if (values.day_of_year !== undefined) {
+		const n = values.day_of_year;
+		if (year === null) return { span: null, words: text.dayOfYear(n) };
+		if (n > daysInYear(year)) return { impossible: text.faults.shortYear(year) };
+		return oneDay(dayOfYear(year, n));
+	}
+	if (values.week_of_year !== undefined) return weekOfYear(year, values.week_of_year);
+	if (values.month !== undefined) return inMonth(year, values.month, values);
+	const only = year as number;
+	return { span: [dayOfYear(only, 1), dayOfYear(only, daysInYear(only))], words: String(only) };
+}
+
+const LISTED = 3;
+
+/** One meaning of combinations that differ only in what is unread: the hull of their days. */
+export function together(
+	told: readonly { readonly span: DaySpan | null; readonly words: string }[],
+	year: number | null,
+	usual: boolean
+): DateMeaning {
+	const sorted = [...told].sort((a, b) => (a.span?.[0] ?? 0) - (b.span?.[0] ?? 0));
+	const names = [...new Set(sorted.map(({ words }) => words))];
+	const words =
+		names.length <= LISTED
+			? text.or(names)
+			: text.between(names[0] as string, names[names.length - 1] as string);
+	const spans = sorted.flatMap(({ span }) => (span === null ? [] : [span]));
+	const [first] = spans;
+	if (first === undefined) return { earliest: null, latest: null, words, year, usual };
+	const latest = Math.max(...spans.map(([, to]) => to));
+	return { earliest: isoDay(first[0]), latest: isoDay(latest), words, year, usual };
+}

@@ -1,0 +1,70 @@
+/** Which calendar year a date is of: what the code says, what the car settles, what stays open. */
+import type { DateContext, DateFormat, YearChoice } from './format';
+
+/**
+ * So many years before the model year a part may be dated, at most, for its decade to be settled by the car: a model
+ * year begins in the summer before, and castings sat in stores for a year (common practice).
+ */
+const BEFORE_CAR = 2;
+
+export interface Years {
+	/** The likeliest first; null where the year is open and nothing lists what it can be. */
+	readonly choices: readonly (YearChoice | null)[];
+	readonly settled: 'stamped' | 'by_car' | 'open';
+}
+
+const usual = (year: number): YearChoice => ({ year, usual: true });
+
+/** What lies in a span; all of it when nothing does, because what is known beside a date never removes a reading. */
+const within = (years: readonly number[], [from, to]: readonly [number, number]): number[] => {
+	const inside = years.filter((year) => year >= from && year <= to);
+	return inside.length > 0 ? inside : [...years];
+};
+
+/** The calendar year of a year figure, letter or pair of figures. */
+export function stampedYears(
+	years: readonly number[],
+	format: DateFormat,
+	context: DateContext
+): Years {
+	const known = within(within(years, format.years), context.years ?? format.years);
+	if (known.length === 1) return { choices: known.map(usual), settled: 'stamped' };
+	const { year } = context;
+	if (year === undefined) return { choices: known.map(usual), settled: 'open' };
+	const near = known.filter((one) => one <= year && one >= year - BEFORE_CAR);
+	if (near.length > 0) return { choices: near.map(usual), settled: 'by_car' };
+	const byDistance = [...known].sort((a, b) => Math.abs(a - year) - Math.abs(b - year));
+	return { choices: byDistance.map(usual), settled: 'open' };
+}
+
+/**
+ * The calendar years of a month in a model year (common practice): building began in the summer before and ended in
+ * July or August. A model year that ran long, as Chevrolet's 1969 did for Camaro and Corvette, reached into the next
+ * autumn: that year stays possible.
+ */
+export function yearsOfModelYear(month: number, modelYear: number): readonly YearChoice[] {
+	const before = modelYear - 1;
+	if (month <= 6) return [{ year: modelYear, usual: true }];
+	if (month === 7)
+		return [
+			{ year: modelYear, usual: true },
+			{ year: before, usual: false }
+		];
+	return [
+		{ year: before, usual: true },
+		{ year: modelYear, usual: month === 8 }
+	];
+}
+
+/** The calendar years of a date without a year. */
+export function unstampedYears(month: number, format: DateFormat, context: DateContext): Years {
+	const choose = format.yearsOf ?? yearsOfModelYear;
+	if (context.year !== undefined)
+		return { choices: choose(month, context.year), settled: 'by_car' };
+	if (context.years === undefined) return { choices: [null], settled: 'open' };
+	const [from, to] = context.years;
+	return {
+		choices: Array.from({ length: to - from + 1 }, (_, index) => usual(from + index)),
+		settled: 'open'
+	};
+}
