@@ -7,4 +7,5 @@ export * from './name-schemas';
 export * from './readings';
 export * from './rows';
 export * from './tables';
+export * from './tally';
 export * from './values';
