@@ -4,6 +4,7 @@ export * from './dates';
 export * from './fields';
 export * from './makers';
 export * from './name-schemas';
+export * from './notices';
 export * from './readings';
 export * from './rows';
 export * from './tables';

@@ -3,6 +3,7 @@ import { defineCitation } from './citation';
 import { defineClaim } from './claim';
 import { defineEdition } from './edition';
 import { defineEditionCounter } from './edition-counter';
+import { defineOutboxMail } from './outbox-mail';
 import { defineReferenceRow } from './reference-row';
 import { defineReleaseConflict } from './release-conflict';
 import { defineReleaseLoad } from './release-load';
@@ -11,6 +12,7 @@ import { defineSource } from './source';
 export type { CitationRecord } from './citation';
 export type { ClaimRecord } from './claim';
 export type { EditionRecord } from './edition';
+export type { OutboxMailRecord } from './outbox-mail';
 export type { ReferenceRowRecord } from './reference-row';
 export type { ReleaseConflictRecord } from './release-conflict';
 export type { ReleaseLoadRecord } from './release-load';
@@ -23,6 +25,7 @@ export const defineModels = (sequelize: Sequelize) => ({
 	claims: defineClaim(sequelize),
 	editionCounter: defineEditionCounter(sequelize),
 	editions: defineEdition(sequelize),
+	outbox: defineOutboxMail(sequelize),
 	referenceRows: defineReferenceRow(sequelize),
 	releaseConflicts: defineReleaseConflict(sequelize),
 	releaseLoads: defineReleaseLoad(sequelize),
