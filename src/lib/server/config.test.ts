@@ -25,8 +25,31 @@ describe('readConfig', () => {
 			readingsPerMinute: 3000,
 			trustProxy: 0,
 			bodyLimit: 524_288,
-			authSecret: undefined
+			authSecret: undefined,
+			smtpUrl: undefined,
+			mailFrom: 'Tallyplate <no-reply@127.0.0.1>',
+			mailboxFolder: undefined,
+			storage: null
 		});
+	});
+
+	it('takes a store of objects, with its keys', () => {
+		const keys = { S3_ACCESS_KEY_ID: 'id', S3_SECRET_ACCESS_KEY: 'hush' };
+		expect(read({ S3_BUCKET: 'uploads', ...keys }).storage).toEqual({
+			endpoint: undefined,
+			region: 'us-east-1',
+			bucket: 'uploads',
+			accessKeyId: 'id',
+			secretAccessKey: 'hush'
+		});
+		expect(messageOf({ DATABASE_URL, S3_BUCKET: 'uploads', S3_ACCESS_KEY_ID: 'id' })).toBe(
+			'S3_SECRET_ACCESS_KEY is not set; expected a value, as S3_BUCKET is set.'
+		);
+	});
+
+	it('takes whom mail comes from, with a name or without', () => {
+		for (const from of ['desk@mail.example', 'The desk <desk@mail.example>'])
+			expect(read({ MAIL_FROM: from }).mailFrom).toBe(from);
 	});
 
 	it('makes the origin from host and port, and brackets an IPv6 address', () => {
@@ -54,6 +77,10 @@ describe('readConfig', () => {
 		['ORIGIN', 'tallyplate.example'],
 		['ORIGIN', 'https://tallyplate.example/app'],
 		['DEMO', 'yes'],
+		['MAIL_FROM', 'desk'],
+		['MAIL_FROM', 'a@b.example, c@d.example'],
+		['S3_BUCKET', 'Not A Bucket'],
+		['S3_ENDPOINT', 's3.example'],
 		['LOG_LEVEL', 'loud'],
 		['TRUST_PROXY', 'true'],
 		['BODY_SIZE_LIMIT', '1G'],
