@@ -2,11 +2,21 @@
 import type { Dated, Maker } from '../../types';
 
 /**
- * What a part of a date code stands for. `other` is no part of the date: a plant, a shift, an engine.
- * Weeks are 1–5 in a month, 1–53 in a year.
+ * What a part of a date code stands for. `year` is a calendar year, `model_year` the year of the cars a unit is for.
+ * Weeks are 1–5 in a month, 1–53 in a year; `day_of_run` counts from 1 January of the year before the model year,
+ * `day_count` from the format's `dayZero`. `other` is no part of the date: a plant, a shift, an engine.
  */
 export type PartName =
-	'month' | 'day' | 'year' | 'week' | 'week_of_year' | 'day_of_year' | 'day_count' | 'other';
+	| 'month'
+	| 'day'
+	| 'year'
+	| 'model_year'
+	| 'week'
+	| 'week_of_year'
+	| 'day_of_year'
+	| 'day_of_run'
+	| 'day_count'
+	| 'other';
 
 /**
  * One part of a date code. `codes` maps what is stamped to what it can stand for: months 1–12, and 13–24 for the months
@@ -43,7 +53,7 @@ export interface DateFormat {
 	readonly parts: readonly DatePart[];
 	/** Day 0 of a day count, as a day number. */
 	readonly dayZero?: number;
-	/** Which calendar years a month can be of in a model year, for dates that carry no year. */
+	/** Which calendar years a month can be of in a model year, for dates that carry no calendar year. */
 	readonly yearsOf?: (month: number, modelYear: number) => readonly YearChoice[];
 	/** What one must know beside the day: a limit, a rule of thumb. */
 	readonly remark?: string;

@@ -25,6 +25,17 @@ const numbered = (from: number, to: number, codeOf: (value: number) => readonly 
 		codeOf(value).map((code) => [code, [value]] as const)
 	);
 
+/** Month letters over which sources differ: from the tenth on, I was left out or it was not. */
+export const monthLettersInDoubt = (): DatePart =>
+	part(
+		'month',
+		text.parts.monthLetter,
+		[...'ABCDEFGHIJKLM'].map((letter, index): readonly [string, readonly number[]] => [
+			letter,
+			index < 9 ? [index + 1] : index === 12 ? [12] : [index, index + 1]
+		])
+	);
+
 /** Letters or figures in the order of the months, beginning with `first`; what stands past twelve is of a second year. */
 export function monthLetters(letters: string, first = 1): DatePart {
 	const last = letters.slice(-1);
@@ -93,6 +104,14 @@ export const dayOfYearPart = (): DatePart =>
 		numbered(1, 366, (value) => [padded(value, 3)])
 	);
 
+/** 001–699, counted from 1 January of the year before the model year. */
+export const dayOfRunPart = (): DatePart =>
+	part(
+		'day_of_run',
+		text.parts.dayOfRun,
+		numbered(1, 699, (value) => [padded(value, 3)])
+	);
+
 /** 0000–9999. */
 export const dayCountPart = (): DatePart =>
 	part(
@@ -117,6 +136,14 @@ const twoFigures = (): [string, number[]][] =>
 /** The last figure of the year. */
 export const yearFigure = (): DatePart => part('year', text.parts.yearFigure, lastFigures());
 
+/** The last figure of the model year. */
+export const modelYearFigure = (): DatePart =>
+	part('model_year', text.parts.modelYearFigure, lastFigures());
+
+/** The last two figures of the model year. */
+export const modelYearFigures = (): DatePart =>
+	part('model_year', text.parts.modelYearFigures, twoFigures());
+
 /** The last two figures of the year. */
 export const yearFigures = (): DatePart => part('year', text.parts.yearFigures, twoFigures());
 
@@ -140,7 +167,7 @@ export const yearCodes = (label: string, codes: Iterable<readonly [string, numbe
 		[...codes].map(([code, year]) => [code, [year]])
 	);
 
-/** A character that is no part of the date. */
+/** What is no part of the date; an empty code means that it may be missing. */
 export const otherPart = (label: string, codes: Iterable<string>): DatePart =>
 	part(
 		'other',

@@ -12,13 +12,13 @@ import type {
 } from './format';
 import { matchesOf, type Match } from './match';
 import { tell, together, type Values } from './resolve';
-import { stampedYears, unstampedYears, type Years } from './years';
+import { modelYears, stampedYears, unstampedYears, type Years } from './years';
 
 /** More meanings than this say nothing: too much is unread. */
 const MOST = 24;
 const MONTHS = 12;
 /** What divides a year; `day_count` stands apart because it names the year too. */
-const WITHIN = ['day', 'week', 'week_of_year', 'day_of_year', 'day_count'] as const;
+const WITHIN = ['day', 'week', 'week_of_year', 'day_of_year', 'day_of_run'] as const;
 
 interface Group {
 	readonly month: number | undefined;
@@ -54,6 +54,20 @@ function countGroups(counts: readonly number[], dayZero: number): Group[] {
 	}));
 }
 
+/** The calendar years of one month, from what is stamped or from the car. */
+function yearsOf(
+	match: Match,
+	month: number | undefined,
+	format: DateFormat,
+	context: DateContext
+): Years {
+	const stamped = valuesOf(match, 'year');
+	if (stamped !== undefined) return stampedYears(stamped, format, context);
+	const models = valuesOf(match, 'model_year');
+	if (models !== undefined) return modelYears(models, month, format, context);
+	return unstampedYears(month as number, format, context);
+}
+
 function groupsOf(
 	match: Match,
 	format: DateFormat,
@@ -61,14 +75,12 @@ function groupsOf(
 ): { readonly groups: Group[]; readonly settled: Years['settled'] } {
 	const counts = valuesOf(match, 'day_count');
 	if (counts !== undefined)
-		return { groups: countGroups(counts, format.dayZero ?? 0), settled: 'stamped' };
+		return { groups: countGroups(counts, format.dayZero as number), settled: 'stamped' };
 	const within = withinOf(match);
-	const stamped = valuesOf(match, 'year');
-	const own = stamped === undefined ? null : stampedYears(stamped, format, context);
 	const groups: Group[] = [];
-	let settled: Years['settled'] = own?.settled ?? 'open';
+	let settled: Years['settled'] = 'stamped';
 	for (const month of valuesOf(match, 'month') ?? [undefined]) {
-		const years = own ?? unstampedYears(month ?? 1, format, context);
+		const years = yearsOf(match, month, format, context);
 		settled = years.settled;
 		const folded = month === undefined ? undefined : ((month - 1) % MONTHS) + 1;
 		for (const choice of years.choices) groups.push({ month: folded, choice, within });
@@ -81,7 +93,7 @@ function detailOf(
 	meanings: readonly DateMeaning[],
 	settled: Years['settled']
 ): string {
-	const withYear = format.parts.some(({ name }) => name === 'year');
+	const withYear = format.parts.some(({ name }) => name === 'year' || name === 'model_year');
 	const [first] = meanings;
 	const sentences: string[] = [];
 	if (settled === 'by_car')

@@ -25,12 +25,18 @@ const wordsOfDay = (number: number): string => {
 };
 const oneDay = (number: number): Told => ({ span: [number, number], words: wordsOfDay(number) });
 
-/** 7 days from the first of the year on; the last week ends with the year. */
-function weekOfYear(year: number | null, week: number): Told {
-	const words = text.weekOfYear(year, week);
-	if (year === null) return { span: null, words };
+/** Seven days from the first of the year on; the last week ends with the year. */
+function weekOfYear(year: number, week: number): Told {
 	const last = Math.min(7 * week, daysInYear(year));
-	return { span: [dayOfYear(year, 7 * week - 6), dayOfYear(year, last)], words };
+	return {
+		span: [dayOfYear(year, 7 * week - 6), dayOfYear(year, last)],
+		words: text.weekOfYear(year, week)
+	};
+}
+
+function nthDay(year: number, n: number): Told {
+	if (n > daysInYear(year)) return { impossible: text.faults.shortYear(year) };
+	return oneDay(dayOfYear(year, n));
 }
 
 function inMonth(year: number | null, month: number, { day, week }: Values): Told {
@@ -51,19 +57,18 @@ function inMonth(year: number | null, month: number, { day, week }: Values): Tol
 	return { span: [dayNumber(year, month, 1), dayNumber(year, month, last)], words };
 }
 
-/** The days that a combination of values names. */
+/**
+ * The days that a combination of values names. The year is null only where the code has none and nothing else gives it,
+ * and then there is a month.
+ */
 export function tell(values: Values, year: number | null, dayZero: number): Told {
 	if (values.day_count !== undefined) return oneDay(dayZero + values.day_count);
-	if (values.day_of_year !== undefined) {
-		const n = values.day_of_year;
-		if (year === null) return { span: null, words: text.dayOfYear(n) };
-		if (n > daysInYear(year)) return { impossible: text.faults.shortYear(year) };
-		return oneDay(dayOfYear(year, n));
-	}
-	if (values.week_of_year !== undefined) return weekOfYear(year, values.week_of_year);
 	if (values.month !== undefined) return inMonth(year, values.month, values);
-	const only = year as number;
-	return { span: [dayOfYear(only, 1), dayOfYear(only, daysInYear(only))], words: String(only) };
+	const own = year as number;
+	if (values.day_of_year !== undefined) return nthDay(own, values.day_of_year);
+	if (values.day_of_run !== undefined) return oneDay(dayOfYear(own - 1, values.day_of_run));
+	if (values.week_of_year !== undefined) return weekOfYear(own, values.week_of_year);
+	return { span: [dayOfYear(own, 1), dayOfYear(own, daysInYear(own))], words: String(own) };
 }
 
 const LISTED = 3;
@@ -84,5 +89,6 @@ export function together(
 	const [first] = spans;
 	if (first === undefined) return { earliest: null, latest: null, words, year, usual };
 	const latest = Math.max(...spans.map(([, to]) => to));
-	return { earliest: isoDay(first[0]), latest: isoDay(latest), words, year, usual };
+	const own = calendarDay(first[0]).year;
+	return { earliest: isoDay(first[0]), latest: isoDay(latest), words, year: own, usual };
 }

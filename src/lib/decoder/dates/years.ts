@@ -56,6 +56,48 @@ export function yearsOfModelYear(month: number, modelYear: number): readonly Yea
 	];
 }
 
+/** Months are counted from August, 8 to 24 for the second December: a month stands for one year alone. */
+export const fromAugust = (month: number, modelYear: number): readonly YearChoice[] => [
+	usual(month > 12 ? modelYear : modelYear - 1)
+];
+
+/**
+ * A model year from August to July, as Chrysler's. A plan may have been a month early or late at either end (common
+ * practice).
+ */
+export function fromAugustToJuly(month: number, modelYear: number): readonly YearChoice[] {
+	const own = usual(month >= 8 ? modelYear - 1 : modelYear);
+	if (month !== 7 && month !== 8) return [own];
+	return [own, { year: month === 7 ? modelYear - 1 : modelYear, usual: false }];
+}
+
+/**
+ * Months of Ford plates. 13 to 24 are the months of a second calendar year, which is the model year. The first twelve
+ * begin in the summer before; a model that came out in spring, as the first Maverick, has them from the spring before,
+ * one that came out late has them to its end (common practice).
+ */
+export function fordYears(month: number, modelYear: number): readonly YearChoice[] {
+	if (month > 12) return [usual(modelYear)];
+	const [first, second] = month <= 7 ? [modelYear, modelYear - 1] : [modelYear - 1, modelYear];
+	return [usual(first), { year: second, usual: month === 8 }];
+}
+
+/** The calendar years of a month in the model year that is stamped; a day of the run is counted from that year itself. */
+export function modelYears(
+	models: readonly number[],
+	month: number | undefined,
+	format: DateFormat,
+	context: DateContext
+): Years {
+	const { choices, settled } = stampedYears(models, format, context);
+	if (month === undefined) return { choices, settled };
+	const choose = format.yearsOf ?? yearsOfModelYear;
+	return {
+		choices: choices.flatMap((model) => choose(month, (model as YearChoice).year)),
+		settled
+	};
+}
+
 /** The calendar years of a date without a year. */
 export function unstampedYears(month: number, format: DateFormat, context: DateContext): Years {
 	const choose = format.yearsOf ?? yearsOfModelYear;

@@ -1,0 +1,22 @@
+/**
+ * The assembly date struck on the pad of a General Motors engine: plant letter, month and day, no year, as T0830.
+ * Source: brianesser.com, "Engine code and plate notes"; row `gm-engine-month-day` of table `layout` cites all.
+ */
+import { LETTERS } from '../engine/characters';
+import { datesText } from '../../text/en/dates';
+import type { DateFormat } from './format';
+import { dayFigures, monthFigures, otherPart } from './parts';
+
+const text = datesText.parts;
+
+export const gmEngineMonthDay = {
+	id: 'gm-engine-month-day',
+	title: 'General Motors engine stamp: plant letter, month, day',
+	maker: 'gm',
+	dates: 'unit_assembled',
+	source: 'brianesser.com, Engine code and plate notes',
+	years: [1955, 1980],
+	parts: [otherPart(text.plantLetter, LETTERS), monthFigures(), dayFigures()],
+	remark: datesText.remarks.noYear,
+	example: { text: 'T0830', year: 1970, earliest: '1969-08-30', latest: '1969-08-30' }
+} as const satisfies DateFormat;

@@ -1,0 +1,29 @@
+/**
+ * The serial of Chevrolet's other gearboxes (three-speed, Saginaw, Powerglide, Turbo Hydra-Matic 350): plant letter, year
+ * figure, month letter, day, D or N for the shift. The month letters are taken to be those of the Muncie.
+ * Source: ChevelleStuff, "Transmission identification" of 1970 and 1971; row `gm-gearbox-year-month-day` of table `layout`
+ * cites all.
+ */
+import { datesText } from '../../text/en/dates';
+import type { DateFormat } from './format';
+import { dayFigures, modelYearFigure, monthLetters, otherPart } from './parts';
+
+const text = datesText.parts;
+
+export const gmGearboxYearMonthDay = {
+	id: 'gm-gearbox-year-month-day',
+	title: 'Chevrolet gearbox 1967–75: plant letter, year, month letter, day',
+	maker: 'gm',
+	dates: 'unit_assembled',
+	source: 'ChevelleStuff, Transmission identification 1970',
+	years: [1966, 1975],
+	parts: [
+		otherPart(text.plantLetter, 'BCEJKNRSTY'),
+		modelYearFigure(),
+		monthLetters('ABCDEHKMPRST'),
+		dayFigures(),
+		otherPart(text.shiftLetter, ['', 'D', 'N'])
+	],
+	remark: datesText.remarks.gearboxLetters,
+	example: { text: 'B0R25', year: 1970, earliest: '1969-10-25', latest: '1969-10-25' }
+} as const satisfies DateFormat;
