@@ -102,19 +102,25 @@ CREATE TABLE `jobs` (
   `id` varchar(32) NOT NULL,
   `kind` varchar(64) NOT NULL,
   `payload` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`payload`)),
+  `user_id` varchar(32) DEFAULT NULL,
   `once_key` varchar(160) DEFAULT NULL,
-  `state` enum('due','running','done','failed') NOT NULL DEFAULT 'due',
+  `state` enum('due','running','done','failed','stopped') NOT NULL DEFAULT 'due',
   `due_at` datetime(3) NOT NULL,
   `taken_by` varchar(64) DEFAULT NULL,
   `taken_until` datetime(3) DEFAULT NULL,
   `attempts` smallint(5) unsigned NOT NULL DEFAULT 0,
-  `progress` smallint(5) unsigned NOT NULL DEFAULT 0,
+  `progress` int(10) unsigned NOT NULL DEFAULT 0,
+  `total` int(10) unsigned DEFAULT NULL,
+  `checkpoint` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin DEFAULT NULL CHECK (json_valid(`checkpoint`)),
+  `stop_asked_at` datetime(3) DEFAULT NULL,
   `last_error` varchar(500) DEFAULT NULL,
   `created_at` datetime(3) NOT NULL,
   `finished_at` datetime(3) DEFAULT NULL,
   PRIMARY KEY (`id`),
   UNIQUE KEY `once` (`once_key`),
-  KEY `next_due` (`state`,`due_at`)
+  KEY `next_due` (`state`,`due_at`),
+  KEY `of_user` (`user_id`,`created_at`),
+  CONSTRAINT `jobs_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`) ON DELETE CASCADE
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
 
 CREATE TABLE `outbox` (

@@ -18,6 +18,7 @@ import { step as files } from './202612010445-files';
 import { step as audit } from './202612010446-audit';
 import { step as sharedCounters } from './202612010447-shared-counters';
 import { step as outboxLease } from './202612010910-outbox-lease';
+import { step as jobsForPeople } from './202612010925-jobs-for-people';
 
 /** Every migration by name, in order. Imported one by one so that they also work inside the server's build. */
 export const MIGRATIONS: readonly (readonly [name: string, step: SchemaStep])[] = [
@@ -39,5 +40,6 @@ export const MIGRATIONS: readonly (readonly [name: string, step: SchemaStep])[] 
 	['202612010445-files', files],
 	['202612010446-audit', audit],
 	['202612010447-shared-counters', sharedCounters],
-	['202612010910-outbox-lease', outboxLease]
+	['202612010910-outbox-lease', outboxLease],
+	['202612010925-jobs-for-people', jobsForPeople]
 ];

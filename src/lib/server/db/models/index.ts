@@ -3,6 +3,7 @@ import { defineCitation } from './citation';
 import { defineClaim } from './claim';
 import { defineEdition } from './edition';
 import { defineEditionCounter } from './edition-counter';
+import { defineJob } from './job';
 import { defineOutboxMail } from './outbox-mail';
 import { defineReferenceRow } from './reference-row';
 import { defineReleaseConflict } from './release-conflict';
@@ -12,6 +13,7 @@ import { defineSource } from './source';
 export type { CitationRecord } from './citation';
 export type { ClaimRecord } from './claim';
 export type { EditionRecord } from './edition';
+export type { JobRecord } from './job';
 export type { OutboxMailRecord } from './outbox-mail';
 export type { ReferenceRowRecord } from './reference-row';
 export type { ReleaseConflictRecord } from './release-conflict';
@@ -25,6 +27,7 @@ export const defineModels = (sequelize: Sequelize) => ({
 	claims: defineClaim(sequelize),
 	editionCounter: defineEditionCounter(sequelize),
 	editions: defineEdition(sequelize),
+	jobs: defineJob(sequelize),
 	outbox: defineOutboxMail(sequelize),
 	referenceRows: defineReferenceRow(sequelize),
 	releaseConflicts: defineReleaseConflict(sequelize),

@@ -1,6 +1,8 @@
-import { UniqueConstraintError, type Transaction } from 'sequelize';
+import { Op, QueryTypes, UniqueConstraintError, type Transaction } from 'sequelize';
 import type { Database } from '../connection';
 import type { OutboxMailRecord } from '../models';
+import { inTransaction } from '../transaction';
+import type { Lease } from './lease';
 
 /** A mail as it is queued. */
 export type QueuedMailRecord = Omit<
@@ -29,3 +31,78 @@ export async function addMail(
 		if (mail.once_key === null || !(error instanceof UniqueConstraintError)) throw error;
 	}
 }
+
+/**
+ * Takes the mail that has been due longest, for the time of a lease. Passes by what others take at the
+ * same moment: the dialect leaves SKIP LOCKED out, so that the query is written by hand.
+ */
+export const takeMail = (
+	database: Database,
+	now: Date,
+	lease: Lease
+): Promise<OutboxMailRecord | null> =>
+	inTransaction(database, async (transaction) => {
+		const [due] = await database.sequelize.query<{ id: string }>(
+			`SELECT id FROM outbox
+			WHERE sent_at IS NULL AND failed_at IS NULL AND due_at <= :now
+				AND (taken_until IS NULL OR taken_until <= :now)
+			ORDER BY due_at LIMIT 1 FOR UPDATE SKIP LOCKED`,
+			{ replacements: { now }, type: QueryTypes.SELECT, transaction }
+		);
+		if (!due) return null;
+		const mail = await database.models.outbox.findByPk(due.id, {
+			rejectOnEmpty: true,
+			transaction
+		});
+		await mail.update(
+			{
+				taken_by: lease.worker,
+				taken_until: lease.until,
+				attempts: (mail.get('attempts') as number) + 1
+			},
+			{ transaction }
+		);
+		return mail.get({ plain: true });
+	});
+
+/** What is told of a mail that was tried; only by the worker whose lease it is. */
+type Outcome = Partial<
+	Pick<
+		OutboxMailRecord,
+		'sent_at' | 'failed_at' | 'due_at' | 'last_error' | 'body_text' | 'body_html'
+	>
+>;
+
+/** Ends a lease with what came of it. Answers false when another worker has taken the mail meanwhile. */
+export async function giveBackMail(
+	{ models }: Database,
+	id: string,
+	worker: string,
+	outcome: Outcome
+): Promise<boolean> {
+	const [changed] = await models.outbox.update(
+		{ ...outcome, taken_by: null, taken_until: null },
+		{ where: { id, taken_by: worker } }
+	);
+	return changed > 0;
+}
+
+/** Mails that were given up, newest first, without their bodies. */
+export async function failedMails(
+	{ models }: Database,
+	limit: number
+): Promise<OutboxMailRecord[]> {
+	const found = await models.outbox.findAll({
+		attributes: { exclude: ['body_text', 'body_html'] },
+		where: { failed_at: { [Op.ne]: null } },
+		order: [['failed_at', 'DESC']],
+		limit
+	});
+	return found.map((one) => one.get({ plain: true }));
+}
+
+/** Throws away mails that were sent or given up before a time. Answers how many. */
+export const forgetMails = ({ models }: Database, before: Date): Promise<number> =>
+	models.outbox.destroy({
+		where: { [Op.or]: [{ sent_at: { [Op.lt]: before } }, { failed_at: { [Op.lt]: before } }] }
+	});
