@@ -6,6 +6,7 @@ export * from './jobs';
 export * from './makers';
 export * from './name-schemas';
 export * from './notices';
+export * from './people';
 export * from './readings';
 export * from './rows';
 export * from './tables';
