@@ -1,9 +1,14 @@
 import { setTimeout as pause } from 'node:timers/promises';
-import { DatabaseError, type Transaction } from 'sequelize';
+import { DatabaseError, Transaction } from 'sequelize';
 import type { Database } from './connection';
 import { asking } from './errors';
 
 export type { Transaction };
+
+export interface TransactionOptions {
+	/** Locks the rows that are met and not the gaps between them, where others may go on adding. */
+	readonly gapsOpen?: boolean;
+}
 
 const LOCK_WAIT_TIMEOUT = 1205;
 const DEADLOCK = 1213;
@@ -25,11 +30,13 @@ function lostARace(error: unknown): boolean {
  */
 export async function inTransaction<T>(
 	database: Database,
-	work: (transaction: Transaction) => Promise<T>
+	work: (transaction: Transaction) => Promise<T>,
+	{ gapsOpen = false }: TransactionOptions = {}
 ): Promise<T> {
+	const isolationLevel = gapsOpen ? Transaction.ISOLATION_LEVELS.READ_COMMITTED : undefined;
 	for (let attempt = 1; ; attempt += 1) {
 		try {
-			return await asking(() => database.sequelize.transaction(work));
+			return await asking(() => database.sequelize.transaction({ isolationLevel }, work));
 		} catch (error) {
 			if (attempt === ATTEMPTS || !lostARace(error)) throw error;
 			// Two that collided must not meet again in step.

@@ -1,11 +1,8 @@
 import type { z } from 'zod';
-import type { Clock } from '../clock';
-import type { Database } from '../db';
+import type { Ground } from '../ground';
 
 /** What a piece of work has in hand while it is done. */
-export interface JobRun<Payload> {
-	readonly database: Database;
-	readonly clock: Clock;
+export interface JobRun<Payload> extends Ground {
 	readonly id: string;
 	readonly payload: Payload;
 	/** For whom; null for what the product does of its own accord. */

@@ -1,6 +1,5 @@
-import type { Clock } from '../clock';
-import type { Database } from '../db';
 import { jobs } from '../db/repositories';
+import type { Ground } from '../ground';
 import { JobBrokenOffError, type Progress } from './kinds';
 
 /** Work is another's when its worker was not heard of for so long. */
@@ -21,9 +20,7 @@ export class HeldLease {
 	#ended: Ended | null = null;
 
 	constructor(
-		private readonly held: {
-			readonly database: Database;
-			readonly clock: Clock;
+		private readonly held: Ground & {
 			readonly id: string;
 			readonly worker: string;
 			/** Aborted when the worker ends. */

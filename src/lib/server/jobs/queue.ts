@@ -1,7 +1,7 @@
 import { randomBytes } from 'node:crypto';
-import type { Clock } from '../clock';
-import type { Database, Transaction } from '../db';
+import type { Transaction } from '../db';
 import { jobs } from '../db/repositories';
+import type { Ground } from '../ground';
 
 export interface Work {
 	readonly kind: string;
@@ -20,7 +20,7 @@ export interface Work {
  * @returns its id; null when work of the same key is on record already
  */
 export async function queueJob(
-	{ database, clock, transaction }: { database: Database; clock: Clock; transaction?: Transaction },
+	{ database, clock, transaction }: Ground & { readonly transaction?: Transaction },
 	{ kind, payload, user_id, dueAt, onceKey }: Work
 ): Promise<string | null> {
 	const now = clock();

@@ -1,5 +1,4 @@
-import type { Clock } from '../clock';
-import type { Database } from '../db';
+import type { Ground } from '../ground';
 import { queueJob } from './queue';
 
 /** Work that is done again and again, at even distances. */
@@ -20,21 +19,15 @@ export function lastDue({ every, at = 0 }: Repeated, now: Date): Date {
  * Queues what is due again, once for all workers. What was missed while no worker ran is made up for
  * once, not as often as it was missed.
  */
-export async function queueRepeated(
-	{ database, clock }: { database: Database; clock: Clock },
-	repeated: readonly Repeated[]
-): Promise<void> {
+export async function queueRepeated(ground: Ground, repeated: readonly Repeated[]): Promise<void> {
 	for (const one of repeated) {
-		const due = lastDue(one, clock());
-		await queueJob(
-			{ database, clock },
-			{
-				kind: one.kind,
-				payload: { due: due.toISOString() },
-				user_id: null,
-				dueAt: due,
-				onceKey: `${one.kind}@${due.toISOString()}`
-			}
-		);
+		const due = lastDue(one, ground.clock());
+		await queueJob(ground, {
+			kind: one.kind,
+			payload: { due: due.toISOString() },
+			user_id: null,
+			dueAt: due,
+			onceKey: `${one.kind}@${due.toISOString()}`
+		});
 	}
 }

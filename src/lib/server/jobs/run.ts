@@ -1,6 +1,5 @@
-import type { Clock } from '../clock';
-import type { Database } from '../db';
 import { jobs } from '../db/repositories';
+import type { Ground } from '../ground';
 import { HopelessJobError, type JobKind } from './kinds';
 import { HeldLease, LEASE_MS } from './lease';
 
@@ -13,9 +12,7 @@ type JobRecord = NonNullable<Awaited<ReturnType<typeof jobs.takeJob>>>;
 /** How long work waits after so many attempts in vain: 10 s, 40 s, 160 s and so on. */
 export const waitAfter = (attempts: number): number => FIRST_WAIT_MS * 4 ** (attempts - 1);
 
-export interface Working {
-	readonly database: Database;
-	readonly clock: Clock;
+export interface Working extends Ground {
 	readonly kinds: readonly JobKind[];
 	/** Names this worker among all others. */
 	readonly worker: string;

@@ -1,2 +1,4 @@
 /** Mail: queued in the transaction that causes it, sent by the worker. */
+export { RefusedMailError, smtpPost, type OutgoingMail, type Post } from './post';
 export { queueMail, type Causing, type Mail } from './queue';
+export { sendNext, type Sending, type Sent } from './send';

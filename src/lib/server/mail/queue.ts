@@ -1,18 +1,16 @@
 import { randomBytes } from 'node:crypto';
 import { letterFrame, letterOf, type MailData, type MailTemplate } from '../../text/en/mail';
 import type { MailKind } from '../../types';
-import type { Clock } from '../clock';
 import { config } from '../config';
-import type { Database, Transaction } from '../db';
+import type { Transaction } from '../db';
 import { outbox } from '../db/repositories';
+import type { Ground } from '../ground';
 import { formsOf } from './form';
 import { unsubscribeToken } from './unsubscribe';
 
 /** The transaction that causes a mail: without its commit there is none. */
-export interface Causing {
-	readonly database: Database;
+export interface Causing extends Ground {
 	readonly transaction: Transaction;
-	readonly clock: Clock;
 }
 
 export interface Mail<Template extends MailTemplate> {

@@ -1,6 +1,5 @@
-import type { Clock } from '../clock';
-import type { Database } from '../db';
 import { outbox } from '../db/repositories';
+import type { Ground } from '../ground';
 import { RefusedMailError, SEND_TIMEOUT_MS, type Post } from './post';
 
 /** Longer than a mail may take, so that it is not begun twice. */
@@ -14,9 +13,7 @@ const ERROR_LENGTH = 500;
 export const waitAfter = (attempts: number): number =>
 	Math.min(2 ** (attempts - 1), LONGEST_WAIT_MINUTES) * MINUTE_MS;
 
-export interface Sending {
-	readonly database: Database;
-	readonly clock: Clock;
+export interface Sending extends Ground {
 	readonly post: Post;
 	/** Names this worker among all others. */
 	readonly worker: string;

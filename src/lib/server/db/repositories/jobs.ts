@@ -47,27 +47,31 @@ export const takeJob = (
 	now: Date,
 	lease: Lease
 ): Promise<JobRecord | null> =>
-	inTransaction(database, async (transaction) => {
-		const [due] = await database.sequelize.query<{ id: string }>(
-			`SELECT id FROM jobs
+	inTransaction(
+		database,
+		async (transaction) => {
+			const [due] = await database.sequelize.query<{ id: string }>(
+				`SELECT id FROM jobs
 			WHERE state IN ('due', 'running') AND due_at <= :now AND kind IN (:kinds)
 				AND (taken_until IS NULL OR taken_until <= :now)
 			ORDER BY due_at LIMIT 1 FOR UPDATE SKIP LOCKED`,
-			{ replacements: { now, kinds }, type: QueryTypes.SELECT, transaction }
-		);
-		if (!due) return null;
-		const job = await database.models.jobs.findByPk(due.id, { rejectOnEmpty: true, transaction });
-		await job.update(
-			{
-				state: 'running',
-				taken_by: lease.worker,
-				taken_until: lease.until,
-				attempts: (job.get('attempts') as number) + 1
-			},
-			{ transaction }
-		);
-		return job.get({ plain: true });
-	});
+				{ replacements: { now, kinds }, type: QueryTypes.SELECT, transaction }
+			);
+			if (!due) return null;
+			const job = await database.models.jobs.findByPk(due.id, { rejectOnEmpty: true, transaction });
+			await job.update(
+				{
+					state: 'running',
+					taken_by: lease.worker,
+					taken_until: lease.until,
+					attempts: (job.get('attempts') as number) + 1
+				},
+				{ transaction }
+			);
+			return job.get({ plain: true });
+		},
+		{ gapsOpen: true }
+	);
 
 type Report = Partial<Pick<JobRecord, 'progress' | 'total' | 'checkpoint' | 'taken_until'>>;
 

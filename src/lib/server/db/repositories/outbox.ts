@@ -41,29 +41,33 @@ export const takeMail = (
 	now: Date,
 	lease: Lease
 ): Promise<OutboxMailRecord | null> =>
-	inTransaction(database, async (transaction) => {
-		const [due] = await database.sequelize.query<{ id: string }>(
-			`SELECT id FROM outbox
+	inTransaction(
+		database,
+		async (transaction) => {
+			const [due] = await database.sequelize.query<{ id: string }>(
+				`SELECT id FROM outbox
 			WHERE sent_at IS NULL AND failed_at IS NULL AND due_at <= :now
 				AND (taken_until IS NULL OR taken_until <= :now)
 			ORDER BY due_at LIMIT 1 FOR UPDATE SKIP LOCKED`,
-			{ replacements: { now }, type: QueryTypes.SELECT, transaction }
-		);
-		if (!due) return null;
-		const mail = await database.models.outbox.findByPk(due.id, {
-			rejectOnEmpty: true,
-			transaction
-		});
-		await mail.update(
-			{
-				taken_by: lease.worker,
-				taken_until: lease.until,
-				attempts: (mail.get('attempts') as number) + 1
-			},
-			{ transaction }
-		);
-		return mail.get({ plain: true });
-	});
+				{ replacements: { now }, type: QueryTypes.SELECT, transaction }
+			);
+			if (!due) return null;
+			const mail = await database.models.outbox.findByPk(due.id, {
+				rejectOnEmpty: true,
+				transaction
+			});
+			await mail.update(
+				{
+					taken_by: lease.worker,
+					taken_until: lease.until,
+					attempts: (mail.get('attempts') as number) + 1
+				},
+				{ transaction }
+			);
+			return mail.get({ plain: true });
+		},
+		{ gapsOpen: true }
+	);
 
 /** What is told of a mail that was tried; only by the worker whose lease it is. */
 type Outcome = Partial<
