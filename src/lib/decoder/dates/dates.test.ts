@@ -34,6 +34,11 @@ describe('a month and week', () => {
 		]);
 	});
 
+	it('has one meaning a year of the span that its layout allows', () => {
+		const { meanings } = readDate('gm-body-month-week', '01C', { years: [1964, 1966] });
+		expect(meanings.map(({ year }) => year)).toEqual([1964, 1965, 1966]);
+	});
+
 	it('keeps both calendar years of an autumn month, the usual first', () => {
 		const { meanings, detail } = readDate('gm-body-month-week', '10B', { year: 1969 });
 		expect(meanings.map(({ year, usual }) => [year, usual])).toEqual([
@@ -87,5 +92,30 @@ describe('a casting date', () => {
 			}
 		]);
 		expect(readDate('gm-casting', '? ? ?').fault?.code).toBe('too_open');
+	});
+});
+
+describe('what stands beside a date', () => {
+	it('never removes a reading: years that exclude every decade are passed over', () => {
+		const { meanings } = readDate('ford-casting', '6 B 10', { years: [1971, 1973] });
+		expect(meanings.map(({ year }) => year)).toEqual([1956, 1966, 1976, 1986]);
+	});
+
+	it('leaves the decade open when no year of the car’s is near, the nearest first', () => {
+		const { meanings, detail } = readDate('ford-casting', '3B10', { year: 1970 });
+		expect(meanings.map(({ year }) => year)).toEqual([1973, 1963, 1983]);
+		expect(detail).toContain('settles it');
+	});
+});
+
+describe('a day of the year', () => {
+	it('366 is a day of leap years alone', () => {
+		expect(readDate('rochester-day-of-year', '3668', { year: 1968 }).meanings[0]?.latest).toBe(
+			'1968-12-31'
+		);
+		expect(readDate('rochester-day-of-year', '3669', { year: 1969 }).fault).toEqual({
+			code: 'no_such_day',
+			message: '1969 has 365 days.'
+		});
 	});
 });

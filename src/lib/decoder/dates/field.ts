@@ -53,7 +53,7 @@ export function fieldOfDate(
 		return fieldOf(head, {
 			code: normalised,
 			outcome: 'not_listed',
-			detail: fault?.message ?? detail,
+			detail: (fault as NonNullable<typeof fault>).message,
 			values: { dates: format.dates, format: format.id }
 		});
 	const possible =

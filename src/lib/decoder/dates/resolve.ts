@@ -39,6 +39,7 @@ function nthDay(year: number, n: number): Told {
 	return oneDay(dayOfYear(year, n));
 }
 
+/** Within a month. Only a day or a week can come without a year. */
 function inMonth(year: number | null, month: number, { day, week }: Values): Told {
 	if (day !== undefined) {
 		const longest = daysInMonth(month, year);
@@ -51,10 +52,11 @@ function inMonth(year: number | null, month: number, { day, week }: Values): Tol
 		const span = year === null ? null : weekOfMonth(year, month, week);
 		return { span, words: text.weekOfMonth(year, month, week) };
 	}
-	const words = text.inMonth(year, month);
-	if (year === null) return { span: null, words };
-	const last = daysInMonth(month, year);
-	return { span: [dayNumber(year, month, 1), dayNumber(year, month, last)], words };
+	const own = year as number;
+	return {
+		span: [dayNumber(own, month, 1), dayNumber(own, month, daysInMonth(month, own))],
+		words: text.inMonth(own, month)
+	};
 }
 
 /**

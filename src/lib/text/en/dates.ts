@@ -112,6 +112,11 @@ export const datesText = {
 			'Month and year letters of Libbey-Owens-Ford; the letters of the year return every twelve years.'
 	},
 
+	nearest: (title: string, message: string) => `${title}. ${message}`,
+	noForm: (typed: string) =>
+		`${typed} fits none of the date forms that we know. That says nothing against the part.`,
+	why: (labels: readonly string[]) => `It fits the form: ${labels.join(', ')}.`,
+
 	/** Where a date leaves several intervals open. */
 	several: (words: readonly string[]): string => or(words),
 
