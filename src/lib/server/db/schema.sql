@@ -1,6 +1,20 @@
 -- The schema that the migrations make. Written by npm run db:migrate -- --dump; do not edit.
 SET FOREIGN_KEY_CHECKS = 0;
 
+CREATE TABLE `account_tokens` (
+  `hash` char(64) NOT NULL,
+  `purpose` varchar(16) NOT NULL,
+  `user_id` varchar(32) DEFAULT NULL,
+  `address` varchar(254) NOT NULL,
+  `detail` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`detail`)),
+  `created_at` datetime(3) NOT NULL,
+  `expires_at` datetime(3) NOT NULL,
+  PRIMARY KEY (`hash`),
+  KEY `expiry` (`expires_at`),
+  KEY `of_user` (`user_id`,`purpose`),
+  CONSTRAINT `account_tokens_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`) ON DELETE CASCADE
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
+
 CREATE TABLE `audit` (
   `number` int(10) unsigned NOT NULL,
   `hash_before` char(64) NOT NULL,
@@ -149,6 +163,14 @@ CREATE TABLE `outbox` (
   CONSTRAINT `outbox_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`) ON DELETE CASCADE
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
 
+CREATE TABLE `recovery_codes` (
+  `user_id` varchar(32) NOT NULL,
+  `hash` char(64) NOT NULL,
+  `used_at` datetime(3) DEFAULT NULL,
+  PRIMARY KEY (`user_id`,`hash`),
+  CONSTRAINT `recovery_codes_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`) ON DELETE CASCADE
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
+
 CREATE TABLE `reference_rows` (
   `row_key` varchar(80) NOT NULL,
   `version` int(10) unsigned NOT NULL,
@@ -238,11 +260,24 @@ CREATE TABLE `saved_reading_uses` (
   CONSTRAINT `saved_reading_uses_reading` FOREIGN KEY (`reading_id`) REFERENCES `saved_readings` (`id`) ON DELETE CASCADE
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
 
+CREATE TABLE `second_factors` (
+  `user_id` varchar(32) NOT NULL,
+  `sealed_secret` varchar(255) NOT NULL,
+  `created_at` datetime(3) NOT NULL,
+  `confirmed_at` datetime(3) DEFAULT NULL,
+  `last_step` int(10) unsigned NOT NULL DEFAULT 0,
+  PRIMARY KEY (`user_id`),
+  CONSTRAINT `second_factors_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`) ON DELETE CASCADE
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
+
 CREATE TABLE `sessions` (
   `id` varchar(64) NOT NULL,
   `user_id` varchar(32) NOT NULL,
-  `role` enum('member','moderator','administrator') NOT NULL,
+  `device` varchar(120) NOT NULL,
+  `way` varchar(16) NOT NULL,
+  `code_given_at` datetime(3) DEFAULT NULL,
   `created_at` datetime(3) NOT NULL,
+  `seen_at` datetime(3) NOT NULL,
   `expires_at` datetime(3) NOT NULL,
   `revoked_at` datetime(3) DEFAULT NULL,
   PRIMARY KEY (`id`),
@@ -290,6 +325,12 @@ CREATE TABLE `users` (
   `email_verified_at` datetime(3) DEFAULT NULL,
   `password_hash` varchar(255) DEFAULT NULL,
   `role` enum('member','moderator','administrator') NOT NULL DEFAULT 'member',
+  `areas` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL DEFAULT '[]' CHECK (json_valid(`areas`)),
+  `paused_until` datetime(3) DEFAULT NULL,
+  `pause_reason` varchar(300) DEFAULT NULL,
+  `consented_to` varchar(32) DEFAULT NULL,
+  `consented_at` datetime(3) DEFAULT NULL,
+  `demo` tinyint(1) NOT NULL DEFAULT 0,
   `version` int(10) unsigned NOT NULL DEFAULT 1,
   `created_at` datetime(3) NOT NULL,
   `deleted_at` datetime(3) DEFAULT NULL,

@@ -19,6 +19,11 @@ import { step as audit } from './202612010446-audit';
 import { step as sharedCounters } from './202612010447-shared-counters';
 import { step as outboxLease } from './202612010910-outbox-lease';
 import { step as jobsForPeople } from './202612010925-jobs-for-people';
+import { step as people } from './202612010931-people';
+import { step as sessionsOfPeople } from './202612010932-sessions-of-people';
+import { step as accountTokens } from './202612010933-account-tokens';
+import { step as secondFactors } from './202612010934-second-factors';
+import { step as recoveryCodes } from './202612010935-recovery-codes';
 
 /** Every migration by name, in order. Imported one by one so that they also work inside the server's build. */
 export const MIGRATIONS: readonly (readonly [name: string, step: SchemaStep])[] = [
@@ -41,5 +46,10 @@ export const MIGRATIONS: readonly (readonly [name: string, step: SchemaStep])[] 
 	['202612010446-audit', audit],
 	['202612010447-shared-counters', sharedCounters],
 	['202612010910-outbox-lease', outboxLease],
-	['202612010925-jobs-for-people', jobsForPeople]
+	['202612010925-jobs-for-people', jobsForPeople],
+	['202612010931-people', people],
+	['202612010932-sessions-of-people', sessionsOfPeople],
+	['202612010933-account-tokens', accountTokens],
+	['202612010934-second-factors', secondFactors],
+	['202612010935-recovery-codes', recoveryCodes]
 ];

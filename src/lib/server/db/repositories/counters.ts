@@ -1,0 +1,28 @@
+import { QueryTypes } from 'sequelize';
+import type { Database } from '../connection';
+
+/**
+ * Counts one more in a window of time, for every process and node alike, and answers how many that makes.
+ * One statement: nobody else's count comes in between.
+ */
+export async function countOne(
+	{ sequelize }: Database,
+	{ key, from, until }: { key: string; from: Date; until: Date }
+): Promise<number> {
+	const [counted] = await sequelize.query<{ used: number }>(
+		`INSERT INTO shared_counters (counter_key, window_from, used, expires_at)
+		VALUES (:key, :from, 1, :until)
+		ON DUPLICATE KEY UPDATE used = used + 1
+		RETURNING used`,
+		{ replacements: { key, from, until }, type: QueryTypes.SELECT }
+	);
+	if (!counted) throw new Error('The counter answered nothing.');
+	return counted.used;
+}
+
+/** Throws away counters of windows that have passed, some at a time. */
+export async function forgetCounters({ sequelize }: Database, now: Date): Promise<void> {
+	await sequelize.query('DELETE FROM shared_counters WHERE expires_at <= :now LIMIT 1000', {
+		replacements: { now }
+	});
+}
