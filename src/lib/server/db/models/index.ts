@@ -13,6 +13,7 @@ import { defineReleaseConflict } from './release-conflict';
 import { defineReleaseLoad } from './release-load';
 import { defineSecondFactor } from './second-factor';
 import { defineSession } from './session';
+import { defineSharedCounter } from './shared-counter';
 import { defineSource } from './source';
 import { defineUser } from './user';
 
@@ -29,6 +30,7 @@ export type { ReleaseConflictRecord } from './release-conflict';
 export type { ReleaseLoadRecord } from './release-load';
 export type { SecondFactorRecord } from './second-factor';
 export type { SessionRecord } from './session';
+export type { SharedCounterRecord } from './shared-counter';
 export type { SourceRecord } from './source';
 export type { UserRecord } from './user';
 export type { Versioned } from './versioned';
@@ -49,6 +51,7 @@ export const defineModels = (sequelize: Sequelize) => ({
 	releaseLoads: defineReleaseLoad(sequelize),
 	secondFactors: defineSecondFactor(sequelize),
 	sessions: defineSession(sequelize),
+	sharedCounters: defineSharedCounter(sequelize),
 	sources: defineSource(sequelize),
 	users: defineUser(sequelize)
 });

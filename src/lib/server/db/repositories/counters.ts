@@ -1,4 +1,4 @@
-import { QueryTypes } from 'sequelize';
+import { Op, QueryTypes } from 'sequelize';
 import type { Database } from '../connection';
 
 /**
@@ -20,9 +20,6 @@ export async function countOne(
 	return counted.used;
 }
 
-/** Throws away counters of windows that have passed, some at a time. */
-export async function forgetCounters({ sequelize }: Database, now: Date): Promise<void> {
-	await sequelize.query('DELETE FROM shared_counters WHERE expires_at <= :now LIMIT 1000', {
-		replacements: { now }
-	});
-}
+/** Throws away counters of windows that have passed. Answers how many. */
+export const forgetCounters = ({ models }: Database, now: Date): Promise<number> =>
+	models.sharedCounters.destroy({ where: { expires_at: { [Op.lte]: now } } });
