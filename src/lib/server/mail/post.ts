@@ -1,5 +1,3 @@
-import { createTransport } from 'nodemailer';
-
 /** A mail on its way out. */
 export interface OutgoingMail {
 	readonly to: string;
@@ -48,6 +46,8 @@ const isRefusal = ({ code, responseCode = 0 }: SendError): boolean =>
 export function smtpPost(smtpUrl: string, from: string): Post {
 	return {
 		async send(mail) {
+			// The processes that serve only queue.
+			const { createTransport } = await import('nodemailer');
 			const transport = createTransport({
 				url: smtpUrl,
 				connectionTimeout: CONNECTION_TIMEOUT_MS,
