@@ -20,7 +20,8 @@ const announcer = {
 export default {
 	preprocess: [announcer, vitePreprocess()],
 	kit: {
-		adapter: adapter({ out: 'build' }),
+		// What our own server tells the adapter stands under names of its own (scripts/server/application.mjs).
+		adapter: adapter({ out: 'build', envPrefix: 'ADAPTER_' }),
 		typescript: {
 			config: (config) => ({
 				...config,

@@ -8,6 +8,10 @@ import { ROOT } from './lib/project.mjs';
 import { sayError } from './lib/say-error.mjs';
 import { authSecret } from './lib/secrets.mjs';
 import { step } from './lib/steps.mjs';
+import { localOrigin } from './server/origin.mjs';
+
+const HOST = process.env.HOST || '127.0.0.1';
+const PORT = process.env.PORT || '5173';
 
 /** @type {import('node:child_process').ChildProcess | undefined} */
 let vite;
@@ -25,12 +29,21 @@ async function develop() {
 		await fillDatabase(database);
 		vite = spawn(
 			process.execPath,
-			['node_modules/vite/bin/vite.js', 'dev', ...process.argv.slice(2)],
+			[
+				'node_modules/vite/bin/vite.js',
+				'dev',
+				...['--host', HOST, '--port', PORT, '--strictPort'],
+				...process.argv.slice(2)
+			],
 			{
 				cwd: ROOT,
 				stdio: 'inherit',
 				env: {
 					...process.env,
+					HOST,
+					PORT,
+					ORIGIN: localOrigin(HOST, PORT),
+					AUTH_URL: localOrigin(HOST, PORT),
 					DATABASE_URL: database.url,
 					AUTH_SECRET: process.env.AUTH_SECRET || authSecret(),
 					DEMO: process.env.DEMO || 'on'

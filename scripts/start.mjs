@@ -10,6 +10,7 @@ import { sayError } from './lib/say-error.mjs';
 import { authSecret } from './lib/secrets.mjs';
 import { announce, seconds, step } from './lib/steps.mjs';
 import { startWorkerProcess } from './lib/worker.mjs';
+import { localOrigin } from './server/origin.mjs';
 import { checkPort, serve } from './server/serve.mjs';
 
 const LOOPBACK = /^(?:localhost|127(?:\.\d+){3}|::1)$/;
@@ -67,6 +68,7 @@ async function start() {
 	process.env.NODE_ENV = 'production';
 	process.env.DATABASE_URL = database.url;
 	process.env.AUTH_SECRET ||= authSecret();
+	process.env.ORIGIN ||= localOrigin(host, process.env.PORT || 3000);
 	// Made-up people only where nobody but this machine's user can meet them.
 	process.env.DEMO ||= database.own && LOOPBACK.test(host) ? 'on' : 'off';
 	// The terminal is for people; LOG_LEVEL=info shows each request.

@@ -21,10 +21,13 @@ const HANDOVER = Symbol.for('tallyplate.handover');
 export async function loadApplication(build) {
 	const entry = join(build, 'handler.js');
 	if (!existsSync(entry)) throw new Error(`There is no build in ${build}. Run: npm run build`);
-	// The adapter takes these from where the server leaves them.
-	process.env.ADDRESS_HEADER = VISITOR_HEADERS.address;
-	process.env.PROTOCOL_HEADER = VISITOR_HEADERS.protocol;
-	process.env.HOST_HEADER = VISITOR_HEADERS.host;
+	// The adapter takes these from where the server leaves them. It is not told ORIGIN: which name this
+	// server is called by is decided for each request, as on loopback there are several.
+	process.env.ADAPTER_ADDRESS_HEADER = VISITOR_HEADERS.address;
+	process.env.ADAPTER_PROTOCOL_HEADER = VISITOR_HEADERS.protocol;
+	process.env.ADAPTER_HOST_HEADER = VISITOR_HEADERS.host;
+	if (process.env.BODY_SIZE_LIMIT)
+		process.env.ADAPTER_BODY_SIZE_LIMIT = process.env.BODY_SIZE_LIMIT;
 	const { handler } = await import(pathToFileURL(entry).href);
 	/** @type {Handover | undefined} */
 	const handover = /** @type {any} */ (globalThis)[HANDOVER];

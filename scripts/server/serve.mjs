@@ -5,6 +5,7 @@ import { setTimeout as pause } from 'node:timers/promises';
 import { loadApplication } from './application.mjs';
 import { readClientFiles } from './client-files.mjs';
 import { createServer } from './create-server.mjs';
+import { localOrigin } from './origin.mjs';
 import { visitorAddress } from './visitor.mjs';
 
 /** Said when the address cannot be listened on. */
@@ -56,8 +57,14 @@ export async function checkPort(host, port) {
  */
 export async function serve({ build }) {
 	// Links rest on the port, so a free one is chosen before the application reads its configuration.
-	if (process.env.PORT === '0')
-		process.env.PORT = String(await checkPort(process.env.HOST || '127.0.0.1', 0));
+	if (process.env.PORT === '0') {
+		const host = process.env.HOST || '127.0.0.1';
+		process.env.PORT = String(await checkPort(host, 0));
+		// Nobody can have named an origin on a port that was not known.
+		process.env.ORIGIN ||= localOrigin(host, process.env.PORT);
+	}
+	// The sign-in library would take the name it is called by from the request.
+	if (process.env.ORIGIN) process.env.AUTH_URL ||= process.env.ORIGIN;
 	const application = await loadApplication(build);
 	const { config, log, handler, maskAddress } = application;
 	const { server, drain } = createServer({

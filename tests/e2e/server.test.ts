@@ -213,6 +213,8 @@ describe('the log', () => {
 describe('a wrong setting', () => {
 	it.each([
 		[{ DEMO: 'perhaps' }, 'DEMO is "perhaps"; expected on or off.'],
+		[{ PORT: '4999' }, 'ORIGIN is not set; expected a value, as this is production.'],
+		[{ AUTH_SECRET: '' }, 'AUTH_SECRET is not set; expected a value, as this is production.'],
 		[{ DATABASE_URL: 'postgres://me:hush@x/y' }, 'DATABASE_URL is not usable'],
 		[{ LOG_LEVEL: 'loud' }, 'LOG_LEVEL is "loud"; expected one of']
 	])('ends the start in one sentence: %o', async (environment, sentence) => {
@@ -227,7 +229,8 @@ describe('a wrong setting', () => {
 	it('says that the port is taken', async () => {
 		const starting = startBuiltServer({
 			DATABASE_URL: inject('builtDatabaseUrl'),
-			PORT: origin.port
+			PORT: origin.port,
+			ORIGIN: origin.origin
 		});
 		await expect(starting).rejects.toThrow(`Port ${origin.port} is taken on 127.0.0.1.`);
 	});

@@ -90,6 +90,26 @@ describe('readConfig', () => {
 		expect(message).toContain(`${name} is "${value}"; expected `);
 	});
 
+	it('needs an origin and a secret in production, and one name for both', () => {
+		expect(messageOf({ DATABASE_URL, NODE_ENV: 'production' })).toBe(
+			'ORIGIN is not set; expected a value, as this is production.\n' +
+				'AUTH_SECRET is not set; expected a value, as this is production.'
+		);
+		const production = {
+			DATABASE_URL,
+			NODE_ENV: 'production',
+			ORIGIN: 'https://tallyplate.example/',
+			AUTH_SECRET: 'x'.repeat(32)
+		};
+		expect(messageOf({ ...production, AUTH_URL: 'https://evil.example' })).toContain(
+			'AUTH_URL is "https://evil.example"; expected the value of ORIGIN.'
+		);
+		expect(read({ ...production, AUTH_URL: 'https://tallyplate.example' })).toMatchObject({
+			authUrl: 'https://tallyplate.example',
+			attemptsPerHour: 60
+		});
+	});
+
 	it('says that the database is missing', () => {
 		expect(messageOf({})).toMatch(/^DATABASE_URL is not set; expected an address such as/);
 	});

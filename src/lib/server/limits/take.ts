@@ -25,7 +25,7 @@ const usedUp = new Map<string, number>();
 const MOST_KEYS = 10_000;
 
 /** Addresses of people and machines are counted under a hash, so that no list of them comes about. */
-export const countedKey = (what: string, who: string): string =>
+const countedKey = (what: string, who: string): string =>
 	`${what}:${createHash('sha256').update(who).digest('base64url').slice(0, 22)}`;
 
 /**
@@ -52,6 +52,17 @@ export async function take(
 	if (usedUp.size >= MOST_KEYS) usedUp.clear();
 	usedUp.set(key, until);
 	throw tooOften();
+}
+
+/** Takes an attempt back that is not to count, as one that went well. */
+export async function giveBack(
+	{ database, clock }: Ground,
+	{ what, seconds }: Limit,
+	who: string
+): Promise<void> {
+	const length = seconds * 1000;
+	const from = new Date(Math.floor(clock().getTime() / length) * length);
+	await asking(() => counters.uncountOne(database, { key: countedKey(what, who), from }));
 }
 
 /** Counters of windows that have passed. */

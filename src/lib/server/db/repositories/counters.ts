@@ -20,6 +20,18 @@ export async function countOne(
 	return counted.used;
 }
 
+/** Counts one less in a window, where it is still on record. */
+export async function uncountOne(
+	{ sequelize }: Database,
+	{ key, from }: { key: string; from: Date }
+): Promise<void> {
+	await sequelize.query(
+		`UPDATE shared_counters SET used = used - 1
+		WHERE counter_key = :key AND window_from = :from AND used > 0`,
+		{ replacements: { key, from } }
+	);
+}
+
 /** Throws away counters of windows that have passed. Answers how many. */
 export const forgetCounters = ({ models }: Database, now: Date): Promise<number> =>
 	models.sharedCounters.destroy({ where: { expires_at: { [Op.lte]: now } } });
