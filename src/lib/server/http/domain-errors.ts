@@ -5,6 +5,11 @@ const KNOWN: Readonly<Record<string, readonly [status: 404 | 503, field: string]
 	unknown_edition: [404, 'edition'],
 	unknown_row: [404, 'row_key'],
 	unknown_source: [404, 'key'],
+	unknown_file: [404, 'id'],
+	unknown_job: [404, 'id'],
+	unknown_mail: [404, 'id'],
+	unknown_notice: [404, 'id'],
+	storage_away: [503, 'file'],
 	no_tables_yet: [503, 'edition'],
 	service_busy: [503, 'edition'],
 	database_away: [503, 'edition']

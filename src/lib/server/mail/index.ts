@@ -1,5 +1,6 @@
 /** Mail: queued in the transaction that causes it, sent by the worker. */
 export {
+	demoMailbox,
 	keptMail,
 	keptMails,
 	UnknownMailError,

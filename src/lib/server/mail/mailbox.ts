@@ -1,6 +1,7 @@
 import { readdir, readFile, stat } from 'node:fs/promises';
 import { join } from 'node:path';
 import type { AddressObject } from 'mailparser';
+import { config } from '../config';
 
 /** A mail of the demonstration, as it stands in a list. */
 export interface KeptMail {
@@ -57,6 +58,13 @@ async function parsed(folder: string, id: string): Promise<KeptMailInFull> {
 		html: mail.html || null,
 		unsubscribe: list?.unsubscribe?.url ?? null
 	};
+}
+
+/** The folder that a demonstration keeps its mail in. @throws {UnknownMailError} this is none */
+export function demoMailbox(): string {
+	const { demo, mailboxFolder } = config();
+	if (!demo || mailboxFolder === undefined) throw new UnknownMailError();
+	return mailboxFolder;
 }
 
 /** The mails of a mailbox folder, newest first. */
