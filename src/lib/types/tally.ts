@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { stampKindSchema, type StampKind } from './readings';
+import { stampKindSchema, type Reading, type StampKind } from './readings';
 
 /**
  * How a line of the tally came out.
@@ -72,15 +72,17 @@ export const tallyLineSchema = z.object({
 	/** What the result rests on, in a sentence. */
 	ground: z.string(),
 	left: tallySideSchema,
-	right: tallySideSchema,
+	/** Null where only one place says it: not looked at. */
+	right: tallySideSchema.nullable(),
 	/** Row keys that the result rests on. */
 	rows: z.array(z.string()).readonly()
 });
 export type TallyLine = z.infer<typeof tallyLineSchema>;
 
-/** A stamp of a car for the tally: what it was read to be, and where it sits. */
-export interface TallyStamp<Read> {
+/** A stamp of a car for the tally: where it sits, and what it was read to be. */
+export interface TallyStamp {
 	readonly kind: StampKind;
 	readonly place?: string;
-	readonly result: Read;
+	/** As `read` answered it; only readings of the first rank speak. */
+	readonly readings: readonly Reading[];
 }

@@ -15,6 +15,7 @@ export const amcEngineDayBuild = {
 	title: 'American Motors engine day build code',
 	maker: 'amc',
 	dates: 'unit_assembled',
+	unit: 'engine',
 	source: 'From memory',
 	years: [1967, 1981],
 	parts: [yearFigure(), monthFigures(), otherPart(text.engineLetter, LETTERS), dayFigures()],

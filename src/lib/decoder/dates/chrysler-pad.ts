@@ -12,6 +12,7 @@ export const chryslerPad = {
 	title: 'Chrysler engine pad: month and day',
 	maker: 'chrysler',
 	dates: 'unit_assembled',
+	unit: 'engine',
 	source: 'From memory',
 	years: [1955, 1980],
 	parts: [monthNumber(), dayNumberPart()],

@@ -12,6 +12,7 @@ export const fordAxleTag = {
 	title: 'Ford axle tag: year, month letter, day',
 	maker: 'ford',
 	dates: 'unit_assembled',
+	unit: 'axle',
 	source: 'Reference.com, How do you identify a Ford rear axle assembly',
 	years: [1960, 1980],
 	parts: [yearFigure(), monthLettersInDoubt(), dayNumberPart()],

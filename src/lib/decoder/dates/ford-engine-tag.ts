@@ -11,6 +11,7 @@ export const fordEngineTag = {
 	title: 'Ford engine tag: year and month letter',
 	maker: 'ford',
 	dates: 'unit_assembled',
+	unit: 'engine',
 	source: 'From memory',
 	years: [1963, 1980],
 	parts: [yearFigure(), monthLetters('ABCDEFGHJKLM')],

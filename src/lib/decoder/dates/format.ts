@@ -46,6 +46,8 @@ export interface DateFormat {
 	/** Null where makers share it. */
 	readonly maker: Maker | null;
 	readonly dates: Dated;
+	/** The unit that is dated, where the form itself tells. */
+	readonly unit?: 'engine' | 'gearbox' | 'axle';
 	/** Where the form is described, in a sentence; its row in table `layout` carries the citations. */
 	readonly source: string;
 	/** Calendar years in which such dates were stamped, as far as is known. */

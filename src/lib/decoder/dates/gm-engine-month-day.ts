@@ -14,6 +14,7 @@ export const gmEngineMonthDay = {
 	title: 'General Motors engine stamp: plant letter, month, day',
 	maker: 'gm',
 	dates: 'unit_assembled',
+	unit: 'engine',
 	source: 'brianesser.com, Engine code and plate notes',
 	years: [1955, 1980],
 	parts: [otherPart(text.plantLetter, LETTERS), monthFigures(), dayFigures()],

@@ -13,6 +13,7 @@ export const gmGearboxMonthDay = {
 	title: 'Chevrolet gearbox to 1966: plant letter, month, day',
 	maker: 'gm',
 	dates: 'unit_assembled',
+	unit: 'gearbox',
 	source: 'ChevelleStuff, Transmission identification 1966',
 	years: [1955, 1967],
 	parts: [

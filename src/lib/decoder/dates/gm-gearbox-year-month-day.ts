@@ -15,6 +15,7 @@ export const gmGearboxYearMonthDay = {
 	title: 'Chevrolet gearbox 1967–75: plant letter, year, month letter, day',
 	maker: 'gm',
 	dates: 'unit_assembled',
+	unit: 'gearbox',
 	source: 'ChevelleStuff, Transmission identification 1970',
 	years: [1966, 1975],
 	parts: [

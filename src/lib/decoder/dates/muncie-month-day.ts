@@ -13,6 +13,7 @@ export const muncieMonthDay = {
 	title: 'Muncie four-speed 1963–66: P, month, day',
 	maker: 'gm',
 	dates: 'unit_assembled',
+	unit: 'gearbox',
 	source: '2nd Gen Camaro Owners Group, Muncie 4-speed text',
 	years: [1963, 1967],
 	parts: [

@@ -14,6 +14,7 @@ export const muncieYearMonthDay = {
 	title: 'Muncie four-speed 1967–74: P, year, month letter, day',
 	maker: 'gm',
 	dates: 'unit_assembled',
+	unit: 'gearbox',
 	source: 'ChevelleStuff, Transmission identification 1970',
 	years: [1966, 1975],
 	parts: [

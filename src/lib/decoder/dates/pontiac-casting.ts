@@ -13,6 +13,7 @@ export const pontiacCasting = {
 	title: 'Pontiac casting date: month letter, day, year',
 	maker: 'gm',
 	dates: 'cast',
+	unit: 'engine',
 	source: 'AC Restorations, Other significant codes',
 	years: [1955, 1979],
 	parts: [monthLettersInDoubt(), dayNumberPart(), yearFigure()],

@@ -22,6 +22,7 @@ export const turbo400RunDay = {
 	title: 'Turbo Hydra-Matic 400: model year, code, day of the run',
 	maker: 'gm',
 	dates: 'unit_assembled',
+	unit: 'gearbox',
 	source: 'ChevelleStuff, Transmission identification 1970',
 	years: [1966, 1980],
 	parts: [modelYearFigures(), otherPart(text.unitCode, unitCodes()), dayOfRunPart()],

@@ -1,0 +1,247 @@
+/** From readings of a car's stamps to statements about the car. */
+import type {
+	FieldName,
+	Maker,
+	Reading,
+	ReadingField,
+	RowValues,
+	StampKind,
+	TallyAttribute,
+	TallyStamp,
+	Weight
+} from '../../types';
+import { normalise, textOf, type Cell } from '../engine/characters';
+import { tableId, type CompiledRow, type TableSet } from '../engine/table-set';
+import { FACTS_OF } from './facts';
+import { weightOf } from './weights';
+
+/** One value that a statement allows. */
+export interface Option {
+	readonly meaning: string;
+	readonly facts: RowValues;
+	/** Rows that say so: the firm and fair ones alone where there are any. */
+	readonly rows: readonly CompiledRow[];
+	/** Whether a firm or fair row says so. */
+	readonly supported: boolean;
+}
+
+/** Why a statement has no value, or not only those listed. */
+export type Gap = 'none' | 'not_listed' | 'not_used' | 'illegible' | 'contested' | 'undecided';
+
+/** What one field of one stamp says about one attribute of the car. */
+export interface Statement {
+	readonly attribute: TallyAttribute;
+	/** Index of the stamp. */
+	readonly stamp: number;
+	readonly kind: StampKind;
+	readonly place: string | null;
+	readonly maker: Maker | null;
+	readonly field: FieldName;
+	readonly label: string;
+	readonly code: string;
+	readonly cells: readonly Cell[];
+	readonly year: number | null;
+	readonly options: readonly Option[];
+	readonly gap: Gap;
+	readonly weight: Weight;
+}
+
+/** Attributes that are the characters themselves, with the field that carries them. */
+const BY_CHARACTERS: Partial<Record<FieldName, TallyAttribute>> = {
+	sequence_number: 'sequence_number',
+	order_number: 'order_number',
+	body_number: 'body_number',
+	paint: 'paint',
+	trim: 'trim',
+	roof: 'roof'
+};
+
+/** Fields whose facts are of the engine they stand on; other castings fit several engines. */
+const ENGINE_PARTS = ['block', 'engine'];
+
+const good = ({ strength }: CompiledRow): boolean => strength === 'firm' || strength === 'fair';
+
+function optionOf(
+	meaning: string,
+	facts: RowValues,
+	keys: readonly string[],
+	tables: TableSet
+): Option {
+	const rows = keys.flatMap((key) => tables.rows.get(key) ?? []);
+	const supported = rows.filter(good);
+	return {
+		meaning,
+		facts,
+		rows: supported.length > 0 ? supported : rows,
+		supported: supported.length > 0
+	};
+}
+
+function gapOf({ outcome, possible }: ReadingField): Gap {
+	switch (outcome) {
+		case 'found':
+			return possible.length > 0 ? 'undecided' : 'none';
+		case 'contested':
+		case 'illegible':
+		case 'not_listed':
+		case 'not_used':
+			return outcome;
+	}
+}
+
+function optionsOf(field: ReadingField, tables: TableSet): Option[] {
+	if (field.outcome === 'contested')
+		return field.alternatives.map(({ meaning, values, rows }) =>
+			optionOf(meaning, values, rows, tables)
+		);
+	if (field.possible.length > 0)
+		return field.possible.map(({ meaning, values }) => {
+			const own = field.rows.filter((key) => tables.rows.get(key)?.meaning === meaning);
+			return optionOf(meaning, values, own, tables);
+		});
+	return field.meaning === null ? [] : [optionOf(field.meaning, field.values, field.rows, tables)];
+}
+
+/** Facts of a field with what its own code says of the plant. */
+function withPlant(field: ReadingField, option: Option): Option {
+	if (field.name !== 'assembly_plant' || option.facts.plant_code !== undefined) return option;
+	return { ...option, facts: { ...option.facts, plant_code: field.code } };
+}
+
+const says = (option: Option, attribute: TallyAttribute): boolean =>
+	(FACTS_OF[attribute] ?? []).some((key) => option.facts[key] !== undefined);
+
+/** The attributes that a field's facts tell. */
+function attributesOf(field: ReadingField, options: readonly Option[]): TallyAttribute[] {
+	const { part } = options[0]?.facts ?? {};
+	if (field.name === 'casting_number' && !ENGINE_PARTS.includes(String(part))) return [];
+	const told = (Object.keys(FACTS_OF) as TallyAttribute[]).filter((attribute) =>
+		options.some((option) => says(option, attribute))
+	);
+	const own = OWN[field.name];
+	return own === undefined || told.includes(own) ? told : [...told, own];
+}
+
+/** The attribute that a field is about even when its tables say nothing. */
+const OWN: Partial<Record<FieldName, TallyAttribute>> = {
+	division: 'division',
+	line: 'line',
+	model_year: 'model_year',
+	assembly_plant: 'assembly_plant',
+	engine: 'engine',
+	unit_code: 'engine',
+	transmission: 'transmission',
+	axle: 'axle'
+};
+
+interface Place {
+	readonly stamp: TallyStamp;
+	readonly index: number;
+	readonly reading: Reading;
+}
+
+function statement(
+	attribute: TallyAttribute,
+	field: ReadingField,
+	options: readonly Option[],
+	{ stamp, index, reading }: Place
+): Statement {
+	return {
+		attribute,
+		stamp: index,
+		kind: stamp.kind,
+		place: stamp.place ?? null,
+		maker: reading.maker,
+		field: field.name,
+		label: field.label,
+		code: field.code,
+		cells: normalise(field.code).cells,
+		year: reading.model_year,
+		options,
+		gap: gapOf(field),
+		weight: weightOf(stamp.kind, stamp.place, reading.maker, attribute)
+	};
+}
+
+/** The last six characters of a partial serial, where the reading does not name them itself. */
+const SEQUENCE = 6;
+
+function* ofPartial(place: Place): Generator<Statement> {
+	const { fields } = place.reading;
+	if (fields.some(({ name }) => name === 'sequence_number')) return;
+	const partial = fields.find(({ name }) => name === 'partial_serial');
+	if (partial === undefined) return;
+	const cells = normalise(partial.code).cells.slice(-SEQUENCE);
+	if (cells.length < SEQUENCE) return;
+	const field = { ...partial, code: textOf(cells) };
+	yield statement('sequence_number', field, [], place);
+}
+
+/** Stamps whose form itself names the maker; others are read under a maker that was given. */
+const NAMING: readonly StampKind[] = ['serial', 'body_tag'];
+
+function* ofReading(place: Place, tables: TableSet): Generator<Statement> {
+	const { reading } = place;
+	if (reading.maker !== null && reading.layout !== null && NAMING.includes(place.stamp.kind)) {
+		const table = tables.tables.get(tableId(reading.maker, 'layout'));
+		const rows = (table?.byCode.get(reading.layout)?.all ?? []).map(({ row_key }) => row_key);
+		const option = optionOf(reading.layout_title, { maker: reading.maker }, rows, tables);
+		const [first] = reading.fields;
+		if (first !== undefined)
+			yield {
+				...statement('maker', first, [option], place),
+				label: reading.layout_title,
+				code: '',
+				cells: [],
+				gap: 'none'
+			};
+	}
+	for (const field of reading.fields) {
+		const characters = BY_CHARACTERS[field.name];
+		if (characters !== undefined) yield statement(characters, field, [], place);
+		const options = optionsOf(field, tables).map((option) => withPlant(field, option));
+		for (const attribute of attributesOf(field, options))
+			if (attribute !== 'maker')
+				yield statement(
+					attribute,
+					field,
+					options.filter((option) => says(option, attribute)),
+					place
+				);
+	}
+	yield* ofPartial(place);
+}
+
+/** Readings of the first rank: one, or several between which nothing on the stamp decides. */
+const firstRank = (readings: readonly Reading[]): readonly Reading[] =>
+	readings.filter(({ rank }) => rank === (readings[0] as Reading).rank);
+
+/** Statements that several equal readings make, as one that allows what any of them does. */
+function joined(parts: readonly Statement[], readings: number): Statement {
+	const [first] = parts as [Statement];
+	if (readings === 1) return first;
+	const options = new Map<string, Option>();
+	for (const part of parts)
+		for (const option of part.options)
+			options.set(`${option.meaning} ${JSON.stringify(option.facts)}`, option);
+	const one = parts.length === readings && options.size <= 1;
+	const gap = parts.find((part) => part.gap !== 'none')?.gap ?? (one ? 'none' : 'undecided');
+	return { ...first, options: [...options.values()], gap };
+}
+
+/**
+ * What the stamps of one car say about it, field by field. Only readings of the first rank speak; where several share it,
+ * a statement allows what any of them says and stays open.
+ */
+export function statementsOf(tables: TableSet, stamps: readonly TallyStamp[]): Statement[] {
+	return stamps.flatMap((stamp, index) => {
+		const readings = firstRank(stamp.readings);
+		const groups = new Map<string, Statement[]>();
+		for (const reading of readings)
+			for (const one of ofReading({ stamp, index, reading }, tables)) {
+				const id = `${one.attribute} ${one.field} ${one.label} ${one.code}`;
+				groups.set(id, [...(groups.get(id) ?? []), one]);
+			}
+		return [...groups.values()].map((parts) => joined(parts, readings.length));
+	});
+}
