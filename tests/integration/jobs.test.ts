@@ -6,6 +6,7 @@ import { VISITOR } from '../../src/lib/server/actor';
 import type { JobRecord } from '../../src/lib/server/db/models';
 import {
 	HopelessJobError,
+	NotNowError,
 	queueJob,
 	queueRepeated,
 	runNext,
@@ -93,7 +94,7 @@ describe('a job', () => {
 			async () => {
 				throw new Error('no luck');
 			},
-			{ gaveUp: async ({ payload, user_id }) => void told.push({ payload, user_id }) }
+			{ broken: async (how, { payload, user_id }) => void told.push({ how, payload, user_id }) }
 		);
 		const waits: number[] = [];
 		for (let attempt = 1; attempt < 5; attempt += 1) {
@@ -106,8 +107,20 @@ describe('a job', () => {
 		expect(waits).toEqual([10, 40, 160, 640]);
 		expect(told).toEqual([]);
 		expect(await run(broken)).toMatchObject({ result: 'failed' });
-		expect(told).toEqual([{ payload: { to: 10 }, user_id: ann.id }]);
+		expect(told).toEqual([{ how: 'failed', payload: { to: 10 }, user_id: ann.id }]);
 		expect(await onlyRow()).toMatchObject({ state: 'failed', last_error: 'no luck' });
+	});
+
+	it('that needs what is away is tried again as often as it takes', async () => {
+		await queue();
+		const away = counting(async () => {
+			throw new NotNowError('the store is away');
+		});
+		for (let attempt = 1; attempt <= 12; attempt += 1) {
+			expect(await run(away)).toMatchObject({ result: 'later' });
+			ahead(MINUTE);
+		}
+		expect(await onlyRow()).toMatchObject({ state: 'due', last_error: 'the store is away' });
 	});
 
 	it('that cannot be done is given up at once', async () => {
@@ -160,11 +173,17 @@ describe('an end', () => {
 		expect(await running).toMatchObject({ result: 'stopped' });
 	});
 
-	it('comes at once to work that waits', async () => {
-		await queue();
+	it('comes to work that waits before it has begun, and is told to what hangs on it', async () => {
+		await queue({ dueAt: new Date(clock().getTime() + DAY) });
 		await stopWork({ database, clock }, ann, (await mine()).id);
-		expect(await mine()).toMatchObject({ state: 'stopped' });
-		expect(await run(gated(0).kind)).toBeNull();
+		expect(await mine()).toMatchObject({ state: 'due', stopping: true });
+		const told: string[] = [];
+		const kind = counting(async () => void told.push('run'), {
+			broken: async (how) => void told.push(how)
+		});
+		expect(await run(kind)).toMatchObject({ result: 'stopped' });
+		expect(told).toEqual(['stopped']);
+		expect(await mine()).toMatchObject({ state: 'stopped', stopping: false });
 	});
 
 	it('holds for work whose worker died before it heard of it', async () => {
@@ -232,7 +251,7 @@ describe('workers', () => {
 		await queue();
 		const told: unknown[] = [];
 		const deadly = counting(() => new Promise(() => {}), {
-			gaveUp: async ({ payload }) => void told.push(payload)
+			broken: async (_how, { payload }) => void told.push(payload)
 		});
 		for (let attempt = 1; attempt <= 5; attempt += 1) {
 			void run(deadly, { worker: `dead ${attempt}`, heartbeatMs: HOUR });

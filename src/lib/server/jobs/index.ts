@@ -2,6 +2,7 @@
 export {
 	HopelessJobError,
 	JobBrokenOffError,
+	NotNowError,
 	UnknownJobError,
 	type JobKind,
 	type JobRun,

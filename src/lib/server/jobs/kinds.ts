@@ -31,8 +31,11 @@ export interface JobKind<Payload = unknown> {
 	readonly kind: string;
 	readonly payload: z.ZodType<Payload>;
 	run(run: JobRun<Payload>): Promise<void>;
-	/** Is told when the work was given up for good, after several attempts. */
-	gaveUp?(run: Pick<JobRun<Payload>, 'database' | 'clock' | 'payload' | 'user_id'>): Promise<void>;
+	/** Is told when the work has ended before its end: given up after several attempts, or stopped. */
+	broken?(
+		how: 'failed' | 'stopped',
+		run: Pick<JobRun<Payload>, 'database' | 'clock' | 'payload' | 'user_id'>
+	): Promise<void>;
 }
 
 /** Ends work that shall go no further; what it reported stays. */
@@ -45,6 +48,12 @@ export class JobBrokenOffError extends Error {
 export class HopelessJobError extends Error {
 	readonly code = 'job_hopeless';
 	override readonly name = 'HopelessJobError';
+}
+
+/** Something that the work needs is away: it is tried again in a while, as often as it takes. */
+export class NotNowError extends Error {
+	readonly code = 'job_not_now';
+	override readonly name = 'NotNowError';
 }
 
 /** There is no such work, or it is somebody else's. */

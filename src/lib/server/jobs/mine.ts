@@ -32,7 +32,7 @@ export async function workFor({ database }: Ground, actor: Actor): Promise<WorkI
 		id: job.id,
 		kind: job.kind,
 		state: job.state,
-		stopping: job.state === 'running' && job.stop_asked_at !== null,
+		stopping: job.stop_asked_at !== null && (job.state === 'running' || job.state === 'due'),
 		done: job.progress,
 		of: job.total,
 		again: job.state === 'due' && job.attempts > 0,

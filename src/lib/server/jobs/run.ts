@@ -1,10 +1,11 @@
 import { jobs } from '../db/repositories';
 import type { Ground } from '../ground';
-import { HopelessJobError, type JobKind } from './kinds';
-import { HeldLease, LEASE_MS } from './lease';
+import { HopelessJobError, NotNowError, type JobKind } from './kinds';
+import { HeldLease, LEASE_MS, type Ended } from './lease';
 
 const MOST_ATTEMPTS = 5;
 const FIRST_WAIT_MS = 10_000;
+const NOT_NOW_MS = 30_000;
 const ERROR_LENGTH = 500;
 
 type JobRecord = NonNullable<Awaited<ReturnType<typeof jobs.takeJob>>>;
@@ -57,15 +58,10 @@ type Told = Omit<Done, 'id' | 'kind'>;
 async function work(working: Working, job: JobRecord, kind: JobKind): Promise<Told> {
 	const { database, clock, worker, signal, failed = () => {}, heartbeatMs } = working;
 	const { id, user_id, checkpoint } = job;
-	const giveBack = (outcome: Parameters<typeof jobs.giveBackJob>[3]) =>
-		jobs.giveBackJob(database, id, worker, outcome);
-	if (job.stop_asked_at !== null) {
-		await giveBack({ state: 'stopped', finished_at: clock() });
-		return { result: 'stopped' };
-	}
+	if (job.stop_asked_at !== null) return endEarly(working, job, kind, 'stopped');
 	// Nobody reported how the last attempts ended: the work may be what its workers died of.
 	if (job.attempts > MOST_ATTEMPTS)
-		return giveUp(working, job, kind, new Error('Every attempt was broken off.'));
+		return endEarly(working, job, kind, 'failed', new Error('Every attempt was broken off.'));
 	const lease = new HeldLease({ database, clock, id, worker, signal, failed, heartbeatMs });
 	try {
 		const payload = kind.payload.parse(job.payload);
@@ -81,48 +77,64 @@ async function work(working: Working, job: JobRecord, kind: JobKind): Promise<To
 			report
 		});
 		await lease.release();
-		await giveBack({ state: 'done', finished_at: clock(), last_error: null });
-		return { result: 'done' };
 	} catch (error) {
 		await lease.release();
-		if (lease.ended === 'taken_over') return { result: 'taken_over' };
-		if (lease.ended === 'stopped') {
-			await giveBack({ state: 'stopped', finished_at: clock() });
-			return { result: 'stopped' };
-		}
-		if (lease.ended === 'worker_ends') {
-			// It did nothing wrong, so that the attempt does not count.
-			await giveBack({ state: 'due', attempts: job.attempts - 1 });
-			return { result: 'given_back' };
-		}
-		if (error instanceof HopelessJobError || job.attempts >= MOST_ATTEMPTS)
-			return giveUp(working, job, kind, error);
-		await giveBack({
-			state: 'due',
-			due_at: new Date(clock().getTime() + waitAfter(job.attempts)),
-			last_error: messageOf(error)
-		});
-		return { result: 'later', error };
+		return broken(working, job, kind, lease.ended, error);
 	}
+	await giveBack(working, job, { state: 'done', finished_at: clock(), last_error: null });
+	return { result: 'done' };
+}
+
+/** What becomes of work that did not come to its end. */
+async function broken(
+	working: Working,
+	job: JobRecord,
+	kind: JobKind,
+	ended: Ended | null,
+	error: unknown
+): Promise<Told> {
+	const now = working.clock().getTime();
+	if (ended === 'taken_over') return { result: 'taken_over' };
+	if (ended === 'stopped') return endEarly(working, job, kind, 'stopped');
+	if (ended === 'worker_ends') {
+		// It did nothing wrong, so that the attempt does not count.
+		await giveBack(working, job, { state: 'due', attempts: job.attempts - 1 });
+		return { result: 'given_back' };
+	}
+	const notNow = error instanceof NotNowError;
+	if (error instanceof HopelessJobError || (job.attempts >= MOST_ATTEMPTS && !notNow))
+		return endEarly(working, job, kind, 'failed', error);
+	await giveBack(working, job, {
+		state: 'due',
+		attempts: notNow ? job.attempts - 1 : job.attempts,
+		due_at: new Date(now + (notNow ? NOT_NOW_MS : waitAfter(job.attempts))),
+		last_error: messageOf(error)
+	});
+	return { result: 'later', error };
 }
 
 const messageOf = (error: unknown): string =>
 	String(error instanceof Error ? error.message : error).slice(0, ERROR_LENGTH);
 
-async function giveUp(
-	{ database, clock, worker }: Working,
+const giveBack = (
+	{ database, worker }: Working,
+	{ id }: JobRecord,
+	outcome: Parameters<typeof jobs.giveBackJob>[3]
+): Promise<boolean> => jobs.giveBackJob(database, id, worker, outcome);
+
+async function endEarly(
+	working: Working,
 	job: JobRecord,
 	kind: JobKind,
-	error: unknown
+	how: 'failed' | 'stopped',
+	error?: unknown
 ): Promise<Told> {
-	// First whoever waits for it: a worker that dies in between leaves the work to be given up again.
+	const { database, clock } = working;
+	// First whoever waits for it: a worker that dies in between leaves the work to be ended again.
 	const payload = kind.payload.safeParse(job.payload);
 	if (payload.success)
-		await kind.gaveUp?.({ database, clock, payload: payload.data, user_id: job.user_id });
-	await jobs.giveBackJob(database, job.id, worker, {
-		state: 'failed',
-		finished_at: clock(),
-		last_error: messageOf(error)
-	});
-	return { result: 'failed', error };
+		await kind.broken?.(how, { database, clock, payload: payload.data, user_id: job.user_id });
+	const last_error = error === undefined ? job.last_error : messageOf(error);
+	await giveBack(working, job, { state: how, finished_at: clock(), last_error });
+	return { result: how, ...(error !== undefined && { error }) };
 }

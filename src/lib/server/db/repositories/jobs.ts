@@ -132,18 +132,13 @@ export async function jobById({ models }: Database, id: string): Promise<JobReco
 	return found && found.get({ plain: true });
 }
 
-/** Asks for an end: at once for work that waits, else its worker is told. Answers false when it has ended. */
-export async function askJobToStop({ models }: Database, id: string, now: Date): Promise<boolean> {
-	const [waiting] = await models.jobs.update(
-		{ state: 'stopped', finished_at: now, stop_asked_at: now },
-		{ where: { id, state: 'due' } }
+/** Asks for an end. A worker brings it about: of work that waits too, so that what hangs on it is put right. */
+export async function askJobToStop({ models }: Database, id: string, now: Date): Promise<void> {
+	await models.jobs.update({ stop_asked_at: now }, { where: { id, state: ['due', 'running'] } });
+	await models.jobs.update(
+		{ due_at: now },
+		{ where: { id, state: 'due', due_at: { [Op.gt]: now } } }
 	);
-	if (waiting > 0) return true;
-	const [running] = await models.jobs.update(
-		{ stop_asked_at: now },
-		{ where: { id, state: 'running' } }
-	);
-	return running > 0;
 }
 
 /** Throws away work that ended before a time. Answers how much. */
