@@ -2,6 +2,7 @@ export * from './api';
 export * from './api-requests';
 export * from './dates';
 export * from './fields';
+export * from './files';
 export * from './jobs';
 export * from './makers';
 export * from './name-schemas';

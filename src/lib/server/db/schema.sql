@@ -98,18 +98,36 @@ CREATE TABLE `edition_counter` (
 CREATE TABLE `files` (
   `id` varchar(32) NOT NULL,
   `owner` varchar(32) DEFAULT NULL,
+  `name` varchar(200) CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_520_ci NOT NULL DEFAULT '',
+  `state` enum('arriving','checking','ready','refused') NOT NULL DEFAULT 'arriving',
+  `refusal` varchar(32) DEFAULT NULL,
   `storage_key` varchar(160) NOT NULL,
-  `media_type` varchar(100) NOT NULL,
-  `bytes` int(10) unsigned NOT NULL,
-  `sha256` char(64) NOT NULL,
+  `media_type` varchar(100) DEFAULT NULL,
+  `bytes` int(10) unsigned DEFAULT NULL,
+  `received` int(10) unsigned NOT NULL DEFAULT 0,
+  `kept_bytes` int(10) unsigned DEFAULT NULL,
+  `sha256` char(64) DEFAULT NULL,
   `width` smallint(5) unsigned DEFAULT NULL,
   `height` smallint(5) unsigned DEFAULT NULL,
+  `taken_at` varchar(32) DEFAULT NULL,
   `created_at` datetime(3) NOT NULL,
+  `touched_at` datetime(3) DEFAULT NULL,
   `deleted_at` datetime(3) DEFAULT NULL,
   PRIMARY KEY (`id`),
   UNIQUE KEY `storage_key` (`storage_key`),
-  KEY `of_owner` (`owner`),
+  KEY `files_of_owner` (`owner`,`created_at`),
+  KEY `unfinished` (`state`,`touched_at`),
+  KEY `to_remove` (`deleted_at`),
   CONSTRAINT `files_owner` FOREIGN KEY (`owner`) REFERENCES `users` (`id`) ON DELETE SET NULL
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
+
+CREATE TABLE `file_pieces` (
+  `file_id` varchar(32) NOT NULL,
+  `at_byte` int(10) unsigned NOT NULL,
+  `bytes` int(10) unsigned NOT NULL,
+  `object_key` varchar(160) NOT NULL,
+  PRIMARY KEY (`file_id`,`at_byte`),
+  CONSTRAINT `file_pieces_file` FOREIGN KEY (`file_id`) REFERENCES `files` (`id`) ON DELETE CASCADE
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
 
 CREATE TABLE `jobs` (

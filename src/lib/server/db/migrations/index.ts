@@ -24,6 +24,8 @@ import { step as sessionsOfPeople } from './202612010932-sessions-of-people';
 import { step as accountTokens } from './202612010933-account-tokens';
 import { step as secondFactors } from './202612010934-second-factors';
 import { step as recoveryCodes } from './202612010935-recovery-codes';
+import { step as filesChecked } from './202612010950-files-checked';
+import { step as filePieces } from './202612010951-file-pieces';
 
 /** Every migration by name, in order. Imported one by one so that they also work inside the server's build. */
 export const MIGRATIONS: readonly (readonly [name: string, step: SchemaStep])[] = [
@@ -51,5 +53,7 @@ export const MIGRATIONS: readonly (readonly [name: string, step: SchemaStep])[] 
 	['202612010932-sessions-of-people', sessionsOfPeople],
 	['202612010933-account-tokens', accountTokens],
 	['202612010934-second-factors', secondFactors],
-	['202612010935-recovery-codes', recoveryCodes]
+	['202612010935-recovery-codes', recoveryCodes],
+	['202612010950-files-checked', filesChecked],
+	['202612010951-file-pieces', filePieces]
 ];

@@ -5,6 +5,7 @@ import { defineCitation } from './citation';
 import { defineClaim } from './claim';
 import { defineEdition } from './edition';
 import { defineEditionCounter } from './edition-counter';
+import { defineFile, defineFilePiece } from './file';
 import { defineJob } from './job';
 import { defineOutboxMail } from './outbox-mail';
 import { defineRecoveryCode } from './recovery-code';
@@ -22,6 +23,7 @@ export type { AuditDetail, AuditRecord } from './audit-entry';
 export type { CitationRecord } from './citation';
 export type { ClaimRecord } from './claim';
 export type { EditionRecord } from './edition';
+export type { FilePieceRecord, FileRecord } from './file';
 export type { JobRecord } from './job';
 export type { OutboxMailRecord } from './outbox-mail';
 export type { RecoveryCodeRecord } from './recovery-code';
@@ -43,6 +45,8 @@ export const defineModels = (sequelize: Sequelize) => ({
 	claims: defineClaim(sequelize),
 	editionCounter: defineEditionCounter(sequelize),
 	editions: defineEdition(sequelize),
+	filePieces: defineFilePiece(sequelize),
+	files: defineFile(sequelize),
 	jobs: defineJob(sequelize),
 	outbox: defineOutboxMail(sequelize),
 	recoveryCodes: defineRecoveryCode(sequelize),

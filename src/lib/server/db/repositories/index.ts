@@ -3,6 +3,7 @@ export * as audit from './audit';
 export * as claims from './claims';
 export * as counters from './counters';
 export * as editions from './editions';
+export * as files from './files';
 export * as jobs from './jobs';
 export * as outbox from './outbox';
 export * as referenceRows from './reference-rows';
