@@ -2,10 +2,11 @@ import { createHmac, timingSafeEqual } from 'node:crypto';
 
 /**
  * What a signature is good for. One made for one purpose is worth nothing for another.
+ * - `session`: a session's cookie
  * - `unsubscribe`: no more mails of a kind
  * - `file`: the bytes of a file, until a time
  */
-export type Purpose = 'unsubscribe' | 'file';
+export type Purpose = 'session' | 'unsubscribe' | 'file';
 
 /** Signs a text: HMAC-SHA-256 in base64url, 43 characters. */
 export const signatureOf = (secret: string, purpose: Purpose, text: string): string =>

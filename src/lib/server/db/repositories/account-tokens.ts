@@ -53,7 +53,6 @@ export async function forgetTokensOf(
 	await models.accountTokens.destroy({ where: { user_id }, transaction });
 }
 
-/** Throws away what has lapsed. */
-export async function forgetLapsedTokens({ models }: Database, now: Date): Promise<void> {
-	await models.accountTokens.destroy({ where: { expires_at: { [Op.lte]: now } } });
-}
+/** Throws away what has lapsed. Answers how much that was. */
+export const forgetLapsedTokens = ({ models }: Database, now: Date): Promise<number> =>
+	models.accountTokens.destroy({ where: { expires_at: { [Op.lte]: now } } });

@@ -110,3 +110,25 @@ export const forgetMails = ({ models }: Database, before: Date): Promise<number>
 	models.outbox.destroy({
 		where: { [Op.or]: [{ sent_at: { [Op.lt]: before } }, { failed_at: { [Op.lt]: before } }] }
 	});
+
+/** Mails about somebody's account, oldest first, without their bodies. */
+export const mailsTo = async (
+	{ models }: Database,
+	user_id: string
+): Promise<Pick<OutboxMailRecord, 'recipient' | 'subject' | 'created_at' | 'sent_at'>[]> => {
+	const found = await models.outbox.findAll({
+		attributes: ['recipient', 'subject', 'created_at', 'sent_at'],
+		where: { user_id },
+		order: ['created_at', 'id']
+	});
+	return found.map((one) => one.get({ plain: true }));
+};
+
+/** Throws away all mails about somebody's account, sent or not. */
+export async function forgetMailsTo(
+	{ models }: Database,
+	user_id: string,
+	transaction: Transaction
+): Promise<void> {
+	await models.outbox.destroy({ where: { user_id }, transaction });
+}

@@ -6,6 +6,7 @@ import type { SessionRecord } from '../models';
 /** A session and whose it is, as a request needs it. */
 export interface SessionOfPerson {
 	readonly session: string;
+	readonly way: string;
 	readonly seen_at: Date;
 	readonly code_given_at: Date | null;
 	readonly id: string;
@@ -20,7 +21,7 @@ export interface SessionOfPerson {
 }
 
 const OF_PERSON = `
-	SELECT s.id AS session, s.seen_at, s.code_given_at,
+	SELECT s.id AS session, s.way, s.seen_at, s.code_given_at,
 		u.id, u.name, u.role, u.areas, u.paused_until, u.pause_reason, u.demo,
 		EXISTS (SELECT 1 FROM second_factors f
 			WHERE f.user_id = u.id AND f.confirmed_at IS NOT NULL) AS factor
@@ -90,6 +91,19 @@ export async function revokeSession(
 		{ where: { id, user_id, ...live(now) }, transaction }
 	);
 	return changed > 0;
+}
+
+/** Revokes a session, whose ever it is. */
+export async function revokeByHash(
+	{ models }: Database,
+	id: string,
+	now: Date,
+	transaction?: Transaction
+): Promise<void> {
+	await models.sessions.update(
+		{ revoked_at: now },
+		{ where: { id, revoked_at: null }, transaction }
+	);
 }
 
 /** Revokes all sessions of somebody, but for one where told. Answers how many. */

@@ -1,0 +1,28 @@
+import type { Transaction } from '../db';
+import { asking } from '../db';
+import { outbox, savedReadings } from '../db/repositories';
+import type { Ground } from '../ground';
+
+/** Something that a person has here beside the account itself: it is theirs to take along, and goes with them. */
+export interface Belonging {
+	/** As it stands in the copy of their data. */
+	readonly name: string;
+	readonly of: (ground: Ground, user_id: string) => Promise<unknown>;
+	readonly remove: (ground: Ground, transaction: Transaction, user_id: string) => Promise<void>;
+}
+
+/** All there are. Whoever keeps something for people enters it here. */
+export const BELONGINGS: readonly Belonging[] = [
+	{
+		name: 'saved_readings',
+		of: ({ database }, user_id) => asking(() => savedReadings.readingsOf(database, user_id)),
+		remove: ({ database }, transaction, user_id) =>
+			savedReadings.forgetReadingsOf(database, user_id, transaction)
+	},
+	{
+		name: 'mails',
+		of: ({ database }, user_id) => asking(() => outbox.mailsTo(database, user_id)),
+		remove: ({ database }, transaction, user_id) =>
+			outbox.forgetMailsTo(database, user_id, transaction)
+	}
+];
