@@ -1,6 +1,6 @@
 /**
- * The assembly date struck on the pad of a General Motors engine: plant letter, month and day, no year, as T0830.
- * Source: brianesser.com, "Engine code and plate notes"; row `gm-engine-month-day` of table `layout` cites all.
+ * The assembly date struck on the pad of a General Motors engine: plant letter, month and day, no year, as V0525.
+ * Source: Drivin’ It Home, "Engine codes"; row `gm-engine-month-day` of table `layout` cites all.
  */
 import { LETTERS } from '../engine/characters';
 import { datesText } from '../../text/en/dates';
@@ -15,9 +15,9 @@ export const gmEngineMonthDay = {
 	maker: 'gm',
 	dates: 'unit_assembled',
 	unit: 'engine',
-	source: 'brianesser.com, Engine code and plate notes',
+	source: 'Drivin’ It Home, Engine codes',
 	years: [1955, 1980],
 	parts: [otherPart(text.plantLetter, LETTERS), monthFigures(), dayFigures()],
 	remark: datesText.remarks.noYear,
-	example: { text: 'T0830', year: 1970, earliest: '1969-08-30', latest: '1969-08-30' }
+	example: { text: 'V0525', year: 1970, earliest: '1970-05-25', latest: '1970-05-25' }
 } as const satisfies DateFormat;

@@ -75,22 +75,31 @@ export function tell(values: Values, year: number | null, dayZero: number): Told
 
 const LISTED = 3;
 
+interface Named {
+	readonly span: DaySpan | null;
+	readonly words: string;
+}
+
+/** Two or three by name, more as a span. */
+function wordsOf(told: readonly Named[]): string {
+	const names = [...new Set(told.map(({ words }) => words))];
+	return names.length <= LISTED
+		? text.or(names)
+		: text.between(names[0] as string, names[names.length - 1] as string);
+}
+
 /** One meaning of combinations that differ only in what is unread: the hull of their days. */
-export function together(
-	told: readonly { readonly span: DaySpan | null; readonly words: string }[],
-	year: number | null,
-	usual: boolean
-): DateMeaning {
-	const sorted = [...told].sort((a, b) => (a.span?.[0] ?? 0) - (b.span?.[0] ?? 0));
-	const names = [...new Set(sorted.map(({ words }) => words))];
-	const words =
-		names.length <= LISTED
-			? text.or(names)
-			: text.between(names[0] as string, names[names.length - 1] as string);
-	const spans = sorted.flatMap(({ span }) => (span === null ? [] : [span]));
-	const [first] = spans;
-	if (first === undefined) return { earliest: null, latest: null, words, year, usual };
+export function together(told: readonly Named[], year: number | null, usual: boolean): DateMeaning {
+	if (year === null) return { earliest: null, latest: null, words: wordsOf(told), year, usual };
+	const spans = told.map(({ span }) => span as DaySpan);
+	const earliest = Math.min(...spans.map(([from]) => from));
 	const latest = Math.max(...spans.map(([, to]) => to));
-	const own = calendarDay(first[0]).year;
-	return { earliest: isoDay(first[0]), latest: isoDay(latest), words, year: own, usual };
+	const sorted = [...told].sort((a, b) => (a.span as DaySpan)[0] - (b.span as DaySpan)[0]);
+	return {
+		earliest: isoDay(earliest),
+		latest: isoDay(latest),
+		words: wordsOf(sorted),
+		year: calendarDay(earliest).year,
+		usual
+	};
 }

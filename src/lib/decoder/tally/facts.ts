@@ -11,8 +11,7 @@ export interface Company {
 }
 
 /** The facts that tell an attribute, in the order in which a side is described. */
-export const FACTS_OF: Partial<Record<TallyAttribute, readonly (keyof Facts | 'maker')[]>> = {
-	maker: ['maker'],
+export const FACTS_OF = {
 	division: ['division'],
 	model_year: ['model_year'],
 	line: ['line'],
@@ -29,7 +28,9 @@ export const FACTS_OF: Partial<Record<TallyAttribute, readonly (keyof Facts | 'm
 	],
 	transmission: ['transmission', 'speeds'],
 	axle: ['ratio', 'locking']
-};
+} as const satisfies Partial<Record<TallyAttribute, readonly (keyof Facts)[]>>;
+/** Attributes that are told by facts of rows; the others are the characters themselves, or dates. */
+export type FactAttribute = keyof typeof FACTS_OF;
 
 /** Equal, different, or null where a side does not say. */
 function equal(left: RowValues, right: RowValues, key: string): Truth {

@@ -69,23 +69,26 @@ const tells = (line: TallyLine): number => TELLING.indexOf(line.result);
 const lineKey = ({ left, right, reason }: TallyLine): string =>
 	JSON.stringify([{ ...left, stamp: null }, right && { ...right, stamp: null }, reason]);
 
+/** By code unit, as everything in an edition is ordered. */
+const order = (a: string, b: string): number => Number(a > b) - Number(a < b);
+
 /** One line for an attribute that a pair of stamps both tell. */
 function bestLine(
 	ones: readonly Statement[],
 	others: readonly Statement[],
 	tables: TableSet,
 	company: Company
-): TallyLine | null {
+): TallyLine {
 	const lines = ones.flatMap((one) => others.map((other) => pairLine(one, other, tables, company)));
 	const sorted = lines
 		.map((line) => ({ line, key: lineKey(line) }))
-		.sort((a, b) => tells(a.line) - tells(b.line) || (a.key < b.key ? -1 : 1));
-	return sorted[0]?.line ?? null;
+		.sort((a, b) => tells(a.line) - tells(b.line) || order(a.key, b.key));
+	return (sorted[0] as (typeof sorted)[number]).line;
 }
 
 /** An attribute that one stamp alone tells. */
 function lonely(statements: readonly Statement[]): TallyLine {
-	const [first] = [...statements].sort((a, b) => (sortKey(a) < sortKey(b) ? -1 : 1)) as [Statement];
+	const [first] = [...statements].sort((a, b) => order(sortKey(a), sortKey(b))) as [Statement];
 	return {
 		attribute: first.attribute,
 		result: 'not_looked_at',
@@ -110,10 +113,7 @@ function* linesOf(tables: TableSet, stamps: readonly TallyStamp[]): Generator<Ta
 		const [only] = groups;
 		if (only !== undefined && groups.length === 1) yield lonely(only);
 		for (const [index, one] of groups.entries())
-			for (const other of groups.slice(index + 1)) {
-				const line = bestLine(one, other, tables, company);
-				if (line !== null) yield line;
-			}
+			for (const other of groups.slice(index + 1)) yield bestLine(one, other, tables, company);
 	}
 	const dates = dateStatementsOf(tables, stamps);
 	for (const [index, one] of dates.entries())
@@ -136,7 +136,7 @@ export function tallyStamps(tables: TableSet, stamps: readonly TallyStamp[]): Ta
 			(a, b) =>
 				TALLY_ATTRIBUTES.indexOf(a.line.attribute) - TALLY_ATTRIBUTES.indexOf(b.line.attribute) ||
 				tells(a.line) - tells(b.line) ||
-				(a.key < b.key ? -1 : 1)
+				order(a.key, b.key)
 		)
 		.map(({ line }) => line);
 }

@@ -14,8 +14,8 @@ export interface LeadTime {
 function holds(row: CompiledRow, { division, year }: DateStatement): boolean {
 	if (row.division.length > 0 && (division === null || !row.division.includes(division)))
 		return false;
-	if (row.years_from === null || row.years_to === null) return true;
-	return year !== null && row.years_from <= year && year <= row.years_to;
+	if (row.years_from === null) return true;
+	return year !== null && row.years_from <= year && year <= (row.years_to as number);
 }
 
 /**

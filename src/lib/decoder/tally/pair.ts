@@ -81,7 +81,7 @@ function besideRows(left: Statement, right: Statement, company: Company, tables:
 					String(one.facts.displacement_cuin),
 					String(other.facts.displacement_cuin)
 				)
-				.flatMap((key) => tables.rows.get(key) ?? [])
+				.map((key) => tables.rows.get(key) as CompiledRow)
 		)
 	);
 }
@@ -93,10 +93,11 @@ function offers(
 	company: Company
 ): readonly string[] {
 	const { attribute } = left;
-	return [
-		...neighborsOf(left, right, attribute, tables, company),
-		...neighborsOf(right, left, attribute, tables, company)
-	].map(({ code, place }) => text.neighbor(code, place));
+	const near = (side: Statement, other: Statement) =>
+		neighborsOf(side, other, attribute, tables, company).map(({ code, place }) =>
+			text.neighbor(code, side.label, place)
+		);
+	return [...near(left, right), ...near(right, left)];
 }
 
 /** Two or three offers help, more do not. */

@@ -12,7 +12,7 @@ import type {
 } from '../../types';
 import { normalise, textOf, type Cell } from '../engine/characters';
 import { tableId, type CompiledRow, type TableSet } from '../engine/table-set';
-import { FACTS_OF } from './facts';
+import { FACTS_OF, type FactAttribute } from './facts';
 import { weightOf } from './weights';
 
 /** One value that a statement allows. */
@@ -108,14 +108,14 @@ function withPlant(field: ReadingField, option: Option): Option {
 	return { ...option, facts: { ...option.facts, plant_code: field.code } };
 }
 
-const says = (option: Option, attribute: TallyAttribute): boolean =>
-	(FACTS_OF[attribute] ?? []).some((key) => option.facts[key] !== undefined);
+const says = (option: Option, attribute: FactAttribute): boolean =>
+	FACTS_OF[attribute].some((key) => option.facts[key] !== undefined);
 
 /** The attributes that a field's facts tell. */
-function attributesOf(field: ReadingField, options: readonly Option[]): TallyAttribute[] {
+function attributesOf(field: ReadingField, options: readonly Option[]): FactAttribute[] {
 	const { part } = options[0]?.facts ?? {};
 	if (field.name === 'casting_number' && !ENGINE_PARTS.includes(String(part))) return [];
-	const told = (Object.keys(FACTS_OF) as TallyAttribute[]).filter((attribute) =>
+	const told = (Object.keys(FACTS_OF) as FactAttribute[]).filter((attribute) =>
 		options.some((option) => says(option, attribute))
 	);
 	const own = OWN[field.name];
@@ -123,7 +123,7 @@ function attributesOf(field: ReadingField, options: readonly Option[]): TallyAtt
 }
 
 /** The attribute that a field is about even when its tables say nothing. */
-const OWN: Partial<Record<FieldName, TallyAttribute>> = {
+const OWN: Partial<Record<FieldName, FactAttribute>> = {
 	division: 'division',
 	line: 'line',
 	model_year: 'model_year',
@@ -201,13 +201,12 @@ function* ofReading(place: Place, tables: TableSet): Generator<Statement> {
 		if (characters !== undefined) yield statement(characters, field, [], place);
 		const options = optionsOf(field, tables).map((option) => withPlant(field, option));
 		for (const attribute of attributesOf(field, options))
-			if (attribute !== 'maker')
-				yield statement(
-					attribute,
-					field,
-					options.filter((option) => says(option, attribute)),
-					place
-				);
+			yield statement(
+				attribute,
+				field,
+				options.filter((option) => says(option, attribute)),
+				place
+			);
 	}
 	yield* ofPartial(place);
 }

@@ -106,8 +106,8 @@ export const tallyText = {
 		`Read as ${listed([agrees, ...others]).replace(/ and (?!.* and )/, ' or ')}. As ${agrees} it is the same car; as ${listed(others).replace(/ and (?!.* and )/, ' or ')} it is another.`,
 	lookAlike: ({ place, left, right }: { place: number; left: string; right: string }) =>
 		`They differ in one place only, ${left} against ${right}, which are easily taken for one another: look again at character ${place}.`,
-	neighbor: (code: string, place: number) =>
-		`${code} would agree: look again at character ${place}.`,
+	neighbor: (code: string, label: string, place: number) =>
+		`${code} as ${lower(label)} would agree: look again at character ${place}.`,
 
 	dates: {
 		agree: (sort: 'hard' | 'soft' | 'window', rule: boolean) => {
@@ -117,7 +117,8 @@ export const tallyText = {
 				: 'The dates agree: no later than the other.';
 		},
 		open: 'A year, or the form of a date, is open: what gives it settles it.',
-		decade: 'The decade is open: the casting or part number settles it.',
+		decade:
+			'One of the dates can be of more than one year: the casting or part number, or what else gives the year, settles it.',
 		reaches: 'The days that the dates can be overlap: the order cannot be told.',
 		early: (least: number, most: number) =>
 			`At least ${ofDays(least)} before the other, where ${most} are usual at most. Unusual, not impossible: parts sat in stores.`,
