@@ -1,6 +1,5 @@
-import type { Transaction } from '../db';
-import { asking } from '../db';
-import { outbox, savedReadings } from '../db/repositories';
+import { asking, type Transaction } from '../db';
+import { jobs, outbox, savedReadings } from '../db/repositories';
 import type { Ground } from '../ground';
 
 /** Something that a person has here beside the account itself: it is theirs to take along, and goes with them. */
@@ -11,6 +10,8 @@ export interface Belonging {
 	readonly remove: (ground: Ground, transaction: Transaction, user_id: string) => Promise<void>;
 }
 
+const MOST = 1000;
+
 /** All there are. Whoever keeps something for people enters it here. */
 export const BELONGINGS: readonly Belonging[] = [
 	{
@@ -18,6 +19,15 @@ export const BELONGINGS: readonly Belonging[] = [
 		of: ({ database }, user_id) => asking(() => savedReadings.readingsOf(database, user_id)),
 		remove: ({ database }, transaction, user_id) =>
 			savedReadings.forgetReadingsOf(database, user_id, transaction)
+	},
+	{
+		name: 'background_work',
+		of: async ({ database }, user_id) =>
+			(await asking(() => jobs.jobsFor(database, user_id, MOST))).map(
+				({ kind, state, created_at, finished_at }) => ({ kind, state, created_at, finished_at })
+			),
+		remove: ({ database }, transaction, user_id) =>
+			jobs.forgetJobsOf(database, user_id, transaction)
 	},
 	{
 		name: 'mails',

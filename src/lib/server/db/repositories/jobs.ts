@@ -144,3 +144,12 @@ export async function askJobToStop({ models }: Database, id: string, now: Date):
 /** Throws away work that ended before a time. Answers how much. */
 export const forgetJobs = ({ models }: Database, before: Date): Promise<number> =>
 	models.jobs.destroy({ where: { finished_at: { [Op.lt]: before } } });
+
+/** Throws away all work for somebody, done or not. */
+export async function forgetJobsOf(
+	{ models }: Database,
+	user_id: string,
+	transaction: Transaction
+): Promise<void> {
+	await models.jobs.destroy({ where: { user_id }, transaction });
+}
