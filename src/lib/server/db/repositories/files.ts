@@ -132,11 +132,12 @@ export async function forgetPieces(
 export async function deleteFile(
 	{ models }: Database,
 	{ id, owner }: { id: string; owner: string },
-	now: Date
+	now: Date,
+	transaction: Transaction
 ): Promise<boolean> {
 	const [changed] = await models.files.update(
 		{ deleted_at: now },
-		{ where: { id, owner, deleted_at: null } }
+		{ where: { id, owner, deleted_at: null }, transaction }
 	);
 	return changed > 0;
 }
@@ -172,6 +173,27 @@ export async function deletedFiles({ models }: Database, limit: number): Promise
 	const found = await models.files.findAll({
 		where: { deleted_at: { [Op.ne]: null } },
 		order: ['deleted_at'],
+		limit
+	});
+	return found.map((one) => one.get({ plain: true }));
+}
+
+/** Files that were checked, and whose pieces are still on record. */
+export async function filesWithLeftovers(
+	{ models }: Database,
+	limit: number
+): Promise<FileRecord[]> {
+	const pieces = await models.filePieces.findAll({
+		attributes: ['file_id'],
+		group: 'file_id',
+		raw: true
+	});
+	const found = await models.files.findAll({
+		where: {
+			id: (pieces as unknown as FilePieceRecord[]).map(({ file_id }) => file_id),
+			state: ['ready', 'refused'],
+			deleted_at: null
+		},
 		limit
 	});
 	return found.map((one) => one.get({ plain: true }));
