@@ -110,6 +110,14 @@ describe('a date alone', () => {
 		expect(layouts('9C15', { maker: 'ford' }, cited)[1]?.[1]).toBe(2);
 	});
 
+	it('puts a form after others when it was not in use in any year that the date can be of', () => {
+		expect(layouts('C9')).toEqual([
+			['ford-part-year', 1],
+			['carter-month-year', 1],
+			['rochester-month-year', 3]
+		]);
+	});
+
 	it('puts what makers share after the maker’s own', () => {
 		const ids = layouts('71', { maker: 'chrysler' }).map(([id]) => id);
 		expect(ids).toEqual(['chrysler-pad', 'week-year', 'part-month-year']);

@@ -43,16 +43,21 @@ function fitting(readings: readonly DateReading[], context: ReadContext): readon
 	return own.length > 0 ? own : fit;
 }
 
-/** What readings are ordered by: the maker's own formats, those of the year, the better supported. */
-function orderOf(format: DateFormat, tables: TableSet, context: ReadContext): readonly number[] {
-	const { year } = context;
+/** What readings are ordered by: the maker's own formats, those of the years, the better supported. */
+function orderOf(
+	{ format, meanings }: DateReading,
+	tables: TableSet,
+	context: ReadContext
+): readonly number[] {
 	const [from, to] = format.years;
-	const inYears = year === undefined || (year >= from && year - 1 <= to);
+	const { year } = context;
+	const ofCar = year === undefined || (year >= from && year - 1 <= to);
+	const inYears = meanings.some((one) => one.year === null || (one.year >= from && one.year <= to));
 	const rows = formatRows(format, tables);
 	const strength = rows.length === 0 ? 'not_rated' : strongest(rows).strength;
 	return [
 		format.maker === (makerGiven(context) ?? format.maker) ? 0 : 1,
-		inYears ? 0 : 1,
+		ofCar && inYears ? 0 : 1,
 		STRENGTHS.indexOf(strength)
 	];
 }
@@ -90,7 +95,7 @@ export function readDateAlone(
 		(format) => field === undefined || dateFieldName(format) === field
 	).map((format) => readIn(format, typed, year === undefined ? {} : { year }));
 	const sorted = fitting(all, context)
-		.map((reading) => ({ reading, order: orderOf(reading.format, tables, context) }))
+		.map((reading) => ({ reading, order: orderOf(reading, tables, context) }))
 		.sort((a, b) => compare(a.order, b.order));
 	const readings: Reading[] = [];
 	for (const [index, { reading, order }] of sorted.slice(0, MOST).entries()) {

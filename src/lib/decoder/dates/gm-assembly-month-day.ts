@@ -5,7 +5,7 @@
  */
 import { datesText } from '../../text/en/dates';
 import type { DateFormat } from './format';
-import { dayFigures, monthFigures } from './parts';
+import { struckMonthAndDay } from './parts';
 
 export const gmAssemblyMonthDay = {
 	id: 'gm-assembly-month-day',
@@ -14,7 +14,7 @@ export const gmAssemblyMonthDay = {
 	dates: 'unit_assembled',
 	source: 'CarTech, Chevelle Restoration and Authenticity Guide 1970–1972',
 	years: [1955, 1980],
-	parts: [monthFigures(), dayFigures()],
+	parts: [...struckMonthAndDay()],
 	remark: datesText.remarks.noYear,
 	example: { text: '0525', year: 1970, earliest: '1970-05-25', latest: '1970-05-25' }
 } as const satisfies DateFormat;

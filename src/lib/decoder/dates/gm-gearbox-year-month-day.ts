@@ -1,8 +1,8 @@
 /**
  * The serial of Chevrolet's other gearboxes (three-speed, Saginaw, Powerglide, Turbo Hydra-Matic 350): plant letter, year
- * figure, month letter, day, D or N for the shift. The month letters are taken to be those of the Muncie.
- * Source: ChevelleStuff, "Transmission identification" of 1970 and 1971; row `gm-gearbox-year-month-day` of table `layout`
- * cites all.
+ * figure, month letter, day, D or N for the shift.
+ * Source: the form stands in ChevelleStuff, "Transmission identification 1970"; that the month letters are those of the
+ * Muncie is an inference, so row `gm-gearbox-year-month-day` of table `layout` rests on memory.
  */
 import { datesText } from '../../text/en/dates';
 import type { DateFormat } from './format';

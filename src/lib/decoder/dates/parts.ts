@@ -48,6 +48,18 @@ export function monthLetters(letters: string, first = 1): DatePart {
 	);
 }
 
+/** A code with every choice of I for 1 and O for nought. */
+function likened(code: string): readonly string[] {
+	return [...code].reduce<readonly string[]>(
+		(codes, figure) =>
+			codes.flatMap((head) => {
+				const letter = figure === '1' ? 'I' : figure === '0' ? 'O' : null;
+				return letter === null ? [head + figure] : [head + figure, head + letter];
+			}),
+		['']
+	);
+}
+
 /** 01–12. */
 export const monthFigures = (): DatePart =>
 	part(
@@ -55,6 +67,20 @@ export const monthFigures = (): DatePart =>
 		text.parts.month,
 		numbered(1, 12, (value) => [padded(value, 2)])
 	);
+
+/** 01–12 and 01–31 as engine plants struck them: a one could be a roman I, and no letter stands here, so that O is a nought. */
+export const struckMonthAndDay = (): readonly [DatePart, DatePart] => [
+	part(
+		'month',
+		text.parts.month,
+		numbered(1, 12, (value) => likened(padded(value, 2)))
+	),
+	part(
+		'day',
+		text.parts.day,
+		numbered(1, 31, (value) => likened(padded(value, 2)))
+	)
+];
 
 /** 1–12 without a leading nought, or with one. */
 export const monthNumber = (): DatePart =>
