@@ -4,12 +4,16 @@
  *   node --import tsx scripts/worker.ts
  */
 import { config } from '../src/lib/server/config';
+import { configuredStore } from '../src/lib/server/files';
 import { clearGround, layGround } from '../src/lib/server/ground';
 import { log } from '../src/lib/server/log';
 import { smtpPost } from '../src/lib/server/mail';
 import { startWorker } from '../src/lib/server/worker';
-import { KINDS, REPEATED } from '../src/lib/server/work';
+import { kindsFor, REPEATED } from '../src/lib/server/work';
 import { sayError } from './lib/say-error.mjs';
+
+// The versions of packages are pinned until a newer Node is what we run on.
+process.env['AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED'] = 'true';
 
 function start() {
 	const { databaseUrl, smtpUrl, mailFrom } = config();
@@ -18,7 +22,7 @@ function start() {
 		...layGround(databaseUrl),
 		log: log(),
 		post: smtpUrl === undefined ? null : smtpPost(smtpUrl, mailFrom),
-		kinds: KINDS,
+		kinds: kindsFor(configuredStore()),
 		repeated: REPEATED
 	});
 }

@@ -1,7 +1,22 @@
 /** All that a worker knows how to do, and what it does again and again. */
 import { cleanUpKind, EVERY_HOUR, RECORD_CLEANERS } from './clean-up';
+import { checkFileKind, giveUpAbandoned, queueRemoval, removeFilesKind, type Store } from './files';
 import type { JobKind, Repeated } from './jobs';
 
-export const KINDS: readonly JobKind[] = [cleanUpKind(RECORD_CLEANERS)];
+const CLEANERS = [
+	...RECORD_CLEANERS,
+	giveUpAbandoned,
+	async (ground) => {
+		await queueRemoval(ground);
+		return 0;
+	}
+] satisfies Parameters<typeof cleanUpKind>[0];
+
+/** @param store where files are kept */
+export const kindsFor = (store: Store): readonly JobKind[] => [
+	checkFileKind(store),
+	removeFilesKind(store),
+	cleanUpKind(CLEANERS)
+];
 
 export const REPEATED: readonly Repeated[] = [EVERY_HOUR];
