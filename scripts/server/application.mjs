@@ -2,6 +2,7 @@
 import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
+import { UPLOAD_LIMIT } from './body-limits.mjs';
 import { VISITOR_HEADERS } from './visitor.mjs';
 
 /**
@@ -26,8 +27,10 @@ export async function loadApplication(build) {
 	process.env.ADAPTER_ADDRESS_HEADER = VISITOR_HEADERS.address;
 	process.env.ADAPTER_PROTOCOL_HEADER = VISITOR_HEADERS.protocol;
 	process.env.ADAPTER_HOST_HEADER = VISITOR_HEADERS.host;
-	if (process.env.BODY_SIZE_LIMIT)
-		process.env.ADAPTER_BODY_SIZE_LIMIT = process.env.BODY_SIZE_LIMIT;
+	// The server holds each address to a limit of its own.
+	process.env.ADAPTER_BODY_SIZE_LIMIT = String(UPLOAD_LIMIT);
+	// The versions of packages are pinned until a newer Node is what we run on.
+	process.env.AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED = 'true';
 	const { handler } = await import(pathToFileURL(entry).href);
 	/** @type {Handover | undefined} */
 	const handover = /** @type {any} */ (globalThis)[HANDOVER];

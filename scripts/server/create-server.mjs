@@ -1,6 +1,7 @@
 // The product's own HTTP server, around the handler that the build made.
 import { randomBytes } from 'node:crypto';
 import { createServer as createHttpServer } from 'node:http';
+import { holdToLimit, limitOf } from './body-limits.mjs';
 import { chooseEncoding } from './compression.mjs';
 import { FixedReadings, mayBeFixed } from './fixed-readings.mjs';
 import { GuardedResponse, splitAddress } from './guarded-response.mjs';
@@ -14,7 +15,7 @@ import { introduce, originsOf, visitorAddress } from './visitor.mjs';
  * @typedef {object} Settings
  * @property {string} origin
  * @property {number} trustProxy how many proxies stand in front
- * @property {number} bodyLimit bytes
+ * @property {number} bodyLimit bytes; addresses that take files have a larger one
  *
  * @typedef {object} Events what becomes of each request, for the log
  * @property {((request: Request, response: GuardedResponse, started: number) => void) | null} answered
@@ -32,7 +33,8 @@ const MAX_HEADER_BYTES = 64 * 1024;
 /** A little longer than the balancers in front keep theirs, so that it is they who close. */
 const KEEP_ALIVE_MS = 65_000;
 const HEADERS_TIMEOUT_MS = 20_000;
-const REQUEST_TIMEOUT_MS = 60_000;
+/** A photograph over a slow line takes its time. */
+const REQUEST_TIMEOUT_MS = 300_000;
 
 /** @type {import('./client-files.mjs').ClientFiles} */
 const NO_FILES = { paths: new Set(), policies: new Map() };
@@ -116,7 +118,9 @@ export function createServer({
 			sayDraining(response);
 			return;
 		}
-		if (refuseEarly(request, response, { bodyLimit, isFile })) return;
+		const limit = limitOf(splitAddress(address)[0], bodyLimit);
+		if (refuseEarly(request, response, { bodyLimit: limit, isFile })) return;
+		holdToLimit(request, limit);
 		if (kept) response.keep = (...answered) => void readings.keep(address, ...answered);
 		request.headers['x-request-id'] = response.requestId;
 		introduce(request, originOf(request.headers.host), visitorAddress(request, trustProxy));
