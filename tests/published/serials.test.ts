@@ -7,7 +7,7 @@ import { firstReading, released, samples, unmet, type Expectation } from './samp
 
 const tables = released();
 
-describe.each(['gm', 'chrysler', 'ford'])('published serials of %s', (maker) => {
+describe.each(['gm', 'chrysler', 'ford', 'amc'])('published serials of %s', (maker) => {
 	const list = samples(`serials/${maker}.csv`);
 
 	it.each(
@@ -33,7 +33,9 @@ describe.each(['gm', 'chrysler', 'ford'])('published serials of %s', (maker) => 
 
 describe('the list', () => {
 	it('holds sixty published serials of these makers or more, each with its source', () => {
-		const list = ['gm', 'chrysler', 'ford'].flatMap((maker) => samples(`serials/${maker}.csv`));
+		const list = ['gm', 'chrysler', 'ford', 'amc'].flatMap((maker) =>
+			samples(`serials/${maker}.csv`)
+		);
 		expect(list.length).toBeGreaterThanOrEqual(60);
 		expect(list.filter((sample) => sample.source === '')).toEqual([]);
 	});

@@ -1,6 +1,8 @@
 /** Every layout that readings try, and nothing else: adding one here adds it to the product. */
 import { prepare, type PreparedLayout } from '../engine/plan';
 import type { Layout } from '../engine/layout';
+import { amc1968, amc1974 } from './amc-1968-1979';
+import { amc1980 } from './amc-1980';
 import { chrysler1966 } from './chrysler-1966-1980';
 import { ford1960 } from './ford-1960-1980';
 import { gm1965 } from './gm-1965-1971';
@@ -12,6 +14,9 @@ export const LAYOUTS: readonly Layout[] = [
 	gm1972,
 	chrysler1966,
 	ford1960,
+	amc1968,
+	amc1974,
+	amc1980,
 	iso17,
 	iso17FewVehicles
 ];

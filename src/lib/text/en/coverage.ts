@@ -55,7 +55,7 @@ export const coverageText = {
 		},
 		{
 			title: 'American Motors',
-			text: 'Rows can be looked up; serial numbers are not read yet. For 1966 and 1967 we found no published form.'
+			text: 'Serial numbers are read from 1968 on. For 1966 and 1967 we found no published form, and refuse them.'
 		},
 		{
 			title: 'Studebaker, and makers of trucks',
