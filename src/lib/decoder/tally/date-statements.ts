@@ -101,7 +101,7 @@ export function dateStatementsOf(tables: TableSet, stamps: readonly TallyStamp[]
 					words: field.meaning ?? '',
 					rows: supported.length > 0 ? supported : rows,
 					supported: supported.length > 0,
-					weight: weightOf(stamp.kind, stamp.place, reading.maker, 'date_order')
+					weight: weightOf(stamp.kind, stamp.place, reading.maker, false)
 				}
 			];
 		});

@@ -20,6 +20,7 @@ describe('facts of two sides', () => {
 			doors: fc.constantFrom(2, 4),
 			body_style: fc.constantFrom('Coupe', 'Sedan'),
 			model_year: fc.constantFrom(1968, 1969),
+			unit_year: fc.constantFrom(1968, 1970),
 			plant_code: fc.constantFrom('N', 'L'),
 			plant_city: fc.constantFrom('Norwood', 'Los Angeles'),
 			displacement_cuin: fc.constantFrom(350, 396, 402),
@@ -102,6 +103,19 @@ describe('plants', () => {
 		expect(said('assembly_plant', norwood, { plant_code: 'N' })).toBe(true);
 		expect(said('assembly_plant', norwood, { plant_code: '2', plant_city: 'Norwood' })).toBe(null);
 		expect(said('assembly_plant', { plant_city: 'Norwood' }, { plant_city: 'Norwood' })).toBe(true);
+	});
+});
+
+describe('model years', () => {
+	it('are those of the car on both sides, or of a part on one', () => {
+		const car = { model_year: 1969 };
+		expect(said('model_year', car, { model_year: 1970 })).toBe(false);
+		expect(said('model_year', car, { unit_year: 1970 })).toBe(false);
+		expect(said('model_year', car, { unit_year: 1969 })).toBe(true);
+		expect(said('model_year', { unit_year: 1968 }, car)).toBe(null);
+		expect(said('model_year', { unit_year: 1968 }, { unit_year: 1969 })).toBe(null);
+		expect(said('model_year', { unit_year: 1968 }, { unit_year: 1968 })).toBe(true);
+		expect(said('model_year', car, {})).toBe(null);
 	});
 });
 

@@ -13,7 +13,8 @@ export interface Company {
 /** The facts that tell an attribute, in the order in which a side is described. */
 export const FACTS_OF = {
 	division: ['division'],
-	model_year: ['model_year'],
+	/** `unit_year` is the model year that a part was made for. */
+	model_year: ['model_year', 'unit_year'],
 	line: ['line'],
 	series: ['series'],
 	body_style: ['doors', 'body_style'],
@@ -28,7 +29,7 @@ export const FACTS_OF = {
 	],
 	transmission: ['transmission', 'speeds'],
 	axle: ['ratio', 'locking']
-} as const satisfies Partial<Record<TallyAttribute, readonly (keyof Facts)[]>>;
+} as const satisfies Partial<Record<TallyAttribute, readonly (keyof Facts | 'unit_year')[]>>;
 /** Attributes that are told by facts of rows; the others are the characters themselves, or dates. */
 export type FactAttribute = keyof typeof FACTS_OF;
 
@@ -94,6 +95,17 @@ function plants(left: RowValues, right: RowValues): Truth {
 	return code === false && city === true ? null : city;
 }
 
+/** A part for a later year cannot be the car's first; one for an earlier year may have lain in store. */
+function years(left: RowValues, right: RowValues): Truth {
+	const cars = equal(left, right, 'model_year');
+	if (cars !== null) return cars;
+	if (equal(left, right, 'unit_year') !== null) return byWord(left, right, 'unit_year');
+	const car = left.model_year ?? right.model_year;
+	const part = left.model_year === undefined ? left.unit_year : right.unit_year;
+	if (car === undefined || part === undefined || Number(part) < Number(car)) return null;
+	return part === car;
+}
+
 const NAMED = ['powerglide', 'turbo hydra-matic 350', 'turbo hydra-matic 400', 'muncie', 'saginaw'];
 const AUTOMATIC = /automatic|powerglide|hydra-matic|torqueflite|cruise-o-matic/;
 const MANUAL = /manual|muncie|saginaw|toploader/;
@@ -141,6 +153,8 @@ export function agree(
 			return plants(left, right);
 		case 'transmission':
 			return gearboxes(left, right);
+		case 'model_year':
+			return years(left, right);
 		case 'series':
 			return byWord(left, right, 'series');
 		case 'body_style':

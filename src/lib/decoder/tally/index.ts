@@ -9,7 +9,8 @@ import { pairLine } from './pair';
 import { sideOf, sortKey } from './sides';
 import { statementsOf, type Statement } from './statements';
 
-export { statementsOf, type Option, type Statement } from './statements';
+export type { Option } from './options';
+export { statementsOf, type Statement } from './statements';
 
 /** Lines by edition: asking again for the same edition costs nothing. */
 const companies = new WeakMap<TableSet, Company>();

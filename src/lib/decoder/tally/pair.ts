@@ -7,7 +7,8 @@ import { compareCharacters } from './characters';
 import { agree, type Company } from './facts';
 import { neighborsOf } from './neighbors';
 import { inOrder, sideOf } from './sides';
-import type { Gap, Statement } from './statements';
+import type { Gap } from './options';
+import type { Statement } from './statements';
 import { unanimous, type Truth } from './three-valued';
 import { lighter } from './weights';
 

@@ -4,29 +4,24 @@ import type {
 	Maker,
 	Reading,
 	ReadingField,
-	RowValues,
 	StampKind,
 	TallyAttribute,
 	TallyStamp,
 	Weight
 } from '../../types';
 import { normalise, textOf, type Cell } from '../engine/characters';
-import { tableId, type CompiledRow, type TableSet } from '../engine/table-set';
-import { FACTS_OF, type FactAttribute } from './facts';
+import { tableId, type TableSet } from '../engine/table-set';
+import {
+	attributesOf,
+	gapOf,
+	optionOf,
+	optionsOf,
+	says,
+	withOwn,
+	type Gap,
+	type Option
+} from './options';
 import { weightOf } from './weights';
-
-/** One value that a statement allows. */
-export interface Option {
-	readonly meaning: string;
-	readonly facts: RowValues;
-	/** Rows that say so: the firm and fair ones alone where there are any. */
-	readonly rows: readonly CompiledRow[];
-	/** Whether a firm or fair row says so. */
-	readonly supported: boolean;
-}
-
-/** Why a statement has no value, or not only those listed. */
-export type Gap = 'none' | 'not_listed' | 'not_used' | 'illegible' | 'contested' | 'undecided';
 
 /** What one field of one stamp says about one attribute of the car. */
 export interface Statement {
@@ -56,83 +51,10 @@ const BY_CHARACTERS: Partial<Record<FieldName, TallyAttribute>> = {
 	roof: 'roof'
 };
 
-/** Fields whose facts are of the engine they stand on; other castings fit several engines. */
-const ENGINE_PARTS = ['block', 'engine'];
-
-const good = ({ strength }: CompiledRow): boolean => strength === 'firm' || strength === 'fair';
-
-function optionOf(
-	meaning: string,
-	facts: RowValues,
-	keys: readonly string[],
-	tables: TableSet
-): Option {
-	const rows = keys.flatMap((key) => tables.rows.get(key) ?? []);
-	const supported = rows.filter(good);
-	return {
-		meaning,
-		facts,
-		rows: supported.length > 0 ? supported : rows,
-		supported: supported.length > 0
-	};
-}
-
-function gapOf({ outcome, possible }: ReadingField): Gap {
-	switch (outcome) {
-		case 'found':
-			return possible.length > 0 ? 'undecided' : 'none';
-		case 'contested':
-		case 'illegible':
-		case 'not_listed':
-		case 'not_used':
-			return outcome;
-	}
-}
-
-function optionsOf(field: ReadingField, tables: TableSet): Option[] {
-	if (field.outcome === 'contested')
-		return field.alternatives.map(({ meaning, values, rows }) =>
-			optionOf(meaning, values, rows, tables)
-		);
-	if (field.possible.length > 0)
-		return field.possible.map(({ meaning, values }) => {
-			const own = field.rows.filter((key) => tables.rows.get(key)?.meaning === meaning);
-			return optionOf(meaning, values, own, tables);
-		});
-	return field.meaning === null ? [] : [optionOf(field.meaning, field.values, field.rows, tables)];
-}
-
-/** Facts of a field with what its own code says of the plant. */
-function withPlant(field: ReadingField, option: Option): Option {
-	if (field.name !== 'assembly_plant' || option.facts.plant_code !== undefined) return option;
-	return { ...option, facts: { ...option.facts, plant_code: field.code } };
-}
-
-const says = (option: Option, attribute: FactAttribute): boolean =>
-	FACTS_OF[attribute].some((key) => option.facts[key] !== undefined);
-
-/** The attributes that a field's facts tell. */
-function attributesOf(field: ReadingField, options: readonly Option[]): FactAttribute[] {
-	const { part } = options[0]?.facts ?? {};
-	if (field.name === 'casting_number' && !ENGINE_PARTS.includes(String(part))) return [];
-	const told = (Object.keys(FACTS_OF) as FactAttribute[]).filter((attribute) =>
-		options.some((option) => says(option, attribute))
-	);
-	const own = OWN[field.name];
-	return own === undefined || told.includes(own) ? told : [...told, own];
-}
-
-/** The attribute that a field is about even when its tables say nothing. */
-const OWN: Partial<Record<FieldName, FactAttribute>> = {
-	division: 'division',
-	line: 'line',
-	model_year: 'model_year',
-	assembly_plant: 'assembly_plant',
-	engine: 'engine',
-	unit_code: 'engine',
-	transmission: 'transmission',
-	axle: 'axle'
-};
+/** Fields of the car's own number, in part or whole. */
+const NUMBER: readonly FieldName[] = ['sequence_number', 'partial_serial'];
+const ofNumber = ({ name, derived_from = [] }: ReadingField): boolean =>
+	[name, ...derived_from].some((one) => NUMBER.includes(one));
 
 interface Place {
 	readonly stamp: TallyStamp;
@@ -159,7 +81,7 @@ function statement(
 		year: reading.model_year,
 		options,
 		gap: gapOf(field),
-		weight: weightOf(stamp.kind, stamp.place, reading.maker, attribute)
+		weight: weightOf(stamp.kind, stamp.place, reading.maker, ofNumber(field))
 	};
 }
 
@@ -199,8 +121,10 @@ function* ofReading(place: Place, tables: TableSet): Generator<Statement> {
 	for (const field of reading.fields) {
 		const characters = BY_CHARACTERS[field.name];
 		if (characters !== undefined) yield statement(characters, field, [], place);
-		const options = optionsOf(field, tables).map((option) => withPlant(field, option));
-		for (const attribute of attributesOf(field, options))
+		const options = optionsOf(field, tables).map((option) =>
+			withOwn(field, place.stamp.kind, option)
+		);
+		for (const attribute of attributesOf(field, place.stamp.kind, options))
 			yield statement(
 				attribute,
 				field,

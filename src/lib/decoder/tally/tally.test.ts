@@ -247,6 +247,43 @@ describe('plants', () => {
 	});
 });
 
+describe('what a part says of itself', () => {
+	const year = (value: number, parts: Partial<ReadingField> = {}) =>
+		fieldOf('model_year', 'F', {
+			values: { model_year: value },
+			meaning: String(value),
+			rows: ['gm.engine.v.1'],
+			...parts
+		});
+	const car = stampOf('serial', [year(1969)]);
+
+	it('is its own year: a later one does not tally, an earlier one cannot be told', () => {
+		expect(only([car, pad(year(1970))], 'model_year').result).toBe('does_not_tally');
+		expect(only([car, pad(year(1968))], 'model_year').result).toBe('cannot_be_told');
+		const derived = year(1968, { derived_from: ['partial_serial'] });
+		expect(only([car, pad(derived)], 'model_year').result).toBe('does_not_tally');
+	});
+
+	it('is its own plant, which is not the car’s, unless a partial serial names that', () => {
+		const plant = (parts: Partial<ReadingField> = {}) =>
+			fieldOf('assembly_plant', 'T', { meaning: 'A plant', rows: ['gm.engine.v.1'], ...parts });
+		const plate = stampOf('serial', [plant()]);
+		expect(only([plate, pad(plant())], 'assembly_plant').result).toBe('not_looked_at');
+		const derived = plant({ derived_from: ['partial_serial'] });
+		expect(only([plate, pad(derived)], 'assembly_plant').result).toBe('tallies');
+	});
+
+	it('is the ratio of its first gear, which is no axle’s', () => {
+		const gearbox = fieldOf('transmission', 'M20', {
+			values: { ratio: 2.56, speeds: 4 },
+			meaning: 'Four-speed',
+			rows: ['gm.engine.v.1']
+		});
+		const lines = tallyStamps(tables, [car, pad(gearbox)]);
+		expect(lines.map(({ attribute }) => attribute)).not.toContain('axle');
+	});
+});
+
 describe('several readings of one stamp', () => {
 	const year = (value: number, rank: number) =>
 		readingOf(

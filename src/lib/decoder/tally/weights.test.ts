@@ -4,17 +4,17 @@ import { lighter, weightOf } from './weights';
 
 describe('weights', () => {
 	it('follow the kind of stamp where nothing is said of the place', () => {
-		const weights = STAMP_KINDS.map((kind) => weightOf(kind, undefined, 'gm', 'engine'));
+		const weights = STAMP_KINDS.map((kind) => weightOf(kind, undefined, 'gm', false));
 		expect(weights).toEqual(['heavy', 'heavy', 'middling', 'middling', 'middling', 'light']);
 	});
 
 	it('are heavy for the car’s number struck into a part', () => {
-		expect(weightOf('engine', undefined, 'gm', 'sequence_number')).toBe('heavy');
+		expect(weightOf('engine', undefined, 'gm', true)).toBe('heavy');
 	});
 
 	it('are middling for a tag that screws hold', () => {
-		expect(weightOf('body_tag', undefined, 'chrysler', 'paint')).toBe('middling');
-		expect(weightOf('body_tag', undefined, null, 'paint')).toBe('middling');
+		expect(weightOf('body_tag', undefined, 'chrysler', false)).toBe('middling');
+		expect(weightOf('body_tag', undefined, null, false)).toBe('middling');
 	});
 
 	it.each([
@@ -24,7 +24,7 @@ describe('weights', () => {
 		['stamped in the frame', 'heavy'],
 		['somewhere', 'middling']
 	] as const)('%s is %s', (place, weight) =>
-		expect(weightOf('engine', place, 'gm', 'engine')).toBe(weight)
+		expect(weightOf('engine', place, 'gm', false)).toBe(weight)
 	);
 
 	it('of a line are those of its lighter side', () => {

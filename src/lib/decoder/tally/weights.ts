@@ -1,5 +1,5 @@
 /** How hard it is to change what a statement stands on. */
-import type { Maker, StampKind, TallyAttribute, Weight } from '../../types';
+import type { Maker, StampKind, Weight } from '../../types';
 
 const ORDER: readonly Weight[] = ['heavy', 'middling', 'light'];
 
@@ -14,25 +14,17 @@ const PLACES: readonly (readonly [RegExp, Weight])[] = [
 	[/\b(struck|stamped|rivet(ed|s)?|frame|cowl stamping)\b/i, 'heavy']
 ];
 
-/** Numbers of the car itself, struck into a part. */
-const STRUCK: ReadonlySet<TallyAttribute> = new Set([
-	'sequence_number',
-	'model_year',
-	'assembly_plant',
-	'division'
-]);
-
 /** Chrysler's tags are held by screws, and plates of American Motors are not known to be riveted. */
 const RIVETED: ReadonlySet<Maker> = new Set(['gm', 'ford']);
 
-function byKind(kind: StampKind, maker: Maker | null, attribute: TallyAttribute): Weight {
+function byKind(kind: StampKind, maker: Maker | null, ofCar: boolean): Weight {
 	switch (kind) {
 		case 'serial':
 			return 'heavy';
 		case 'body_tag':
 			return maker !== null && RIVETED.has(maker) ? 'heavy' : 'middling';
 		case 'engine':
-			return STRUCK.has(attribute) ? 'heavy' : 'middling';
+			return ofCar ? 'heavy' : 'middling';
 		case 'casting':
 		case 'date':
 			return 'middling';
@@ -41,15 +33,18 @@ function byKind(kind: StampKind, maker: Maker | null, attribute: TallyAttribute)
 	}
 }
 
-/** The weight of a statement: what the place says goes before what is usual for the kind of stamp. */
+/**
+ * The weight of a statement: what the place says goes before what is usual for the kind of stamp.
+ * @param ofCar whether it is part of the car's own number, struck into the part
+ */
 export function weightOf(
 	kind: StampKind,
 	place: string | undefined,
 	maker: Maker | null,
-	attribute: TallyAttribute
+	ofCar: boolean
 ): Weight {
 	const named = place === undefined ? undefined : PLACES.find(([words]) => words.test(place));
-	return named?.[1] ?? byKind(kind, maker, attribute);
+	return named?.[1] ?? byKind(kind, maker, ofCar);
 }
 
 /** A line is no heavier than its lighter side. */
