@@ -155,6 +155,31 @@ CREATE TABLE `jobs` (
   CONSTRAINT `jobs_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`) ON DELETE CASCADE
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
 
+CREATE TABLE `notices` (
+  `id` varchar(32) NOT NULL,
+  `user_id` varchar(32) NOT NULL,
+  `kind` varchar(32) NOT NULL,
+  `template` varchar(64) NOT NULL,
+  `data` longtext CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL CHECK (json_valid(`data`)),
+  `mail` enum('each','digest','off') NOT NULL,
+  `created_at` datetime(3) NOT NULL,
+  `read_at` datetime(3) DEFAULT NULL,
+  `archived_at` datetime(3) DEFAULT NULL,
+  `digested_at` datetime(3) DEFAULT NULL,
+  PRIMARY KEY (`id`),
+  KEY `of_user` (`user_id`,`archived_at`,`created_at`),
+  KEY `for_digest` (`mail`,`digested_at`,`user_id`),
+  CONSTRAINT `notices_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`) ON DELETE CASCADE
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
+
+CREATE TABLE `notice_preferences` (
+  `user_id` varchar(32) NOT NULL,
+  `kind` varchar(32) NOT NULL,
+  `mail` enum('each','digest','off') NOT NULL,
+  PRIMARY KEY (`user_id`,`kind`),
+  CONSTRAINT `notice_preferences_user` FOREIGN KEY (`user_id`) REFERENCES `users` (`id`) ON DELETE CASCADE
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_nopad_bin;
+
 CREATE TABLE `outbox` (
   `id` varchar(32) NOT NULL,
   `user_id` varchar(32) DEFAULT NULL,

@@ -26,6 +26,8 @@ import { step as secondFactors } from './202612010934-second-factors';
 import { step as recoveryCodes } from './202612010935-recovery-codes';
 import { step as filesChecked } from './202612010950-files-checked';
 import { step as filePieces } from './202612010951-file-pieces';
+import { step as notices } from './202612011000-notices';
+import { step as noticePreferences } from './202612011001-notice-preferences';
 
 /** Every migration by name, in order. Imported one by one so that they also work inside the server's build. */
 export const MIGRATIONS: readonly (readonly [name: string, step: SchemaStep])[] = [
@@ -55,5 +57,7 @@ export const MIGRATIONS: readonly (readonly [name: string, step: SchemaStep])[] 
 	['202612010934-second-factors', secondFactors],
 	['202612010935-recovery-codes', recoveryCodes],
 	['202612010950-files-checked', filesChecked],
-	['202612010951-file-pieces', filePieces]
+	['202612010951-file-pieces', filePieces],
+	['202612011000-notices', notices],
+	['202612011001-notice-preferences', noticePreferences]
 ];

@@ -7,6 +7,7 @@ import { defineEdition } from './edition';
 import { defineEditionCounter } from './edition-counter';
 import { defineFile, defineFilePiece } from './file';
 import { defineJob } from './job';
+import { defineNotice, defineNoticePreference } from './notice';
 import { defineOutboxMail } from './outbox-mail';
 import { defineRecoveryCode } from './recovery-code';
 import { defineReferenceRow } from './reference-row';
@@ -25,6 +26,7 @@ export type { ClaimRecord } from './claim';
 export type { EditionRecord } from './edition';
 export type { FilePieceRecord, FileRecord } from './file';
 export type { JobRecord } from './job';
+export type { NoticePreferenceRecord, NoticeRecord } from './notice';
 export type { OutboxMailRecord } from './outbox-mail';
 export type { RecoveryCodeRecord } from './recovery-code';
 export type { ReferenceRowRecord } from './reference-row';
@@ -48,6 +50,8 @@ export const defineModels = (sequelize: Sequelize) => ({
 	filePieces: defineFilePiece(sequelize),
 	files: defineFile(sequelize),
 	jobs: defineJob(sequelize),
+	noticePreferences: defineNoticePreference(sequelize),
+	notices: defineNotice(sequelize),
 	outbox: defineOutboxMail(sequelize),
 	recoveryCodes: defineRecoveryCode(sequelize),
 	referenceRows: defineReferenceRow(sequelize),

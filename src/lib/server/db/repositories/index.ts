@@ -5,6 +5,7 @@ export * as counters from './counters';
 export * as editions from './editions';
 export * as files from './files';
 export * as jobs from './jobs';
+export * as notices from './notices';
 export * as outbox from './outbox';
 export * as referenceRows from './reference-rows';
 export * as releases from './releases';
