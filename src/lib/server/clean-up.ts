@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { jobs, outbox } from './db/repositories';
+import { jobs, notices, outbox } from './db/repositories';
 import type { Ground } from './ground';
 import type { JobKind, Repeated } from './jobs';
 
@@ -7,14 +7,17 @@ import type { JobKind, Repeated } from './jobs';
 export type Cleaner = (ground: Ground) => Promise<number>;
 
 const DAY_MS = 86_400_000;
-const KEPT_DAYS = 30;
 
-const longAgo = ({ clock }: Ground) => new Date(clock().getTime() - KEPT_DAYS * DAY_MS);
+const daysAgo = ({ clock }: Ground, days: number) => new Date(clock().getTime() - days * DAY_MS);
 
-/** Mail that was sent or given up, and work that has ended, stay on record for thirty days. */
+/**
+ * Mail that was sent or given up, and work that has ended, stay on record for thirty days; notices that were put away,
+ * for a year.
+ */
 export const RECORD_CLEANERS: readonly Cleaner[] = [
-	(ground) => outbox.forgetMails(ground.database, longAgo(ground)),
-	(ground) => jobs.forgetJobs(ground.database, longAgo(ground))
+	(ground) => outbox.forgetMails(ground.database, daysAgo(ground, 30)),
+	(ground) => jobs.forgetJobs(ground.database, daysAgo(ground, 30)),
+	(ground) => notices.forgetArchived(ground.database, daysAgo(ground, 365))
 ];
 
 const KIND = 'clean_up';

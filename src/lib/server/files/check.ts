@@ -9,6 +9,7 @@ import type { FileRefusal } from '../../types';
 import { inTransaction } from '../db';
 import { files } from '../db/repositories';
 import type { Ground } from '../ground';
+import { giveNotice } from '../inbox';
 import { NotNowError, type JobKind, type JobRun } from '../jobs';
 import { contentOf, HEAD_BYTES } from './content';
 import { FileRefusedError } from './errors';
@@ -41,28 +42,40 @@ export const checkFileKind = (store: Store): JobKind<Payload> => ({
 		} catch (error) {
 			if (error instanceof StorageAwayError) throw new NotNowError(error.message, { cause: error });
 			if (!(error instanceof FileRefusedError)) throw error;
-			await refuse(run, file.id, error.refusal);
+			await refuse(run, file, error.refusal);
 		} finally {
 			await rm(folder, { recursive: true, force: true });
 		}
 	},
-	broken: (how, run) => refuse(run, run.payload.file, how === 'stopped' ? 'stopped' : 'unchecked')
+	async broken(how, run) {
+		const file = await files.fileById(run.database, run.payload.file);
+		if (file !== null) await refuse(run, file, how === 'stopped' ? 'stopped' : 'unchecked');
+	}
 });
 
 /** What was sent goes in any case: a picture may say where it was taken. */
 async function settle(
-	ground: Ground,
-	id: string,
+	{ database, clock }: Ground,
+	{ id, owner, name }: FileRecord,
 	changes: Parameters<typeof files.changeFile>[3]
 ): Promise<void> {
-	await inTransaction(ground.database, async (transaction) => {
-		await files.changeFile(ground.database, id, 'checking', changes, transaction);
-		await queueRemoval({ ...ground, transaction });
+	await inTransaction(database, async (transaction) => {
+		if (!(await files.changeFile(database, id, 'checking', changes, transaction))) return;
+		const causing = { database, clock, transaction };
+		await queueRemoval(causing);
+		// Whoever has stopped the check knows of it.
+		const { refusal } = changes;
+		if (owner === null || !refusal || refusal === 'stopped') return;
+		await giveNotice(causing, {
+			user_id: owner,
+			template: 'file_refused',
+			data: { name, refusal }
+		});
 	});
 }
 
-const refuse = (ground: Ground, id: string, refusal: FileRefusal): Promise<void> =>
-	settle(ground, id, { state: 'refused', refusal });
+const refuse = (ground: Ground, file: FileRecord, refusal: FileRefusal): Promise<void> =>
+	settle(ground, file, { state: 'refused', refusal });
 
 async function check(
 	store: Store,
@@ -80,7 +93,7 @@ async function check(
 			? await keepPaper(store, file, path)
 			: await keepPicture(store, run, file, path);
 	signal.throwIfAborted();
-	await settle(run, file.id, { ...kept, sha256, state: 'ready' });
+	await settle(run, file, { ...kept, sha256, state: 'ready' });
 	await report({ done: STEPS, of: STEPS });
 }
 

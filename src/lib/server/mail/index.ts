@@ -9,4 +9,5 @@ export {
 } from './mailbox';
 export { RefusedMailError, smtpPost, type OutgoingMail, type Post } from './post';
 export { queueMail, type Causing, type Mail } from './queue';
+export { readUnsubscribeToken, type Unsubscription } from './unsubscribe';
 export { sendNext, type Sending, type Sent } from './send';

@@ -1,10 +1,11 @@
 /** Every mail that the product sends, by name of its template. */
 import { accessLetters } from './access';
 import type { Letter } from './letter';
+import { noticeLetters } from './notices';
 
 export { letterFrame, type Letter, type LetterPart } from './letter';
 
-export const MAIL_TEMPLATES = { ...accessLetters } as const;
+export const MAIL_TEMPLATES = { ...accessLetters, ...noticeLetters } as const;
 
 export type MailTemplate = keyof typeof MAIL_TEMPLATES;
 /** What a template has to be told. */
