@@ -27,7 +27,7 @@ export async function giveNotice<Template extends NoticeTemplate>(
 	const kind = KIND_OF[template];
 	const { [kind]: mail } = await preferencesOf(causing, user_id, transaction);
 	const id = randomBytes(16).toString('hex');
-	const notice = { id, user_id, kind, template, data: data ?? {}, mail, created_at: clock() };
+	const notice = { id, user_id, kind, template, data, mail, created_at: clock() };
 	await notices.addNotice(database, notice, transaction);
 	if (mail !== 'each') return;
 	const { title, body } = noticeWords(template, data);

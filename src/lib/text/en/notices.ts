@@ -24,7 +24,7 @@ export const NOTICE_TEMPLATES = {
 		body: `You can read, and take away what is yours, but send nothing until then. The reason: ${reason}`,
 		link: '/account'
 	}),
-	resumed: (): NoticeWords => ({
+	resumed: (_nothing: Readonly<Record<string, never>>): NoticeWords => ({
 		title: 'Your account is no longer paused',
 		body: 'An administrator has ended the pause of your account.',
 		link: '/account'
