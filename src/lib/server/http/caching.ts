@@ -8,7 +8,9 @@ function hash(text: string, from: number): number {
 		value = Math.imul(value ^ text.charCodeAt(index), 0x01000193);
 	return value;
 }
-const CODE = hash(__ANSWER_DIGEST__, 0x811c9dc5);
+let code: number | undefined;
+/** Made when first needed: the worker, which is not built, shapes no answers. */
+const answerCode = (): number => (code ??= hash(__ANSWER_DIGEST__, 0x811c9dc5));
 
 /**
  * The validator of an answer, made before the answer is. Weak, because the same answer may be sent
@@ -18,7 +20,7 @@ const CODE = hash(__ANSWER_DIGEST__, 0x811c9dc5);
  * @param question path and query, and the media type where an address has several
  */
 export const etagOf = (digest: string, reader: string, question: string): string =>
-	`W/"${digest.slice(0, 12)}-${reader}-${(hash(question, CODE) >>> 0).toString(36)}"`;
+	`W/"${digest.slice(0, 12)}-${reader}-${(hash(question, answerCode()) >>> 0).toString(36)}"`;
 
 const opaque = (tag: string): string => tag.trim().replace(/^W\//, '');
 
