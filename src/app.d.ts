@@ -1,3 +1,4 @@
+import type { Actor } from '$lib/server/actor';
 import type { Refusal } from '$lib/server/http';
 
 declare global {
@@ -14,6 +15,8 @@ declare global {
 		interface Locals {
 			/** Stands in the log and on the answer as X-Request-Id. */
 			requestId: string;
+			/** Who asks: looked up when first asked for, and once. Rejects where the database is away. */
+			actor: () => Promise<Actor>;
 			/** What went wrong on our side, and how it is answered in place of 500 where it was foreseen. */
 			failure?: {
 				readonly id: string;

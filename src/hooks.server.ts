@@ -1,23 +1,33 @@
 import { randomBytes } from 'node:crypto';
 import { building } from '$app/environment';
+import { ensureDemoPeople } from '$lib/server/accounts';
+import type { Actor } from '$lib/server/actor';
 import { config } from '$lib/server/config';
+import { clearGround, layGround } from '$lib/server/ground';
 import { handOver } from '$lib/server/handover';
 import { problemResponse, refusalOf, refuse } from '$lib/server/http';
 import { log, maskAddress } from '$lib/server/log';
 import { start, stop, type WatchEvent } from '$lib/server/reference';
+import { actorOfRequest, auth, checkSignIn, hasSession } from '$lib/server/sign-in';
 import { errorText } from '$lib/text/en';
 import type { Handle, HandleServerError, ServerInit } from '@sveltejs/kit';
 
 let stopped: Promise<void> | undefined;
 /** Closes what this process holds open; whoever asks again waits for the same. */
-const stopOnce = () => (stopped ??= stop());
+const stopOnce = () => (stopped ??= Promise.all([stop(), clearGround()]).then(() => undefined));
 
 export const init: ServerInit = async () => {
 	if (building) return;
 	// The adapter's own server ends with this event, ours with the function handed over.
 	process.on('sveltekit:shutdown', () => void stopOnce());
+	checkSignIn();
 	handOver({ config: config(), log: log(), maskAddress, stop: stopOnce });
+	const ground = layGround(config().databaseUrl);
 	await start(config().databaseUrl, { onEvent: tell });
+	if (config().demo)
+		await ensureDemoPeople(ground).catch((error: unknown) =>
+			log().error({ err: error }, 'the people of the demonstration are missing')
+		);
 };
 
 function tell(event: WatchEvent): void {
@@ -25,6 +35,7 @@ function tell(event: WatchEvent): void {
 	else log().info(event);
 }
 
+const LINK_CALLBACK = '/auth/callback/link';
 const READS = new Set(['GET', 'HEAD', 'OPTIONS']);
 
 export const handle: Handle = async ({ event, resolve }) => {
@@ -36,11 +47,25 @@ export const handle: Handle = async ({ event, resolve }) => {
 	if (!READS.has(request.method) && origin !== null && origin !== url.origin)
 		return problemResponse(403, errorText.foreign);
 
-	const response = await resolve(event);
+	let asked: Promise<Actor> | undefined;
+	locals.actor = () => (asked ??= actorOfRequest(event));
+
+	// Of the library's own addresses one is needed, the one that links in mails lead on to.
+	const response =
+		request.method === 'GET' && url.pathname === LINK_CALLBACK
+			? await auth.handle({ event, resolve })
+			: await resolve(event);
+	if (asked !== undefined) keepPrivate(response, hasSession(event));
 	return locals.failure && response.status === 500
 		? answerFailure(response, locals.failure, url.pathname.startsWith('/api/'))
 		: response;
 };
+
+/** What was made for somebody is kept by nobody, and what was made for nobody is not shown to somebody. */
+function keepPrivate({ headers }: Response, forSomebody: boolean): void {
+	if (forSomebody) headers.set('cache-control', 'private, no-store');
+	headers.append('vary', 'cookie');
+}
 
 /** The framework knows one status for what is thrown; a failure that was foreseen has its own. */
 function answerFailure(

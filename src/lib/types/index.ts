@@ -3,6 +3,7 @@ export * from './api-requests';
 export * from './dates';
 export * from './fields';
 export * from './files';
+export * from './forms';
 export * from './jobs';
 export * from './makers';
 export * from './name-schemas';

@@ -1,7 +1,17 @@
 import { fault, Refusal } from './refusal';
 
 /** Domain errors that are answers to the asker, by their code: which parameter, and which status. */
-const KNOWN: Readonly<Record<string, readonly [status: 404 | 503, field: string]>> = {
+const KNOWN: Readonly<
+	Record<string, readonly [status: 401 | 403 | 404 | 409 | 429 | 503, field: string]>
+> = {
+	sign_in_needed: [401, 'session'],
+	not_allowed: [403, 'session'],
+	second_factor_needed: [403, 'session'],
+	paused: [403, 'session'],
+	unknown_person: [404, 'id'],
+	unknown_session: [404, 'id'],
+	changed_meanwhile: [409, 'version'],
+	too_often: [429, 'address'],
 	unknown_edition: [404, 'edition'],
 	unknown_row: [404, 'row_key'],
 	unknown_source: [404, 'key'],
@@ -25,7 +35,7 @@ export function refusalOf(error: unknown): Refusal | null {
 	if (known === undefined) return null;
 	const [status, field] = known;
 	const errors = [fault(field, error.code, error.message)];
-	if (status === 404) return new Refusal(404, errors);
+	if (status < 429) return new Refusal(status, errors);
 	const wait = 'retryAfterSeconds' in error ? Number(error.retryAfterSeconds) : RETRY_AFTER_SECONDS;
-	return new Refusal(503, errors, { 'retry-after': String(wait) });
+	return new Refusal(status, errors, { 'retry-after': String(wait) });
 }

@@ -3,10 +3,12 @@ import type { Refusal } from './refusal';
 
 const TITLES: Readonly<Record<number, string>> = {
 	400: 'Bad Request',
+	401: 'Unauthorized',
 	403: 'Forbidden',
 	404: 'Not Found',
 	405: 'Method Not Allowed',
 	406: 'Not Acceptable',
+	409: 'Conflict',
 	413: 'Content Too Large',
 	415: 'Unsupported Media Type',
 	422: 'Unprocessable Content',

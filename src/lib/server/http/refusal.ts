@@ -1,7 +1,7 @@
 import type { FieldError } from '../../types';
 
 /** Statuses with which the interface refuses. */
-export type RefusalStatus = 400 | 404 | 405 | 406 | 413 | 415 | 422 | 429 | 503;
+export type RefusalStatus = 400 | 401 | 403 | 404 | 405 | 406 | 409 | 413 | 415 | 422 | 429 | 503;
 
 /** A request that is not answered, and why, parameter by parameter. */
 export class Refusal extends Error {

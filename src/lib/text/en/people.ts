@@ -1,0 +1,105 @@
+import type { FaultTexts } from '../../types';
+
+/** Words of the pages on which administrators see and change people. */
+export const peopleText = {
+	title: 'People',
+	intro: 'Everybody who has an account.',
+	find: {
+		text: 'Name or address',
+		role: 'Role',
+		allRoles: 'All roles',
+		paused: 'Paused only',
+		show: 'Show'
+	},
+	count: (total: number) =>
+		total === 1 ? 'One person' : `${total.toLocaleString('en-US')} people`,
+	nothing: 'Nobody is found.',
+	all: 'Show everybody',
+	heads: {
+		name: 'Name',
+		address: 'Mail address',
+		role: 'Role',
+		areas: 'For',
+		since: 'Account from',
+		state: 'State'
+	},
+	pausedUntil: (date: string) => `paused until ${date}`,
+	demo: 'demonstration',
+	person: {
+		back: 'People',
+		role: 'Role',
+		rolesHint: 'It counts from their next request on.',
+		areas: 'Divisions that a moderator decides for',
+		submitRole: 'Change the role',
+		roleSaved: 'The role is changed.',
+		pause: 'Pause',
+		pauseNote:
+			'Somebody who is paused reads, and takes away what is theirs, and writes nothing. It ends by itself.',
+		until: 'Until the end of',
+		reason: 'Reason',
+		reasonHint: 'They see it, and it stays on record. Name nobody in it.',
+		submitPause: 'Pause until then',
+		paused: (date: string, reason: string) => `Paused until ${date}: ${reason}`,
+		pauseSaved: 'The pause is set.',
+		resume: 'End the pause now',
+		resumed: 'The pause has ended.',
+		sessions: 'Sessions',
+		noSessions: 'Signed in nowhere.',
+		end: 'Sign out',
+		endNamed: (device: string, since: string) => `Sign out ${device}, since ${since}`,
+		endAll: 'Sign out everywhere',
+		ended: 'Signed out.',
+		record: 'On record',
+		own: 'This is your own account: another administrator decides about it.'
+	},
+	audit: {
+		title: 'Audit trail',
+		intro:
+			'What was done to accounts, and by whom. Nothing here can be changed: each entry carries the hash of the one before.',
+		about: (name: string) => `Entries about ${name}`,
+		heads: { number: 'No.', at: 'When', who: 'Who', what: 'What', whom: 'Whom' },
+		product: 'the console',
+		older: 'Older entries',
+		newest: 'Newest entries',
+		nothing: 'Nothing is on record yet.'
+	},
+	deeds: {
+		'person.joined': () => 'opened an account',
+		'person.left': () => 'deleted the account',
+		'person.password_changed': () => 'changed the password',
+		'person.address_changed': () => 'changed the mail address',
+		'person.second_factor_added': () => 'added a second factor',
+		'person.second_factor_removed': () => 'removed the second factor',
+		'person.role_changed': ({ from, to, areas_to }) => {
+			const areas =
+				Array.isArray(areas_to) && areas_to.length > 0 ? ` for ${areas_to.join(', ')}` : '';
+			return `changed the role from ${from} to ${to}${areas}`;
+		},
+		'person.paused': ({ until, reason }) => `paused until ${String(until).slice(0, 10)}: ${reason}`,
+		'person.resumed': () => 'ended the pause',
+		'person.sessions_ended': ({ sessions }) =>
+			sessions === 1 ? 'signed out of one session' : `signed out of ${sessions} sessions`
+	} as Readonly<Record<string, (detail: Readonly<Record<string, unknown>>) => string>>
+} as const;
+
+/** What is wrong with a field, by field and code; `form` is the form as a whole. */
+export const peopleFaults: FaultTexts = {
+	role: { missing: 'Choose a role.' },
+	until: {
+		missing: 'A date is missing.',
+		not_one: 'This is not a date.',
+		past: 'This day has passed.',
+		too_far: 'A pause lasts a year at most.'
+	},
+	reason: {
+		missing: 'A reason is missing.',
+		too_short: 'A reason has ten characters or more.',
+		too_long: 'A reason has 300 characters at most.'
+	},
+	form: {
+		changed_meanwhile:
+			'Another administrator has changed this person meanwhile. What stands here now is theirs; look again before you change it.',
+		last_administrator: 'This is the last administrator. Make somebody else one first.',
+		own_account: 'Nobody decides about their own account.'
+	}
+};
