@@ -63,7 +63,9 @@ export const handle: Handle = async ({ event, resolve }) => {
 
 /** What was made for somebody is kept by nobody, and what was made for nobody is not shown to somebody. */
 function keepPrivate({ headers }: Response, forSomebody: boolean): void {
-	if (forSomebody) headers.set('cache-control', 'private, no-store');
+	// A file of theirs may stay in their own browser for as long as its address holds.
+	const ownToThem = headers.get('cache-control')?.startsWith('private') ?? false;
+	if (forSomebody && !ownToThem) headers.set('cache-control', 'private, no-store');
 	headers.append('vary', 'cookie');
 }
 

@@ -2,7 +2,10 @@ import { fault, Refusal } from './refusal';
 
 /** Domain errors that are answers to the asker, by their code: which parameter, and which status. */
 const KNOWN: Readonly<
-	Record<string, readonly [status: 401 | 403 | 404 | 409 | 429 | 503, field: string]>
+	Record<
+		string,
+		readonly [status: 400 | 401 | 403 | 404 | 409 | 413 | 422 | 429 | 503, field: string]
+	>
 > = {
 	sign_in_needed: [401, 'session'],
 	not_allowed: [403, 'session'],
@@ -19,6 +22,10 @@ const KNOWN: Readonly<
 	unknown_job: [404, 'id'],
 	unknown_mail: [404, 'id'],
 	unknown_notice: [404, 'id'],
+	broken_form: [400, 'file'],
+	file_refused: [422, 'file'],
+	wrong_place: [409, 'file'],
+	body_too_large: [413, 'body'],
 	storage_away: [503, 'file'],
 	no_tables_yet: [503, 'edition'],
 	service_busy: [503, 'edition'],

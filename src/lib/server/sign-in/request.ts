@@ -4,6 +4,7 @@ import { VISITOR, type Actor, type Person } from '../actor';
 import { config, ConfigurationError } from '../config';
 import { DatabaseAwayError } from '../db';
 import { ground } from '../ground';
+import { unreadFor } from '../inbox';
 import { cookieName } from './cookie';
 
 /** Whether a request carries a session at all. */
@@ -25,6 +26,8 @@ export interface Viewer {
 	readonly role: Person['role'];
 	/** The role on record asks for a second factor. */
 	readonly needsFactor: boolean;
+	/** Notices in their inbox that they have not read. */
+	readonly unread: number;
 }
 
 /**
@@ -35,7 +38,13 @@ export async function viewerOf(actor: () => Promise<Actor>): Promise<Viewer | nu
 	try {
 		const found = await actor();
 		if (found.role === 'visitor') return null;
-		return { name: found.name, role: found.role, needsFactor: found.role !== found.granted };
+		const unread = await unreadFor(ground(), found);
+		return {
+			name: found.name,
+			role: found.role,
+			needsFactor: found.role !== found.granted,
+			unread
+		};
 	} catch (error) {
 		if (error instanceof DatabaseAwayError) return null;
 		throw error;

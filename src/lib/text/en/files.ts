@@ -1,5 +1,12 @@
-import { FILE_BYTES, FILE_PIXELS, type FileRefusal, type FileState } from '../../types';
-import { grouped } from './counts';
+import {
+	FILE_BYTES,
+	FILE_PIXELS,
+	type FaultTexts,
+	type FileRefusal,
+	type FileState,
+	type KeptType
+} from '../../types';
+import { counted, grouped } from './counts';
 
 const MEGABYTES = FILE_BYTES / 1024 ** 2;
 const MEGAPIXELS = FILE_PIXELS / 1e6;
@@ -48,5 +55,61 @@ export const filesText = {
 		checking: 'being checked',
 		ready: 'kept',
 		refused: 'not kept'
-	} satisfies Record<FileState, string>
+	} satisfies Record<FileState, string>,
+	title: 'Your files',
+	intro:
+		'Photographs of plates, stamps and papers. Nobody else sees them until you put them beside a car or a correction. Pictures are turned upright, and the place where they were taken is removed.',
+	crumbs: 'The way to this page',
+	field: {
+		label: 'Add files',
+		one: 'Add a file',
+		hint: `JPEG, PNG, WebP or PDF, up to ${MEGABYTES} MB and ${MEGAPIXELS} megapixels each.`,
+		choose: 'Choose files',
+		send: 'Send it',
+		dropped: 'or drop them here',
+		list: 'Files that you are sending',
+		waits: 'waits its turn',
+		sending: (percent: number) => `${percent} % sent`,
+		checking: 'sent, being checked',
+		ready: 'kept',
+		broken: 'The line broke. What was sent so far is kept; it goes on when you try again.',
+		progress: (name: string) => `How much of ${name} is sent`,
+		again: 'Try again',
+		againNamed: (name: string) => `Try ${name} again`,
+		stop: 'Stop',
+		stopNamed: (name: string) => `Stop sending ${name}`,
+		dismiss: 'Dismiss',
+		dismissNamed: (name: string) => `Dismiss what is said about ${name}`
+	},
+	nothing: 'No files yet',
+	nothingBody:
+		'Begin with the serial plate: a photograph from straight in front, without flash, so that every character can be read.',
+	listed: 'Your files, newest first',
+	count: (n: number) => counted(n, 'file', 'files'),
+	kinds: {
+		'image/jpeg': 'JPEG',
+		'image/png': 'PNG',
+		'application/pdf': 'PDF'
+	} satisfies Record<KeptType, string>,
+	measures: (width: number, height: number) => `${grouped(width)} × ${grouped(height)} pixels`,
+	taken: (moment: string) => `taken ${moment}`,
+	sent: (date: string) => `sent ${date}`,
+	digest: 'SHA-256 of what you sent',
+	open: 'Open',
+	openNamed: (name: string) => `Open ${name}`,
+	save: 'Save',
+	saveNamed: (name: string) => `Save ${name}`,
+	remove: 'Delete',
+	removeNamed: (name: string) => `Delete ${name}`,
+	giveUp: 'Give up',
+	giveUpNamed: (name: string) => `Give up ${name}`,
+	kept: (name: string) => `“${name}” is kept.`,
+	checking: (name: string) => `“${name}” has arrived, and is being checked.`,
+	notKept: (name: string) => `“${name}” was not kept. The reason stands beside it.`,
+	deleted: 'The file is deleted.'
 } as const;
+
+/** Sentences about the field that takes files, by the code of what went wrong. */
+export const fileFaults: FaultTexts = {
+	file: { ...refusals, ...filesText.brokenForm, storage_away: filesText.away }
+};

@@ -5,9 +5,10 @@ export const inboxText = {
 	title: 'Inbox',
 	archiveTitle: 'Archive',
 	unknown: 'There is no such notice in your inbox.',
-	unread: (n: number) => `${n} unread`,
-	/** For the count in the head of each page. */
-	link: 'Inbox',
+	/** The entry in the menu of who is signed in. */
+	menu: (unread: number) => (unread === 0 ? 'Inbox' : `Inbox, ${unread} unread`),
+	/** Behind the number in the head of each page. */
+	unreadWord: 'unread',
 	nothing: 'Nothing in your inbox',
 	nothingBody:
 		'What concerns your account and your work comes here. What you have seen and put away is in the archive.',
