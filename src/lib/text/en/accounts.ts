@@ -159,5 +159,6 @@ export const accountsText = {
 		signOut: 'Sign out',
 		needsFactor: 'Second factor needed'
 	},
+	demoLabel: 'Demonstration',
 	demo: 'Demonstration: its people are invented, and no mail leaves this machine.'
 } as const;
