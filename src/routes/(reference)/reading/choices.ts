@@ -1,4 +1,5 @@
 /** What the form offers beside the field: makers and model years. */
+import { readyOptions } from '$lib/components/form/ready-options';
 import type { Choice, ChoiceGroup } from '$lib/components/form/SelectField.svelte';
 import { MAKER_LIST, makerNamed } from '$lib/server/readings';
 import { entryText as words } from '$lib/text/en/entry';
@@ -9,7 +10,7 @@ const any: Choice = { value: '', label: words.any };
 const isOwnName = (division: string): boolean => makerNamed(division)?.division === division;
 
 /** Corporations, each over its divisions. */
-export const makerChoices: readonly (Choice | ChoiceGroup)[] = [
+const makerChoices: readonly (Choice | ChoiceGroup)[] = [
 	any,
 	...MAKER_LIST.filter(({ key }) => key !== 'other').map(({ key, name, divisions }) => {
 		const own = divisions.filter((division) => isOwnName(division.name));
@@ -24,6 +25,17 @@ export const makerChoices: readonly (Choice | ChoiceGroup)[] = [
 	})
 ];
 
+/** Options of all makers, with one of them chosen. */
+export const makerOptions = readyOptions(makerChoices);
+
+const names = new Map(
+	makerChoices
+		.flatMap((choice) => ('choices' in choice ? choice.choices : []))
+		.map(({ value, label }) => [value, label])
+);
+/** The name of a choice; empty for none. */
+export const makerNameOf = (choice: string): string => names.get(choice) ?? '';
+
 /** The corporation that a name stands for or belongs to, for the drawing of places; empty for none. */
 export const corporationOf = (name: string): string => makerNamed(name)?.maker ?? '';
 
@@ -34,14 +46,18 @@ export function makerChoice(name: string): string {
 	return named.division?.toLowerCase() ?? named.maker;
 }
 
-/** Model years from the first that we speak of to the next. */
-export function yearChoices(now: Date): readonly Choice[] {
+const optionsTo = new Map<number, ReturnType<typeof readyOptions>>();
+
+/** Options of model years from the first that we speak of to the next, with one of them chosen. */
+export function yearOptions(now: Date): (chosen: string) => string {
 	const last = now.getUTCFullYear() + 1;
-	return [
-		any,
-		...Array.from({ length: last - FIRST_YEAR + 1 }, (_, offset) => {
-			const year = String(FIRST_YEAR + offset);
-			return { value: year, label: year };
-		})
-	];
+	const known = optionsTo.get(last);
+	if (known) return known;
+	const years = Array.from({ length: last - FIRST_YEAR + 1 }, (_, offset) => {
+		const year = String(FIRST_YEAR + offset);
+		return { value: year, label: year };
+	});
+	const options = readyOptions([any, ...years]);
+	optionsTo.set(last, options);
+	return options;
 }

@@ -1,4 +1,3 @@
-import type { Choice, ChoiceGroup } from '$lib/components/form/SelectField.svelte';
 import type { Problem } from '$lib/types';
 import type { CheckDigitWork } from './check-digit-work';
 import type { ReadingView } from './view';
@@ -65,8 +64,11 @@ export interface AnswerView {
 export interface EntryView {
 	readonly asked: AskedView;
 	readonly faults: readonly FieldFault[];
-	readonly makers: readonly (Choice | ChoiceGroup)[];
-	readonly years: readonly Choice[];
+	/** Name of the chosen maker; empty for none. */
+	readonly makerName: string;
+	/** Options of the form, as `readyOptions` writes them. */
+	readonly makers: string;
+	readonly years: string;
 }
 export interface EmptyView {
 	/** The corporation that the chosen maker is or belongs to, for the drawing of places; empty for none. */

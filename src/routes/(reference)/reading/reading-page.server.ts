@@ -5,7 +5,7 @@ import { readAgainst, readRequest } from '$lib/server/readings';
 import { current, editionAt } from '$lib/server/reference';
 import { entryText } from '$lib/text/en/entry';
 import { answerView } from './answer-view';
-import { corporationOf, makerChoice, makerChoices, yearChoices } from './choices';
+import { corporationOf, makerChoice, makerNameOf, makerOptions, yearOptions } from './choices';
 import type { AskedView, EmptyView, FieldFault, ReadingPage } from './page-data';
 import { viewOf } from './view';
 
@@ -51,7 +51,13 @@ function entryOf(asked: Asked, typed: string, faults: readonly FieldFault[], now
 		maker: asked.maker === undefined ? '' : makerChoice(asked.maker),
 		year: asked.year ?? ''
 	};
-	return { asked: view, faults, makers: makerChoices, years: yearChoices(now) };
+	return {
+		asked: view,
+		faults,
+		makerName: makerNameOf(view.maker),
+		makers: makerOptions(view.maker),
+		years: yearOptions(now)(view.year)
+	};
 }
 
 /** The worked example, read against the present tables like anything else. */
