@@ -6,6 +6,7 @@ import { config } from '$lib/server/config';
 import { clearGround, layGround } from '$lib/server/ground';
 import { handOver } from '$lib/server/handover';
 import { problemResponse, refusalOf, refuse } from '$lib/server/http';
+import { presentPages } from '$lib/server/kept-pages';
 import { log, maskAddress } from '$lib/server/log';
 import { start, stop, type WatchEvent } from '$lib/server/reference';
 import { actorOfRequest, auth, checkSignIn, hasSession } from '$lib/server/sign-in';
@@ -21,7 +22,7 @@ export const init: ServerInit = async () => {
 	// The adapter's own server ends with this event, ours with the function handed over.
 	process.on('sveltekit:shutdown', () => void stopOnce());
 	checkSignIn();
-	handOver({ config: config(), log: log(), maskAddress, stop: stopOnce });
+	handOver({ config: config(), log: log(), maskAddress, present: presentPages, stop: stopOnce });
 	const ground = layGround(config().databaseUrl);
 	await start(config().databaseUrl, { onEvent: tell });
 	if (config().demo)

@@ -453,6 +453,17 @@ describe('fixed readings', () => {
 		expect(handler).toHaveBeenCalledTimes(2);
 	});
 
+	it('are pages too, while they hold, and do not say so', async () => {
+		const { handler, port } = await startCounting({ 'x-kept-while': '' });
+		for (let times = 0; times < 2; times++) {
+			const { headers } = await ask(port, '/?text=1', { headers: { accept: 'text/html' } });
+			expect(headers).not.toHaveProperty('x-kept-while');
+		}
+		expect(handler).toHaveBeenCalledTimes(1);
+		await ask(port, '/?text=1', { headers: { cookie: 'a=b' } });
+		expect(handler).toHaveBeenCalledTimes(2);
+	});
+
 	it.each([
 		['may change', { 'cache-control': 'no-cache' }],
 		['set a cookie', { ...FIXED, 'set-cookie': 'a=b' }]

@@ -1,7 +1,12 @@
-// Readings that can never change, kept ready: those that name both edition and reader.
+// Readings kept ready: those that can never change, as they name both edition and reader, and the
+// pages of readings for as long as what they were made from is the present.
 import { compressWhole, SMALLEST, weakTag } from './compression.mjs';
 
 const READINGS = '/api/v1/readings?';
+/** The reading page is the one at the top. */
+const PAGE = '/?';
+/** With this the application says of a page for how long it holds; it stays inside. */
+export const KEPT_WHILE = 'x-kept-while';
 /** Larger answers are rare, and would push out many small ones. */
 const LARGEST = 256 * 1024;
 /** The longest text that is read has 600 characters. */
@@ -16,6 +21,7 @@ const OVERHEAD = 1024;
  * @typedef {object} Entry
  * @property {[name: string, value: string][]} headers as the application and the server set them
  * @property {string | undefined} etag
+ * @property {string | undefined} while what must be the present; undefined for what never changes
  * @property {Map<Form, { body: Buffer, head: string[] }>} forms ready to be sent
  * @property {number} bytes
  * @property {boolean} held false once pushed out, perhaps while a form is being made
@@ -26,18 +32,22 @@ const OVERHEAD = 1024;
  * @param {import('node:http').IncomingMessage} request
  */
 export function mayBeFixed({ method, url = '', headers }) {
-	if (method !== 'GET' || !url.startsWith(READINGS) || url.length > LONGEST_ADDRESS) return false;
-	if (!url.includes('edition=') || !url.includes('reader=')) return false;
+	if (method !== 'GET' || url.length > LONGEST_ADDRESS) return false;
 	if (headers.cookie !== undefined || headers.authorization !== undefined) return false;
 	const { accept } = headers;
+	if (url.startsWith(PAGE)) return accept === undefined || /\*\/\*|text\/(?:html|\*)/.test(accept);
+	if (!url.startsWith(READINGS)) return false;
+	if (!url.includes('edition=') || !url.includes('reader=')) return false;
 	return accept === undefined || /\*\/\*|application\/(?:json|\*)/.test(accept);
 }
 
 /**
- * One key for all ways to write an address: parameters in order of their names, decoded.
+ * One key for all ways to write an address: parameters in order of their names, decoded. Of a page
+ * there is one way only: others are led to it.
  * @param {string} address
  */
 function keyOf(address) {
+	if (address.startsWith(PAGE)) return address;
 	const parameters = [...new URLSearchParams(address.slice(READINGS.length))];
 	// Order of equal names is kept: which of them counts is the application's decision.
 	parameters.sort(([a], [b]) => (a < b ? -1 : a > b ? 1 : 0));
@@ -45,7 +55,7 @@ function keyOf(address) {
 }
 
 /** Headers that belong to one answer and not to what is kept. */
-const OWN_TO_ONE = new Set(['connection', 'content-length', 'date', 'x-request-id']);
+const OWN_TO_ONE = new Set(['connection', 'content-length', 'date', 'x-request-id', KEPT_WHILE]);
 
 /** A bounded store; what was not asked for longest goes first. */
 export class FixedReadings {
@@ -56,9 +66,14 @@ export class FixedReadings {
 	#bytes = 0;
 	#most;
 	#mostBytes;
+	#present;
 
-	/** @param {{ most?: number, mostBytes?: number }} [bounds] */
-	constructor({ most = 20_000, mostBytes = 64 * 1024 * 1024 } = {}) {
+	/**
+	 * @param {{ most?: number, mostBytes?: number, present?: () => string }} [options] `present` answers
+	 *   what pages are made from now
+	 */
+	constructor({ most = 20_000, mostBytes = 64 * 1024 * 1024, present = () => '' } = {}) {
+		this.#present = present;
 		this.#most = most;
 		this.#mostBytes = mostBytes;
 	}
@@ -76,6 +91,10 @@ export class FixedReadings {
 		const written = this.#keys.get(address);
 		const key = written ?? keyOf(address);
 		const entry = this.#entries.get(key);
+		if (entry?.while !== undefined && entry.while !== this.#present()) {
+			this.#drop(key);
+			return undefined;
+		}
 		if (entry && written === undefined) this.#remember(address, key);
 		if (entry) {
 			this.#entries.delete(key);
@@ -91,7 +110,7 @@ export class FixedReadings {
 	}
 
 	/**
-	 * Keeps an answer when it says of itself that it cannot change.
+	 * Keeps an answer when it says of itself that it cannot change, or for how long it holds.
 	 * @param {string} address path and query
 	 * @param {number} status
 	 * @param {import('node:http').OutgoingHttpHeaders} headers
@@ -108,7 +127,14 @@ export class FixedReadings {
 		}
 		const etag = headers.etag === undefined ? undefined : String(headers.etag);
 		/** @type {Entry} */
-		const entry = { headers: kept, etag, forms: new Map(), bytes: OVERHEAD, held: true };
+		const entry = {
+			headers: kept,
+			etag,
+			while: headers[KEPT_WHILE] === undefined ? undefined : String(headers[KEPT_WHILE]),
+			forms: new Map(),
+			bytes: OVERHEAD,
+			held: true
+		};
 		this.#drop(key);
 		this.#entries.set(key, entry);
 		this.#bytes += entry.bytes;
@@ -166,10 +192,11 @@ export class FixedReadings {
 }
 
 /**
- * Whether an answer says of itself that it will never change.
+ * Whether an answer says of itself that it will never change, or for how long it holds.
  * @param {number} status @param {import('node:http').OutgoingHttpHeaders} headers
  */
 export const isFixed = (status, headers) =>
 	status === 200 &&
-	/\bimmutable\b/.test(String(headers['cache-control'] ?? '')) &&
-	headers['set-cookie'] === undefined;
+	headers['set-cookie'] === undefined &&
+	(headers[KEPT_WHILE] !== undefined ||
+		/\bimmutable\b/.test(String(headers['cache-control'] ?? '')));

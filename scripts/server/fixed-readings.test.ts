@@ -48,4 +48,20 @@ describe('FixedReadings', () => {
 		keep(readings, 'a');
 		expect(readings).toMatchObject({ size: 1, bytes: once });
 	});
+
+	it('keeps a page for as long as what it was made from is the present', () => {
+		let present = '2.2026';
+		const readings = new FixedReadings({ present: () => present });
+		const page = { 'content-type': 'text/html', 'x-kept-while': '2.2026' };
+		expect(readings.keep('/?text=a', 200, page, Buffer.from('page'))).toBe(true);
+		expect(readings.get('/?text=a')?.headers).toEqual([['content-type', 'text/html']]);
+		present = '3.2026';
+		expect(readings.get('/?text=a')).toBeUndefined();
+		expect(readings).toMatchObject({ size: 0, bytes: 0 });
+	});
+
+	it('keeps no page that does not say for how long', () => {
+		const readings = new FixedReadings();
+		expect(readings.keep('/?text=a', 200, { etag: '"a"' }, Buffer.from('page'))).toBe(false);
+	});
 });

@@ -2,7 +2,7 @@
 // refusals, compression where it is welcome, a copy of what can be kept.
 import { ServerResponse } from 'node:http';
 import { chooseEncoding, isCompressible, makeEncoder, SMALLEST, weakTag } from './compression.mjs';
-import { isFixed } from './fixed-readings.mjs';
+import { isFixed, KEPT_WHILE } from './fixed-readings.mjs';
 import { PROBLEM_TYPE, problemBody } from './problems.mjs';
 import { namesStamp, securityHeaders } from './security-headers.mjs';
 
@@ -24,7 +24,7 @@ const NOWHERE = { secure: false, pagePolicy: () => undefined, isDraining: () => 
 /** @extends {ServerResponse<Request>} */
 export class GuardedResponse extends ServerResponse {
 	requestId = '';
-	/** Is handed the answer as it was before compression, if it can never change. @type {Keep | null} */
+	/** Is handed the answer as it was before compression, if it can be kept. @type {Keep | null} */
 	keep = null;
 	/** @type {import('node:stream').Transform | null} */
 	#encoder = null;
@@ -55,6 +55,7 @@ export class GuardedResponse extends ServerResponse {
 		if (compressible) this.appendVary('accept-encoding');
 		if (this.keep && isFixed(status, this.getHeaders()))
 			this.#copy = { headers: { ...this.getHeaders() }, pieces: [] };
+		this.removeHeader(KEPT_WHILE);
 		if (compressible) this.#compress();
 		return super.writeHead(status);
 	}

@@ -5,6 +5,7 @@ import { setTimeout as pause } from 'node:timers/promises';
 import { loadApplication } from './application.mjs';
 import { readClientFiles } from './client-files.mjs';
 import { createServer } from './create-server.mjs';
+import { FixedReadings } from './fixed-readings.mjs';
 import { localOrigin } from './origin.mjs';
 import { visitorAddress } from './visitor.mjs';
 
@@ -66,11 +67,12 @@ export async function serve({ build }) {
 	// The sign-in library would take the name it is called by from the request.
 	if (process.env.ORIGIN) process.env.AUTH_URL ||= process.env.ORIGIN;
 	const application = await loadApplication(build);
-	const { config, log, handler, maskAddress } = application;
+	const { config, log, handler, maskAddress, present } = application;
 	const { server, drain } = createServer({
 		handler,
 		settings: config,
 		files: readClientFiles(build),
+		readings: new FixedReadings({ present }),
 		events: {
 			answered: log.isLevelEnabled('info')
 				? (request, response, started) =>

@@ -9,6 +9,8 @@ export interface Handover {
 	readonly config: Config;
 	readonly log: Log;
 	readonly maskAddress: typeof maskAddress;
+	/** What pages are made from now: what was made from something else is out of date. */
+	readonly present: () => string;
 	/** Closes what the application holds open; waits until it is. */
 	readonly stop: () => Promise<void>;
 }
