@@ -22,6 +22,24 @@ export function withParameters(
 	return `${url.pathname}${query && `?${query}`}${fragment && `#${fragment}`}`;
 }
 
+/** The pages around one, of a list that is so long. */
+export function pagingOf(
+	url: URL,
+	page: number,
+	total: number,
+	size: number,
+	fragment = ''
+): Paging {
+	const of = Math.max(1, Math.ceil(total / size));
+	const address = (n: number) => withParameters(url, { page: n === 1 ? null : n }, fragment);
+	return {
+		page,
+		of,
+		previous: page > 1 ? address(Math.min(page - 1, of)) : null,
+		next: page < of ? address(page + 1) : null
+	};
+}
+
 /**
  * The page that an address asks for, and the part of a list that it shows. A number beyond the last page
  * means the last.
@@ -35,14 +53,8 @@ export function pageOfList<T>(
 	const of = Math.max(1, Math.ceil(list.length / size));
 	const asked = Number(url.searchParams.get('page') ?? 1);
 	const page = Number.isInteger(asked) ? Math.min(Math.max(asked, 1), of) : 1;
-	const address = (n: number) => withParameters(url, { page: n === 1 ? null : n }, fragment);
 	return {
 		items: list.slice((page - 1) * size, page * size),
-		paging: {
-			page,
-			of,
-			previous: page > 1 ? address(page - 1) : null,
-			next: page < of ? address(page + 1) : null
-		}
+		paging: pagingOf(url, page, list.length, size, fragment)
 	};
 }
