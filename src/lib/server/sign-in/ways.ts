@@ -1,5 +1,5 @@
 import { AuthError, CredentialsSignin } from '@auth/sveltekit';
-import type { RequestEvent } from '@sveltejs/kit';
+import type { Cookies, RequestEvent } from '@sveltejs/kit';
 import {
 	endByCookie,
 	inSteadyTime,
@@ -14,6 +14,14 @@ import { cookieName } from './cookie';
 /** What a request has to bring along for the library: nothing of what it says about itself. */
 const CARRIED = ['cookie', 'user-agent'] as const;
 
+/** Cookies of which the library sets none but the session's: where to go is no business of its. */
+const sessionOnly = (cookies: Cookies): Cookies => ({
+	...cookies,
+	set: (name, value, options) => {
+		if (name === cookieName()) cookies.set(name, value, options);
+	}
+});
+
 /** The request of an action in the form that the library reads. */
 function asked(event: RequestEvent, fields: Readonly<Record<string, string>>): RequestEvent {
 	const headers = new Headers();
@@ -23,7 +31,11 @@ function asked(event: RequestEvent, fields: Readonly<Record<string, string>>): R
 	}
 	// Where to go afterwards is decided by the page: the library would go by its own name for this host.
 	const body = new URLSearchParams({ ...fields, redirectTo: '/', redirect: '' });
-	return { ...event, request: new Request(event.url, { method: 'POST', headers, body }) };
+	return {
+		...event,
+		cookies: sessionOnly(event.cookies),
+		request: new Request(event.url, { method: 'POST', headers, body })
+	};
 }
 
 /** What the library met, out of its wrappings. */
@@ -42,10 +54,6 @@ async function enter(
 		await auth.signIn(asked(event, fields));
 	} catch (error) {
 		throw error instanceof CredentialsSignin ? refused() : causeOf(error);
-	} finally {
-		// The library notes where to go; nobody reads it.
-		for (const { name } of event.cookies.getAll())
-			if (name.endsWith('authjs.callback-url')) event.cookies.delete(name, { path: '/' });
 	}
 }
 
