@@ -1,5 +1,5 @@
 import { asking, type Transaction } from '../db';
-import { jobs, outbox, savedReadings } from '../db/repositories';
+import { files, jobs, notices, outbox, savedReadings } from '../db/repositories';
 import type { Ground } from '../ground';
 
 /** Something that a person has here beside the account itself: it is theirs to take along, and goes with them. */
@@ -19,6 +19,45 @@ export const BELONGINGS: readonly Belonging[] = [
 		of: ({ database }, user_id) => asking(() => savedReadings.readingsOf(database, user_id)),
 		remove: ({ database }, transaction, user_id) =>
 			savedReadings.forgetReadingsOf(database, user_id, transaction)
+	},
+	{
+		name: 'files',
+		of: async ({ database }, user_id) =>
+			(await asking(() => files.filesOf(database, user_id))).map(
+				({ id, name, state, media_type, bytes, sha256, taken_at, created_at }) => ({
+					id,
+					name,
+					state,
+					media_type,
+					bytes,
+					sha256,
+					taken_at,
+					created_at
+				})
+			),
+		// Nobody reaches them from now on; what is stored goes with the next clean-up.
+		remove: ({ database, clock }, transaction, user_id) =>
+			files.deleteFilesOf(database, user_id, clock(), transaction)
+	},
+	{
+		name: 'inbox',
+		of: async ({ database }, user_id) => ({
+			notices: (await asking(() => notices.allNoticesOf(database, user_id))).map(
+				({ kind, template, data, created_at, read_at, archived_at }) => ({
+					kind,
+					template,
+					data,
+					created_at,
+					read_at,
+					archived_at
+				})
+			),
+			preferences: (await asking(() => notices.preferencesOf(database, user_id))).map(
+				({ kind, mail }) => ({ kind, mail })
+			)
+		}),
+		remove: ({ database }, transaction, user_id) =>
+			notices.forgetNoticesOf(database, user_id, transaction)
 	},
 	{
 		name: 'background_work',

@@ -142,7 +142,7 @@ export async function deleteFile(
 	return changed > 0;
 }
 
-/** Marks all files of somebody as deleted. */
+/** Marks all files of somebody as deleted, and takes their name and owner off at once. */
 export async function deleteFilesOf(
 	{ models }: Database,
 	owner: string,
@@ -150,7 +150,7 @@ export async function deleteFilesOf(
 	transaction: Transaction
 ): Promise<void> {
 	await models.files.update(
-		{ deleted_at: now },
+		{ deleted_at: now, owner: null, name: '' },
 		{ where: { owner, deleted_at: null }, transaction }
 	);
 }
