@@ -4,6 +4,7 @@ export * from './dates';
 export * from './fields';
 export * from './files';
 export * from './forms';
+export * from './ids';
 export * from './jobs';
 export * from './makers';
 export * from './name-schemas';

@@ -11,6 +11,8 @@ export const accountText = {
 		`You are a ${role} for ${areas}. Your account is from ${since}.`,
 	standingPlain: (role: string, since: string) =>
 		`You are ${role === 'administrator' ? 'an' : 'a'} ${role}. Your account is from ${since}.`,
+	standingOf: (role: string, since: string) =>
+		`${role.slice(0, 1).toUpperCase()}${role.slice(1)}. Account from ${since}.`,
 	consent: (license: string, date: string) =>
 		`What you contribute is under ${license}, as you agreed on ${date}.`,
 	paused: (until: string, reason: string) =>

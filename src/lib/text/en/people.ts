@@ -27,11 +27,16 @@ export const peopleText = {
 	demo: 'demonstration',
 	person: {
 		back: 'People',
+		saved: {
+			role: 'The role is changed.',
+			pause: 'The pause is set.',
+			resumed: 'The pause has ended.',
+			sessions: 'Signed out.'
+		},
 		role: 'Role',
 		rolesHint: 'It counts from their next request on.',
 		areas: 'Divisions that a moderator decides for',
 		submitRole: 'Change the role',
-		roleSaved: 'The role is changed.',
 		pause: 'Pause',
 		pauseNote:
 			'Somebody who is paused reads, and takes away what is theirs, and writes nothing. It ends by itself.',
@@ -40,15 +45,12 @@ export const peopleText = {
 		reasonHint: 'They see it, and it stays on record. Name nobody in it.',
 		submitPause: 'Pause until then',
 		paused: (date: string, reason: string) => `Paused until ${date}: ${reason}`,
-		pauseSaved: 'The pause is set.',
 		resume: 'End the pause now',
-		resumed: 'The pause has ended.',
 		sessions: 'Sessions',
 		noSessions: 'Signed in nowhere.',
 		end: 'Sign out',
 		endNamed: (device: string, since: string) => `Sign out ${device}, since ${since}`,
 		endAll: 'Sign out everywhere',
-		ended: 'Signed out.',
 		record: 'On record',
 		own: 'This is your own account: another administrator decides about it.'
 	},
