@@ -6,6 +6,7 @@ import type { HelpPage } from './pages';
 import privacyOfNumbers from './privacy-of-numbers.md';
 import whatAReadingTells from './what-a-reading-tells.md';
 import whoDecides from './who-decides.md';
+import yourAccountAndYourData from './your-account-and-your-data.md';
 
 export type { HelpPage, HelpPart } from './pages';
 
@@ -16,7 +17,8 @@ export const HELP_PAGES: readonly HelpPage[] = [
 	howRowsAreRated,
 	identityPlatesAndTheLaw,
 	whoDecides,
-	privacyOfNumbers
+	privacyOfNumbers,
+	yourAccountAndYourData
 ];
 
 export const helpPage = (slug: string): HelpPage | undefined =>
