@@ -1,3 +1,5 @@
+import { readFileSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
 import adapter from '@sveltejs/adapter-node';
 import { vitePreprocess } from '@sveltejs/vite-plugin-svelte';
 
@@ -16,12 +18,31 @@ const announcer = {
 			: undefined
 };
 
+// What our own server tells the adapter stands under names of its own (scripts/server/application.mjs).
+const node = adapter({ out: 'build', envPrefix: 'ADAPTER_' });
+
+/**
+ * The manifest imports the route matchers anew for every request, which costs as much as reading a
+ * serial; they are kept here, as its other modules are.
+ * @type {import('@sveltejs/kit').Adapter['adapt']}
+ */
+async function adapt(builder) {
+	const file = join(builder.getServerDirectory(), 'manifest.js');
+	const manifest = readFileSync(file, 'utf8');
+	const kept = manifest.replace(
+		/matchers: (async \(\) => \{[^]*?return \{[^}]*\};\s*\})/,
+		'matchers: __memo($1)'
+	);
+	if (kept === manifest) throw new Error('The manifest writes its matchers in another way now.');
+	writeFileSync(file, kept);
+	await node.adapt(builder);
+}
+
 /** @type {import('@sveltejs/kit').Config} */
 export default {
 	preprocess: [announcer, vitePreprocess()],
 	kit: {
-		// What our own server tells the adapter stands under names of its own (scripts/server/application.mjs).
-		adapter: adapter({ out: 'build', envPrefix: 'ADAPTER_' }),
+		adapter: { ...node, adapt },
 		typescript: {
 			config: (config) => ({
 				...config,
