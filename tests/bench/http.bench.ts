@@ -70,8 +70,12 @@ const sideBySide = (run: Run) => async (): Promise<number> =>
 		}
 	});
 
-const rate = (url: string) => async (): Promise<number> =>
-	(await load(url, { seconds: SECONDS })).rate;
+const rate =
+	(url: string, headers: Readonly<Record<string, string>> = {}) =>
+	async (): Promise<number> =>
+		(await load(url, { seconds: SECONDS, headers })).rate;
+/** Pages for who sends a cookie are kept by nobody: each is read and drawn. */
+const COOKIE = { cookie: 'theme=dark' };
 /** Each request another serial: nothing of one answer helps the next. The bare route is asked the same way. */
 const computed = (origin: string, path: string) => async (): Promise<number> =>
 	(
@@ -107,6 +111,15 @@ export const figures = [
 		unit: '×',
 		direction: 'at least',
 		run: sideBySide(({ product, bare }) => ratioOf(rate(product + PAGE), rate(`${bare}/page`)))
+	},
+	{
+		name: 'Reading page that is drawn anew each time, against that page',
+		bound: 0.5,
+		unit: '×',
+		direction: 'at least',
+		run: sideBySide(({ product, bare }) =>
+			ratioOf(rate(product + PAGE, COOKIE), rate(`${bare}/page`, COOKIE))
+		)
 	},
 	{
 		name: 'Script of /, compressed',
