@@ -51,3 +51,13 @@ export type KeptType = (typeof KEPT_TYPES)[number];
  */
 export const RENDITIONS = ['whole', 'view', 'thumb'] as const;
 export type Rendition = (typeof RENDITIONS)[number];
+
+/** How a file stands that a page has sent, as the page is told. */
+export interface SentFileState {
+	readonly id: string;
+	readonly state: FileState;
+	/** Why it is not kept; null when it is, or may be. */
+	readonly message: string | null;
+	/** Where its picture for lists can be seen, for an hour; null when it has none. */
+	readonly thumb: string | null;
+}
