@@ -50,6 +50,8 @@ export default {
 			})
 		},
 		// Hashes, not nonces: a page can then be kept in a cache without carrying a stale nonce.
+		// hooks.server.ts looks at all that changes something, not at forms alone.
+		csrf: { trustedOrigins: ['*'] },
 		csp: {
 			mode: 'hash',
 			directives: {

@@ -3,6 +3,7 @@ import { building } from '$app/environment';
 import { ensureDemoPeople } from '$lib/server/accounts';
 import type { Actor } from '$lib/server/actor';
 import { config } from '$lib/server/config';
+import { isForeign } from '$lib/server/foreign';
 import { clearGround, layGround } from '$lib/server/ground';
 import { handOver } from '$lib/server/handover';
 import { problemResponse, refusalOf, refuse } from '$lib/server/http';
@@ -37,16 +38,12 @@ function tell(event: WatchEvent): void {
 }
 
 const LINK_CALLBACK = '/auth/callback/link';
-const READS = new Set(['GET', 'HEAD', 'OPTIONS']);
 
 export const handle: Handle = async ({ event, resolve }) => {
 	const { request, locals, url } = event;
 	locals.requestId = request.headers.get('x-request-id') ?? randomBytes(8).toString('hex');
 
-	// The framework looks at forms only; a page elsewhere must not send JSON in a visitor's name either.
-	const origin = request.headers.get('origin');
-	if (!READS.has(request.method) && origin !== null && origin !== url.origin)
-		return problemResponse(403, errorText.foreign);
+	if (isForeign(request, url)) return problemResponse(403, errorText.foreign);
 
 	let asked: Promise<Actor> | undefined;
 	locals.actor = () => (asked ??= actorOfRequest(event));
@@ -56,7 +53,8 @@ export const handle: Handle = async ({ event, resolve }) => {
 		request.method === 'GET' && url.pathname === LINK_CALLBACK
 			? await auth.handle({ event, resolve })
 			: await resolve(event);
-	if (asked !== undefined) keepPrivate(response, hasSession(event));
+	const opened = response.headers.has('set-cookie');
+	if (asked !== undefined || opened) keepPrivate(response, opened || hasSession(event));
 	return locals.failure && response.status === 500
 		? answerFailure(response, locals.failure, url.pathname.startsWith('/api/'))
 		: response;
