@@ -1,4 +1,4 @@
-import type { NoticeKind, NoticeMail } from '../../types';
+import { NOTICE_KINDS, type FaultTexts, type NoticeKind, type NoticeMail } from '../../types';
 
 /** The inbox: its pages, and the page behind the link in a mail. */
 export const inboxText = {
@@ -16,6 +16,8 @@ export const inboxText = {
 	nothingArchivedBody: 'What you put away from the inbox stays here for a year.',
 	new: 'new',
 	open: 'Open',
+	openNamed: (title: string) => `Open: ${title}`,
+	moveNamed: (what: string, title: string) => `${what}: ${title}`,
 	archive: 'Put away',
 	back: 'Back to the inbox',
 	readAll: 'Mark all as read',
@@ -56,8 +58,13 @@ export const inboxText = {
 		stays: 'The notices still stand in your inbox. You can choose anew there at any time.',
 		confirm: 'Send me no more of them',
 		done: 'You will get no more mails of this kind.',
-		preferences: 'All notices by mail',
+		preferences: { name: 'All notices by mail', address: '/inbox/preferences' },
 		broken:
 			'This link is not whole. Copy it from the mail once more, or sign in and choose in your inbox.'
 	}
 } as const;
+
+/** Sentences beside each kind of notice, by the code of what went wrong. */
+export const preferenceFaults: FaultTexts = Object.fromEntries(
+	NOTICE_KINDS.map((kind) => [kind, { unknown: 'Choose one of the three.' }])
+);

@@ -6,7 +6,7 @@ export const mailboxText = {
 	nothing: 'No mail yet',
 	nothingBody:
 		'Sign up, or ask for a sign-in link: what would be sent to you is here a second later.',
-	nothingOffer: { name: 'Sign in', address: '/sign-in' },
+	nothingOffer: { name: 'Sign in', address: '/signin' },
 	heads: { subject: 'Subject', to: 'To', at: 'Sent' },
 	noSubject: 'no subject',
 	all: 'All mail',
