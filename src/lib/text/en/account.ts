@@ -26,7 +26,8 @@ export const accountText = {
 	},
 	address: {
 		title: 'Mail address',
-		present: (address: string) => `Your address is ${address}. It is shown to nobody.`,
+		present: (address: string) =>
+			`Your address is ${address}. Nobody but the administrators sees it.`,
 		field: 'New mail address',
 		hint: 'We write to both addresses. The new one counts once its link is opened.',
 		submit: 'Change the address'

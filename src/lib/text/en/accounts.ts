@@ -109,7 +109,7 @@ export const accountsText = {
 	signUp: {
 		title: 'Open an account',
 		intro:
-			'An account is free. Your address is shown to nobody; your name stands beside what you contribute.',
+			'An account is free. Nobody but the administrators sees your address; your name stands beside what you contribute.',
 		nameHint: 'As it shall stand beside your corrections. It need not be your full name.',
 		addressHint: 'We write to it, to see that it is yours. Your password is chosen after that.',
 		consent: 'What I contribute may be used under CC BY-SA 4.0',
@@ -160,5 +160,6 @@ export const accountsText = {
 		needsFactor: 'Second factor needed'
 	},
 	demoLabel: 'Demonstration',
-	demo: 'Demonstration: its people are invented, and no mail leaves this machine.'
+	demo: 'Demonstration: its people are invented, and no mail leaves this machine.',
+	demoMailbox: 'Read the mail'
 } as const;
