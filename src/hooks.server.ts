@@ -10,8 +10,15 @@ import { problemResponse, refusalOf, refuse } from '$lib/server/http';
 import { presentPages } from '$lib/server/kept-pages';
 import { log, maskAddress } from '$lib/server/log';
 import { start, stop, type WatchEvent } from '$lib/server/reference';
-import { actorOfRequest, auth, checkSignIn, hasSession } from '$lib/server/sign-in';
+import {
+	actorOfRequest,
+	auth,
+	checkSignIn,
+	hasSession,
+	waitBeforeEntry
+} from '$lib/server/sign-in';
 import { errorText } from '$lib/text/en';
+import { interfaceText } from '$lib/text/en/interface';
 import type { Handle, HandleServerError, ServerInit } from '@sveltejs/kit';
 
 let stopped: Promise<void> | undefined;
@@ -44,6 +51,10 @@ export const handle: Handle = async ({ event, resolve }) => {
 	locals.requestId = request.headers.get('x-request-id') ?? randomBytes(8).toString('hex');
 
 	if (isForeign(request, url)) return problemResponse(403, errorText.foreign);
+
+	const wait = request.method === 'POST' ? waitBeforeEntry(event) : 0;
+	if (wait > 0)
+		return problemResponse(429, interfaceText.tooMany(wait), [], { 'retry-after': String(wait) });
 
 	let asked: Promise<Actor> | undefined;
 	locals.actor = () => (asked ??= actorOfRequest(event));

@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import { afterAll, describe, expect, inject, it } from 'vitest';
 import { ask, cookieFor, cookieSet, type Asked } from '../fixtures/asking';
+import { startBuiltServer } from '../fixtures/built-server';
 import { openPage } from '../fixtures/browser';
 import { linkIn, mailTo } from '../fixtures/mailbox';
 import { addMember, builtDatabase, newAddress, PASSWORD } from '../fixtures/members';
@@ -130,6 +131,32 @@ describe('a link in a mail', () => {
 		for (const { status, body } of answers) {
 			expect(status).toBe(400);
 			expect(body).toContain('This link has lapsed');
+		}
+	});
+});
+
+describe('a flood of attempts', () => {
+	it('is turned away before anything is looked at; who reads goes on', async () => {
+		const server = await startBuiltServer({
+			...inject('builtEnvironment'),
+			ENTRIES_PER_MINUTE: '3',
+			LOG_LEVEL: 'warn'
+		});
+		try {
+			const { origin } = server;
+			const body = new URLSearchParams({ address: newAddress(), password: 'not this one' });
+			const post = (path: string) =>
+				fetch(origin + path, { method: 'POST', headers: { origin, accept: 'text/html' }, body });
+			for (const path of ['/signin', '/signin/link', '/signup'])
+				expect((await post(path)).status).not.toBe(429);
+			const refused = await post('/signin');
+			expect(refused.status).toBe(429);
+			expect(Number(refused.headers.get('retry-after'))).toBeGreaterThan(0);
+			expect(await refused.json()).toMatchObject({ title: 'Too Many Requests' });
+			expect((await fetch(`${origin}/signin`)).status).toBe(200);
+			expect((await fetch(`${origin}/api/v1/readings?text=EB5`)).status).toBe(200);
+		} finally {
+			await server.end();
 		}
 	});
 });

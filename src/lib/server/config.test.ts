@@ -23,6 +23,8 @@ describe('readConfig', () => {
 			demo: false,
 			logLevel: 'info',
 			readingsPerMinute: 3000,
+			attemptsPerHour: 60,
+			entriesPerMinute: 120,
 			trustProxy: 0,
 			bodyLimit: 524_288,
 			authSecret: undefined,
@@ -84,7 +86,9 @@ describe('readConfig', () => {
 		['LOG_LEVEL', 'loud'],
 		['TRUST_PROXY', 'true'],
 		['BODY_SIZE_LIMIT', '1G'],
-		['READINGS_PER_MINUTE', '0']
+		['READINGS_PER_MINUTE', '0'],
+		['ATTEMPTS_PER_HOUR', 'many'],
+		['ENTRIES_PER_MINUTE', '0']
 	])('names %s, its value and what is expected: %s', (name, value) => {
 		const message = messageOf({ DATABASE_URL, [name]: value });
 		expect(message).toContain(`${name} is "${value}"; expected `);

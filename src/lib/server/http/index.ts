@@ -9,3 +9,4 @@ export { readJsonObject } from './json-body';
 export { readParameters, type Parameters } from './parameters';
 export { problemResponse, refuse } from './problem';
 export { fault, invalid, malformed, notFound, Refusal } from './refusal';
+export { TokenBuckets } from './token-bucket';

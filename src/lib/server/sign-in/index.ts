@@ -12,4 +12,5 @@ export {
 	viewerOf,
 	type Viewer
 } from './request';
+export { waitBeforeEntry } from './pace';
 export { askForLink, enterByCode, enterByPassword, leave } from './ways';
