@@ -2,7 +2,10 @@ import { describe, expect, it } from 'vitest';
 import * as accounts from '../../src/lib/server/accounts';
 import { VISITOR, type Actor } from '../../src/lib/server/actor';
 import * as audit from '../../src/lib/server/audit';
+import * as files from '../../src/lib/server/files';
 import type { Ground } from '../../src/lib/server/ground';
+import * as inbox from '../../src/lib/server/inbox';
+import * as jobs from '../../src/lib/server/jobs';
 import * as people from '../../src/lib/server/people';
 import { configureAccounts } from '../fixtures/accounts';
 import { actorOf, buildUser } from '../fixtures/people';
@@ -10,12 +13,12 @@ import { actorOf, buildUser } from '../fixtures/people';
 configureAccounts();
 
 /** Who may call a function, at the least. */
-type Least = 'anybody' | 'member' | 'administrator';
+type Least = 'anybody' | 'member' | 'writer' | 'administrator';
 
 /**
  * Every function that a guarded subject offers, and who may call it. A function that is not here fails, so that
  * whoever adds one has to think of its guard. `anybody` acts for whoever holds a link, a password or a cookie, for
- * the console, or for nobody.
+ * the console, or for nobody; or it answers over HTTP what the others refuse.
  */
 const SUBJECTS: Readonly<
 	Record<string, readonly [subject: object, functions: Readonly<Record<string, Least>>]>
@@ -84,21 +87,72 @@ const SUBJECTS: Readonly<
 			trail: 'administrator',
 			verifyChain: 'anybody'
 		}
+	],
+	files: [
+		files,
+		{
+			answerTus: 'anybody',
+			arrivalFor: 'writer',
+			checkFileKind: 'anybody',
+			configuredStore: 'anybody',
+			deleteFile: 'member',
+			endFile: 'writer',
+			expectFile: 'writer',
+			fileAddress: 'member',
+			fileFor: 'member',
+			fileGround: 'anybody',
+			filesFor: 'member',
+			giveUpAbandoned: 'anybody',
+			openFile: 'member',
+			queueRemoval: 'anybody',
+			removeFilesKind: 'anybody',
+			s3Store: 'anybody',
+			settledFileFor: 'member',
+			takeFileOfForm: 'writer',
+			takePart: 'writer'
+		}
+	],
+	inbox: [
+		inbox,
+		{
+			archiveNotice: 'member',
+			giveNotice: 'anybody',
+			lookAtUnsubscription: 'anybody',
+			noticesFor: 'member',
+			openNotice: 'member',
+			ownPreferences: 'member',
+			readAllNotices: 'member',
+			setOwnPreferences: 'member',
+			unreadFor: 'member',
+			unsubscribe: 'anybody'
+		}
+	],
+	jobs: [
+		jobs,
+		{
+			queueJob: 'anybody',
+			queueRepeated: 'anybody',
+			runNext: 'anybody',
+			stopWork: 'member',
+			workFor: 'member'
+		}
 	]
 };
 
 const member = actorOf(buildUser());
 const moderator = actorOf(buildUser({ role: 'moderator' }));
 const paused = { until: new Date('2027-01-01T00:00:00.000Z'), reason: 'Rest.' };
+const UNKNOWN = [
+	['a visitor', VISITOR, 'sign_in_needed'],
+	['somebody whose code is awaited', { ...VISITOR, awaitsCode: true }, 'sign_in_needed']
+] as const;
 /** Those who may not, and what they hear. */
 const REFUSED: Readonly<Record<Least, readonly (readonly [string, Actor, code: string])[]>> = {
 	anybody: [],
-	member: [
-		['a visitor', VISITOR, 'sign_in_needed'],
-		['somebody whose code is awaited', { ...VISITOR, awaitsCode: true }, 'sign_in_needed']
-	],
+	member: UNKNOWN,
+	writer: [...UNKNOWN, ['a member who is paused', actorOf(buildUser(), { paused }), 'paused']],
 	administrator: [
-		['a visitor', VISITOR, 'sign_in_needed'],
+		...UNKNOWN,
 		['a member', member, 'not_allowed'],
 		['a moderator', moderator, 'not_allowed'],
 		[
@@ -145,6 +199,6 @@ describe.each(Object.entries(SUBJECTS))('the functions of %s', (_, [subject, fun
 	);
 	it.each(guarded)('%s refuses %s: %s', async (_name, _who, code, call, actor) => {
 		// What comes after the two must not matter yet.
-		await expect(call(untouchable, actor, {}, {})).rejects.toMatchObject({ code });
+		await expect((async () => call(untouchable, actor, {}, {}))()).rejects.toMatchObject({ code });
 	});
 });
