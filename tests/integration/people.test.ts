@@ -1,6 +1,7 @@
 import { beforeAll, describe, expect, it } from 'vitest';
 import { actorOf as asking } from '../../src/lib/server/accounts';
 import { verifyChain } from '../../src/lib/server/audit';
+import { noticesFor } from '../../src/lib/server/inbox';
 import type { UserRecord } from '../../src/lib/server/db/models';
 import {
 	appointAdministrator,
@@ -80,6 +81,9 @@ describe('a role', () => {
 				action: 'person.role_changed',
 				detail: { from: 'member', to: 'moderator', areas_to: ['Dodge', 'Plymouth'] }
 			}
+		]);
+		expect(await noticesFor(ground(), actorOf({ ...ada, id }), { archived: false })).toMatchObject([
+			{ title: 'You are a moderator now', body: expect.stringContaining('Dodge, Plymouth') }
 		]);
 		await setRole(ground(), admin(), { id, version: 2 }, { role: 'member', areas: ['Dodge'] });
 		expect(await showPerson(ground(), admin(), id)).toMatchObject({ role: 'member', areas: [] });

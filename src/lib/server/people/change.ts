@@ -1,3 +1,5 @@
+import { day } from '../../format/editions';
+import type { NoticeTemplate } from '../../text/en/notices';
 import type { Division, Role } from '../../types';
 import { requireOtherAdministrator } from '../accounts';
 import { requireAdministrator, type Actor, type Person } from '../actor';
@@ -5,6 +7,7 @@ import { record } from '../audit';
 import { inTransaction, type Transaction } from '../db';
 import { sessions, users, type AuditDetail, type UserRecord } from '../db/repositories';
 import type { Ground } from '../ground';
+import { giveNotice, type Notice } from '../inbox';
 import { ChangedMeanwhileError, OwnAccountError, UnknownPersonError } from './errors';
 
 /** Whom a change is about, and the version of them that was seen. */
@@ -13,24 +16,29 @@ export interface Seen {
 	readonly version: number;
 }
 
-interface Change {
+interface Change<Template extends NoticeTemplate> {
 	readonly action: string;
 	readonly changes: Partial<UserRecord>;
 	readonly detail: AuditDetail;
+	/** What they are told of it. */
+	readonly notice: Omit<Notice<Template>, 'user_id'>;
 }
 
-/** Changes somebody other than who asks, and writes it down. */
-async function changePerson(
+/** Changes somebody other than who asks, writes it down, and tells them. */
+async function changePerson<Template extends NoticeTemplate>(
 	ground: Ground,
 	actor: Person,
 	{ id, version }: Seen,
-	decide: (user: UserRecord, transaction: Transaction) => Promise<Change> | Change
+	decide: (
+		user: UserRecord,
+		transaction: Transaction
+	) => Promise<Change<Template>> | Change<Template>
 ): Promise<void> {
 	if (id === actor.id) throw new OwnAccountError();
 	await inTransaction(ground.database, async (transaction) => {
 		const user = await users.userById(ground.database, id, transaction);
 		if (user === null) throw new UnknownPersonError();
-		const { action, changes, detail } = await decide(user, transaction);
+		const { action, changes, detail, notice } = await decide(user, transaction);
 		if (!(await users.changeUser(ground.database, id, changes, transaction, version)))
 			throw new ChangedMeanwhileError();
 		await record(ground, transaction, {
@@ -39,6 +47,7 @@ async function changePerson(
 			subject: { kind: 'person', id },
 			detail
 		});
+		await giveNotice({ ...ground, transaction }, { user_id: id, ...notice });
 	});
 }
 
@@ -60,7 +69,8 @@ export async function setRole(
 		return {
 			action: 'person.role_changed',
 			changes: { role, areas: kept },
-			detail: { from: user.role, to: role, areas_from: user.areas, areas_to: kept }
+			detail: { from: user.role, to: role, areas_from: user.areas, areas_to: kept },
+			notice: { template: 'role_changed' as const, data: { role, areas: kept } }
 		};
 	});
 }
@@ -80,7 +90,11 @@ export async function pausePerson(
 	await changePerson(ground, actor, seen, () => ({
 		action: 'person.paused',
 		changes: { paused_until: until, pause_reason: reason },
-		detail: { until: until.toISOString(), reason }
+		detail: { until: until.toISOString(), reason },
+		notice: {
+			template: 'paused' as const,
+			data: { until: day(until.toISOString()), reason }
+		}
 	}));
 }
 
@@ -90,7 +104,8 @@ export async function resumePerson(ground: Ground, actor: Actor, seen: Seen): Pr
 	await changePerson(ground, actor, seen, () => ({
 		action: 'person.resumed',
 		changes: { paused_until: null, pause_reason: null },
-		detail: {}
+		detail: {},
+		notice: { template: 'resumed' as const, data: {} }
 	}));
 }
 
