@@ -5,7 +5,8 @@ export const accountText = {
 		name: 'Your name is changed.',
 		address: 'We have written to the new address. Nothing changes until its link is opened.',
 		password: 'Your password is changed. Every other session has ended.',
-		session: 'The session has ended.'
+		session: 'The session has ended.',
+		factor: 'The second factor is removed.'
 	},
 	standingWithArea: (role: string, since: string, areas: string) =>
 		`You are a ${role} for ${areas}. Your account is from ${since}.`,

@@ -49,6 +49,6 @@ export const actions: Actions = {
 			const fields = { wrong_password: 'password', wrong_code: 'code' };
 			return refused('remove', form.typed, error, fields);
 		}
-		redirect(303, '/account');
+		redirect(303, '/account?saved=factor');
 	}
 };
