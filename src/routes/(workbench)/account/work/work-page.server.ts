@@ -25,7 +25,8 @@ export async function workPage(actor: Actor) {
 			times: finishedAt
 				? [text.asked(asked), text.ended(moment(finishedAt.toISOString()))].join(', ')
 				: text.asked(asked),
-			underWay: finishedAt === null && !piece.stopping,
+			underWay: finishedAt === null,
+			canStop: finishedAt === null && !piece.stopping,
 			progress:
 				piece.state === 'running' && of !== null && of > 0
 					? { done, of, words: text.progress(grouped(done), grouped(of)) }
