@@ -135,6 +135,35 @@ describe('a link in a mail', () => {
 	});
 });
 
+describe('where no demonstration runs', () => {
+	it('its people are nowhere, and cannot sign in', async () => {
+		const server = await startBuiltServer({
+			...inject('builtEnvironment'),
+			DEMO: 'off',
+			LOG_LEVEL: 'warn'
+		});
+		try {
+			const { origin } = server;
+			const page = await (await fetch(`${origin}/signin?as=edwin`)).text();
+			for (const word of ['Demonstration', 'Edwin', 'plates and tags'])
+				expect(page).not.toContain(word);
+			expect((await fetch(`${origin}/mailbox`)).status).toBe(404);
+			const tried = await fetch(`${origin}/signin`, {
+				method: 'POST',
+				headers: { origin, accept: 'text/html' },
+				body: new URLSearchParams({
+					address: 'edwin@demo.tallyplate.example',
+					password: 'plates and tags'
+				})
+			});
+			expect(tried.status).toBe(400);
+			expect(await tried.text()).toContain('Address and password do not belong together.');
+		} finally {
+			await server.end();
+		}
+	});
+});
+
 describe('a flood of attempts', () => {
 	it('is turned away before anything is looked at; who reads goes on', async () => {
 		const server = await startBuiltServer({

@@ -1,3 +1,4 @@
+import { spawnSync } from 'node:child_process';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { VISITOR } from '../../src/lib/server/actor';
 import { ownTrail, record, trail, verifyChain } from '../../src/lib/server/audit';
@@ -37,6 +38,16 @@ async function spoiled(statement: string, work: () => Promise<void>): Promise<vo
 	await database.models.audit.destroy({ where: {} });
 	await database.models.audit.bulkCreate(before);
 	expect(await verifyChain(database)).toMatchObject({ holds: true });
+}
+
+/** Runs the command that verifies the trail. */
+function verify(...noted: string[]) {
+	const { status, stdout, stderr } = spawnSync(
+		process.execPath,
+		['--import', 'tsx', 'scripts/audit/verify.ts', ...noted],
+		{ env: { ...process.env, DATABASE_URL: database.url }, encoding: 'utf8' }
+	);
+	return { status, stdout, stderr };
 }
 
 describe('the audit trail', () => {
@@ -123,6 +134,22 @@ describe('the audit trail', () => {
 			number: 2,
 			why: 'not_as_noted'
 		});
+	});
+
+	it('is verified by a command, which fails on the entry that was changed', async () => {
+		const whole = verify();
+		expect(whole).toMatchObject({ status: 0, stderr: '' });
+		const [said, noted = ''] = whole.stdout.trim().split('\n');
+		expect(said).toBe('The audit trail holds: 13 entries');
+		expect(noted).toMatch(/^13:[0-9a-f]{64}$/);
+		expect(verify(noted)).toMatchObject({ status: 0 });
+		await spoiled(`UPDATE audit SET detail = '{"n":99}' WHERE number = 5`, async () => {
+			expect(verify()).toMatchObject({
+				status: 1,
+				stderr: 'The audit trail is broken: entry 5 was changed.\n'
+			});
+		});
+		expect(verify('13')).toMatchObject({ status: 1, stderr: expect.stringContaining('"13"') });
 	});
 });
 
