@@ -1,4 +1,4 @@
-import { Op, type Transaction } from 'sequelize';
+import { Op, QueryTypes, type Transaction } from 'sequelize';
 import type { Database } from '../connection';
 import type { NoticePreferenceRecord, NoticeRecord } from '../models';
 
@@ -46,9 +46,15 @@ export async function noticeOf(
 	return found && found.get({ plain: true });
 }
 
-/** How many notices in somebody's inbox they have not read. */
-export const unreadOf = ({ models }: Database, user_id: string): Promise<number> =>
-	models.notices.count({ where: { user_id, archived_at: null, read_at: null } });
+/** How many notices in somebody's inbox they have not read: what every page with a session asks. */
+export async function unreadOf({ sequelize }: Database, user_id: string): Promise<number> {
+	const [found] = await sequelize.query<{ unread: number }>(
+		`SELECT COUNT(*) AS unread FROM notices
+		WHERE user_id = ? AND archived_at IS NULL AND read_at IS NULL`,
+		{ replacements: [user_id], type: QueryTypes.SELECT }
+	);
+	return found?.unread ?? 0;
+}
 
 /** Marks notices of somebody as read: one, or all in the inbox. */
 export async function markRead(
