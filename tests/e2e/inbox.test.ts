@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import { afterAll, describe, expect, inject, it } from 'vitest';
 import type { Page } from 'playwright-core';
 import { machineClock } from '../../src/lib/server/clock';
@@ -226,4 +227,27 @@ it('work in hand says when there is none', async () => {
 			await expectSound(page, 'work-none');
 		}
 	);
+});
+
+it('mail that could not go out stands before administrators, with the reason', async () => {
+	const id = randomBytes(16).toString('hex');
+	const at = new Date();
+	await database.models.outbox.create({
+		...{ id, user_id: null, recipient: 'ann@example.org', kind: 'access', once_key: null },
+		...{
+			message_id: `<${id}@example.org>`,
+			subject: 'Confirm your address',
+			unsubscribe_url: null
+		},
+		...{ body_text: '', body_html: null, created_at: at, due_at: at, attempts: 1 },
+		...{ taken_by: null, taken_until: null, sent_at: null, failed_at: at },
+		last_error: '550 no such mailbox'
+	});
+	const { email } = await addMember(database, { role: 'administrator' });
+	await onPage('/signin', async (page) => {
+		await signedInOn(page, email, { next: '/people/mail' });
+		const row = page.getByRole('row').filter({ hasText: '550 no such mailbox' });
+		expect(await row.innerText()).toContain('given up');
+		await expectSound(page, 'mail-in-trouble');
+	});
 });

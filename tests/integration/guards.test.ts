@@ -6,6 +6,7 @@ import * as files from '../../src/lib/server/files';
 import type { Ground } from '../../src/lib/server/ground';
 import * as inbox from '../../src/lib/server/inbox';
 import * as jobs from '../../src/lib/server/jobs';
+import * as mail from '../../src/lib/server/mail';
 import * as people from '../../src/lib/server/people';
 import { configureAccounts } from '../fixtures/accounts';
 import { actorOf, buildUser } from '../fixtures/people';
@@ -123,8 +124,20 @@ const SUBJECTS: Readonly<
 			ownPreferences: 'member',
 			readAllNotices: 'member',
 			setOwnPreferences: 'member',
-			unreadFor: 'member',
 			unsubscribe: 'anybody'
+		}
+	],
+	mail: [
+		mail,
+		{
+			demoMailbox: 'anybody',
+			keptMail: 'anybody',
+			keptMails: 'anybody',
+			queueMail: 'anybody',
+			readUnsubscribeToken: 'anybody',
+			sendNext: 'anybody',
+			smtpPost: 'anybody',
+			unsentMails: 'administrator'
 		}
 	],
 	jobs: [

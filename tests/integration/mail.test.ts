@@ -170,7 +170,7 @@ describe('when the mail server', () => {
 		expect(await send(away)).toMatchObject({ result: 'failed' });
 		ahead(30 * DAY);
 		expect(await send()).toBeNull();
-		expect(await outbox.failedMails(database, 10)).toMatchObject([
+		expect(await outbox.unsentMails(database, 10)).toMatchObject([
 			{ recipient: 'ann@example.org', attempts: 12, last_error: expect.stringContaining('ECONN') }
 		]);
 		expect((await onlyRow()).body_text).toBe('');

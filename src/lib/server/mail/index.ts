@@ -10,4 +10,5 @@ export {
 export { RefusedMailError, smtpPost, type OutgoingMail, type Post } from './post';
 export { queueMail, type Causing, type Mail } from './queue';
 export { readUnsubscribeToken, type Unsubscription } from './unsubscribe';
+export { unsentMails, type UnsentMail } from './unsent';
 export { sendNext, type Sending, type Sent } from './send';

@@ -1,4 +1,5 @@
 import type { FaultTexts } from '../../types';
+import { counted } from './counts';
 
 /** Words of the pages on which administrators see and change people. */
 export const peopleText = {
@@ -53,6 +54,17 @@ export const peopleText = {
 		endAll: 'Sign out everywhere',
 		record: 'On record',
 		own: 'This is your own account: another administrator decides about it.'
+	},
+	mail: {
+		title: 'Mail in trouble',
+		intro:
+			'What did not go out, with what the mail server said. It is tried again for about a day, later each time, and then given up.',
+		heads: { to: 'To', subject: 'Subject', why: 'Why', state: 'Next' },
+		tries: (n: number) => `${counted(n, 'try', 'tries')}, first on`,
+		next: (moment: string) => `again on ${moment}`,
+		givenUp: 'given up',
+		nothing: 'All mail has gone out',
+		nothingBody: 'Nothing waits to be tried again, and nothing was given up within thirty days.'
 	},
 	audit: {
 		title: 'Audit trail',

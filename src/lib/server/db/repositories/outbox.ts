@@ -91,15 +91,18 @@ export async function giveBackMail(
 	return changed > 0;
 }
 
-/** Mails that were given up, newest first, without their bodies. */
-export async function failedMails(
+/** Mails that were given up or could not be sent yet, newest first, without their bodies. */
+export async function unsentMails(
 	{ models }: Database,
 	limit: number
 ): Promise<OutboxMailRecord[]> {
 	const found = await models.outbox.findAll({
 		attributes: { exclude: ['body_text', 'body_html'] },
-		where: { failed_at: { [Op.ne]: null } },
-		order: [['failed_at', 'DESC']],
+		where: { sent_at: null, last_error: { [Op.ne]: null } },
+		order: [
+			['created_at', 'DESC'],
+			['id', 'ASC']
+		],
 		limit
 	});
 	return found.map((one) => one.get({ plain: true }));
