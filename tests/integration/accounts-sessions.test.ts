@@ -18,6 +18,8 @@ import {
 } from '../../src/lib/server/accounts';
 import { requireAdministrator, requireModerator, requireWriter } from '../../src/lib/server/actor';
 import { config } from '../../src/lib/server/config';
+import { inTransaction } from '../../src/lib/server/db';
+import { giveNotice, readAllNotices } from '../../src/lib/server/inbox';
 import { pausePerson, setRole } from '../../src/lib/server/people';
 import {
 	configureAccounts,
@@ -131,6 +133,18 @@ describe('a session', () => {
 			code: 'unknown_session'
 		});
 		expect(await actorOf(ground(), ann.cookie)).toMatchObject({ id: ann.user_id });
+	});
+
+	it('knows how many notices its owner has not read', async () => {
+		const { cookie, user_id } = await join(ground(), address);
+		expect(await actorOf(ground(), cookie)).toMatchObject({ unread: 0 });
+		await inTransaction(database, (transaction) =>
+			giveNotice({ ...ground(), transaction }, { user_id, template: 'resumed', data: {} })
+		);
+		const actor = await actorOf(ground(), cookie);
+		expect(actor).toMatchObject({ unread: 1 });
+		await readAllNotices(ground(), actor);
+		expect(await actorOf(ground(), cookie)).toMatchObject({ unread: 0 });
 	});
 
 	it('writes when it was last used about once an hour', async () => {

@@ -30,6 +30,8 @@ export interface Person {
 	readonly paused: { readonly until: Date; readonly reason: string } | null;
 	/** The session that they ask from. */
 	readonly session: string;
+	/** Notices in their inbox that they have not read; every page says how many, so they come with the session. */
+	readonly unread: number;
 }
 
 export type Actor = Visitor | Person;

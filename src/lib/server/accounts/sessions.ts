@@ -95,7 +95,8 @@ function personOf(found: SessionOfPerson, now: Date): Actor {
 		granted: found.role,
 		areas: found.areas,
 		paused: until !== null && until > now ? { until, reason: found.pause_reason ?? '' } : null,
-		session: found.session
+		session: found.session,
+		unread: found.unread
 	};
 }
 

@@ -7,7 +7,6 @@ export {
 	noticesFor,
 	openNotice,
 	readAllNotices,
-	unreadFor,
 	type OwnNotice
 } from './mine';
 export {

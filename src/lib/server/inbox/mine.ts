@@ -41,12 +41,6 @@ export async function noticesFor(
 	return found.map(shown);
 }
 
-/** How many notices in the inbox who asks has not read. @throws {SignInNeededError} @throws {DatabaseAwayError} */
-export async function unreadFor({ database }: Ground, actor: Actor): Promise<number> {
-	requireMember(actor);
-	return asking(() => notices.unreadOf(database, actor.id));
-}
-
 /**
  * Opens a notice: it is read from now on.
  * @throws {SignInNeededError} @throws {UnknownNoticeError} @throws {DatabaseAwayError}

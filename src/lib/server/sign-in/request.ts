@@ -4,7 +4,6 @@ import { VISITOR, type Actor, type Person } from '../actor';
 import { config, ConfigurationError } from '../config';
 import { DatabaseAwayError } from '../db';
 import { ground } from '../ground';
-import { unreadFor } from '../inbox';
 import { cookieName } from './cookie';
 
 /** Whether a request carries a session at all. */
@@ -38,12 +37,11 @@ export async function viewerOf(actor: () => Promise<Actor>): Promise<Viewer | nu
 	try {
 		const found = await actor();
 		if (found.role === 'visitor') return null;
-		const unread = await unreadFor(ground(), found);
 		return {
 			name: found.name,
 			role: found.role,
 			needsFactor: found.role !== found.granted,
-			unread
+			unread: found.unread
 		};
 	} catch (error) {
 		if (error instanceof DatabaseAwayError) return null;

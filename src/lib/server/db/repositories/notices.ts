@@ -1,4 +1,4 @@
-import { Op, QueryTypes, type Transaction } from 'sequelize';
+import { Op, type Transaction } from 'sequelize';
 import type { Database } from '../connection';
 import type { NoticePreferenceRecord, NoticeRecord } from '../models';
 
@@ -44,16 +44,6 @@ export async function noticeOf(
 ): Promise<NoticeRecord | null> {
 	const found = await models.notices.findOne({ where: { id, user_id } });
 	return found && found.get({ plain: true });
-}
-
-/** How many notices in somebody's inbox they have not read: what every page with a session asks. */
-export async function unreadOf({ sequelize }: Database, user_id: string): Promise<number> {
-	const [found] = await sequelize.query<{ unread: number }>(
-		`SELECT COUNT(*) AS unread FROM notices
-		WHERE user_id = ? AND archived_at IS NULL AND read_at IS NULL`,
-		{ replacements: [user_id], type: QueryTypes.SELECT }
-	);
-	return found?.unread ?? 0;
 }
 
 /** Marks notices of somebody as read: one, or all in the inbox. */

@@ -18,13 +18,17 @@ export interface SessionOfPerson {
 	readonly demo: number;
 	/** Whether a second factor is in force. */
 	readonly factor: number;
+	/** Notices in their inbox that they have not read. */
+	readonly unread: number;
 }
 
 const OF_PERSON = `
 	SELECT s.id AS session, s.way, s.seen_at, s.code_given_at,
 		u.id, u.name, u.role, u.areas, u.paused_until, u.pause_reason, u.demo,
 		EXISTS (SELECT 1 FROM second_factors f
-			WHERE f.user_id = u.id AND f.confirmed_at IS NOT NULL) AS factor
+			WHERE f.user_id = u.id AND f.confirmed_at IS NOT NULL) AS factor,
+		(SELECT COUNT(*) FROM notices n
+			WHERE n.user_id = u.id AND n.archived_at IS NULL AND n.read_at IS NULL) AS unread
 	FROM sessions s JOIN users u ON u.id = s.user_id
 	WHERE s.id = ? AND s.revoked_at IS NULL AND s.expires_at > ? AND u.deleted_at IS NULL`;
 
