@@ -5,11 +5,11 @@
  */
 import { z } from 'zod';
 import { FIELD_NAMES } from './fields';
-import type { StampKind } from './readings';
+import { MAX_STAMPS, MAX_TEXT, STAMP_KINDS } from './readings';
 import { FIRST_YEAR, LAST_YEAR, SOURCE_KINDS } from './rows';
 
-/** Kinds of stamp that can be read. The others are refused by name. */
-export const AVAILABLE_KINDS = ['serial', 'code'] as const satisfies readonly StampKind[];
+/** Kinds of stamp that can be read. */
+export const AVAILABLE_KINDS = STAMP_KINDS;
 
 const maker = z.string().describe('Corporation or division, by any name that /makers lists');
 const division = z.string().describe('Division, by any name that /makers lists');
@@ -25,15 +25,21 @@ const context = {
 			'Division; Chrysler, Ford and AMC mean the corporation as maker and the division here'
 		),
 	year: year.optional(),
-	plant: z.string().max(3).optional().describe('Assembly plant code')
+	plant: z.string().max(3).optional().describe('Assembly plant code'),
+	serial: z
+		.string()
+		.max(MAX_TEXT.serial)
+		.optional()
+		.describe('The serial of the same car: what it tells scopes the other stamps')
 };
 const reading = {
 	text: z
 		.string()
 		.min(1)
-		.max(64)
+		.max(MAX_TEXT.body_tag)
 		.describe(
-			'What is struck on the car. ?, _, a star inside, or a run of lower-case x stand for what cannot be read; [38] for either'
+			'What is struck on the car. ?, _, a star inside, or a run of lower-case x stand for what cannot be read; [38] for either. ' +
+				'Lines of a body tag are joined by " / " or line breaks. 64 characters; engine and casting 120; body_tag 600 and 14 lines'
 		),
 	kind: z.enum(AVAILABLE_KINDS).optional().describe('Left out: every kind that fits, ranked'),
 	...context,
@@ -58,6 +64,28 @@ export const readingBodySchema = z.strictObject({
 	reader: z.string().optional(),
 	explain: z.boolean().optional(),
 	context: z.strictObject(context).optional()
+});
+
+/** The body of POST /readings for several stamps of one car. */
+export const stampsBodySchema = z.strictObject({
+	stamps: z
+		.array(
+			z.strictObject({
+				kind: reading.kind,
+				text: reading.text.optional(),
+				fields: z
+					.partialRecord(z.enum(FIELD_NAMES), z.string().max(MAX_TEXT.serial))
+					.optional()
+					.describe('For body_tag in place of text: what stands in each named field'),
+				place: z.string().max(100).optional().describe('Where it sits')
+			})
+		)
+		.min(1)
+		.max(MAX_STAMPS)
+		.describe('The serial need not come first: it is read first, and scopes the others'),
+	context: z.strictObject(context).optional(),
+	edition: edition.optional(),
+	explain: z.boolean().optional()
 });
 
 const list = {
@@ -93,6 +121,7 @@ export const itemsQuerySchema = z.strictObject({
 
 export type ReadingQuery = z.input<typeof readingQuerySchema>;
 export type ReadingBody = z.input<typeof readingBodySchema>;
+export type StampsBody = z.input<typeof stampsBodySchema>;
 export type ListQuery = z.input<typeof listQuerySchema>;
 export type EditionQuery = z.input<typeof editionQuerySchema>;
 export type TablesQuery = z.input<typeof tablesQuerySchema>;

@@ -15,6 +15,7 @@ import {
 	sourceSchema
 } from './rows';
 import { makerSchema, tableNameSchema } from './name-schemas';
+import { tallyLineSchema } from './tally';
 import { factsSchema, itemSchema } from './values';
 
 /** One thing wrong with a request: which parameter, why, and what would be taken. */
@@ -72,7 +73,12 @@ export const lookupSchema = z.strictObject({
 export const readingFieldSchema = z.strictObject({
 	name: fieldNameSchema,
 	label: z.string(),
-	line: z.number().int().min(1).optional().describe('Line of a body tag'),
+	line: z
+		.number()
+		.int()
+		.min(1)
+		.optional()
+		.describe('Line of a stamp of several lines, from the top as typed'),
 	from: z.number().int().min(1).describe('First place in the normalised text, from 1'),
 	to: z.number().int().min(1).describe('Last place, inclusive'),
 	derived_from: z.array(fieldNameSchema).optional(),
@@ -112,13 +118,12 @@ export const readingSchema = z.strictObject({
 export const readProblemSchema = z.strictObject({
 	layout: z.string().optional(),
 	position: z.number().int().min(1).optional(),
+	line: z.number().int().min(1).optional().describe('Line of a body tag, blank ones not counted'),
 	code: z.string(),
 	message: z.string(),
 	offers: z.array(z.strictObject({ text: z.string(), why: z.string() }))
 });
-export const readAnswerSchema = z.strictObject({
-	...basis,
-	reader: z.string().regex(/^[0-9a-f]{12}$/),
+const stampResult = {
 	input: z.strictObject({
 		kind: stampKindSchema.nullable(),
 		text: z.string(),
@@ -127,6 +132,19 @@ export const readAnswerSchema = z.strictObject({
 	readings: z.array(readingSchema).max(24),
 	more: z.number().int().min(0),
 	problems: z.array(readProblemSchema)
+};
+const readerDigest = z.string().regex(/^[0-9a-f]{12}$/);
+export const readAnswerSchema = z.strictObject({
+	...basis,
+	reader: readerDigest,
+	...stampResult
+});
+/** Several stamps of one car, and the lines in which they say something of each other. */
+export const stampsAnswerSchema = z.strictObject({
+	...basis,
+	reader: readerDigest,
+	stamps: z.array(z.strictObject(stampResult)),
+	lines: z.array(tallyLineSchema)
 });
 
 /** A list, a page of it at a time; `next` is the cursor of the next page. */

@@ -4,6 +4,7 @@ import type { Maker } from './makers';
 import { makerSchema } from './name-schemas';
 import { yearSchema, type SourceKind } from './rows';
 import type { TableName } from './tables';
+import type { TallyLine } from './tally';
 import type { RowValues } from './values';
 
 export const STAMP_KINDS = ['serial', 'body_tag', 'engine', 'casting', 'date', 'code'] as const;
@@ -20,6 +21,11 @@ export const MAX_TEXT: Readonly<Record<StampKind, number>> = {
 	body_tag: 600
 };
 
+/** Most lines of a body tag. */
+export const MAX_LINES = 14;
+/** Most stamps of one car in a request. */
+export const MAX_STAMPS = 24;
+
 /** What is known beside the stamp. All of it ranks readings; none of it removes one. */
 export interface ReadContext {
 	readonly maker?: Maker;
@@ -28,12 +34,15 @@ export interface ReadContext {
 	readonly plant?: string;
 	/** For one bare code: the field it stands in. */
 	readonly field?: FieldName;
+	/** The car's serial as typed: what it tells scopes the other stamps. */
+	readonly serial?: string;
 }
 export const readContextSchema = z.object({
 	maker: makerSchema.optional(),
 	division: z.string().optional(),
 	year: yearSchema.optional(),
-	plant: z.string().max(3).optional()
+	plant: z.string().max(3).optional(),
+	serial: z.string().max(64).optional()
 });
 
 export interface FieldSource {
@@ -65,7 +74,7 @@ export interface Lookup {
 export interface ReadingField {
 	readonly name: FieldName;
 	readonly label: string;
-	/** The line of a body tag, 1-based. */
+	/** The line of a stamp of several lines, 1-based from the top as typed; blank lines do not count. */
 	readonly line?: number;
 	/** 1-based and inclusive, in the normalised text. A derived field has its parent's. */
 	readonly from: number;
@@ -107,6 +116,8 @@ export interface Offer {
 export interface Problem {
 	readonly layout?: string;
 	readonly position?: number;
+	/** The line of a body tag that it is about, 1-based, blank lines not counted. */
+	readonly line?: number;
 	readonly code: string;
 	readonly message: string;
 	readonly offers: readonly Offer[];
@@ -123,6 +134,20 @@ export interface ReadResult {
 	readonly more: number;
 	readonly problems: readonly Problem[];
 }
+/** One stamp of a car: its text, or for a body tag what stands in each named field. */
+export interface StampRequest {
+	/** Left out: every kind that fits. */
+	readonly kind?: StampKind;
+	readonly text?: string;
+	readonly fields?: Readonly<Partial<Record<FieldName, string>>>;
+	/** Where it sits, in the words of whoever asks. */
+	readonly place?: string;
+}
+/** Several stamps of one car: a result each, in the order asked, and what they say against each other. */
+export interface StampsResult {
+	readonly stamps: readonly ReadResult[];
+	readonly lines: readonly TallyLine[];
+}
 /** A reading as answered: the corporation by its full name, and by its key as in addresses. */
 export interface AnsweredReading extends Omit<Reading, 'maker'> {
 	readonly maker: string | null;
@@ -134,4 +159,14 @@ export interface ReadAnswer extends Omit<ReadResult, 'readings'> {
 	readonly edition: number;
 	readonly digest: string;
 	readonly reader: string;
+}
+/** What the interface answers for several stamps of one car. */
+export interface StampsAnswer {
+	readonly edition: number;
+	readonly digest: string;
+	readonly reader: string;
+	readonly stamps: readonly (Omit<ReadResult, 'readings'> & {
+		readonly readings: readonly AnsweredReading[];
+	})[];
+	readonly lines: readonly TallyLine[];
 }
