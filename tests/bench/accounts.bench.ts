@@ -15,7 +15,7 @@ const READINGS = Array.from(
 	(_, n) => `/api/v1/readings?kind=serial&text=RM23N0G${100_001 + n * 7}`
 );
 const SECONDS = 3;
-const ATTEMPTS_A_SECOND = 50;
+const ATTEMPTS_A_SECOND = 25;
 
 /** One press of the button of the sign-in page. */
 const signIn = (origin: string, password: string): Promise<Response> =>
