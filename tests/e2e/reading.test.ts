@@ -1,14 +1,14 @@
 import { gzipSync } from 'node:zlib';
 import type { Page } from 'playwright-core';
 import { describe, expect, inject, it } from 'vitest';
-import { axe, openPage, WIDTHS, type OpenPage } from '../fixtures/browser';
+import { openPage, type OpenPage } from '../fixtures/browser';
+import { faultsEverywhere } from '../fixtures/everywhere';
 
 /** Real code patterns, invented sequence numbers. */
 const PLYMOUTH = 'RH23L0E904127';
 const STANDARD = '1G1AY8760B5900417';
 const MISFIT = 'RMZ3N0G904127';
 
-const THEMES = ['light', 'dark'] as const;
 const PAGES = [
 	['the empty page', '/'],
 	['a reading of 13 characters', `/?text=${PLYMOUTH}`],
@@ -35,16 +35,7 @@ async function closing<T>(opened: Promise<OpenPage>, use: (opened: OpenPage) => 
 describe.each(PAGES)('%s', (_, path) => {
 	it('is sound for axe and quiet, at each width and in both themes', async () => {
 		await closing(openPage(path), async ({ page, complaints }) => {
-			for (const width of WIDTHS)
-				for (const colorScheme of THEMES) {
-					await page.setViewportSize({ width, height: 900 });
-					await page.emulateMedia({ colorScheme });
-					expect(await axe(page), `${width} ${colorScheme}`).toEqual([]);
-					const wider = await page.evaluate(
-						() => document.documentElement.scrollWidth - window.innerWidth
-					);
-					expect(wider, `${width}: nothing is wider than the screen`).toBeLessThanOrEqual(0);
-				}
+			expect(await faultsEverywhere(page)).toEqual([]);
 			expect(complaints).toEqual([]);
 		});
 	});
