@@ -11,9 +11,9 @@ import {
 } from '../types';
 import { decoderText as text } from '../text/en/decoder';
 import { isRead, type Characters } from './engine/characters';
-import { saysTheSame } from './engine/compare';
+import { answerAlone } from './engine/answer-alone';
 import { contestedField, fieldOf, foundField, possibleOf, type FieldHead } from './engine/field';
-import { choose, entriesMatching, type Answer, type Scope } from './engine/look-up';
+import { entriesMatching, type Scope } from './engine/look-up';
 import {
 	rowsInYear,
 	type CompiledRow,
@@ -29,7 +29,9 @@ const FIELD_OF: Partial<Record<TableName, FieldName>> = {
 	axle: 'axle',
 	option: 'option',
 	unit_code: 'unit_code',
+	engine_tag: 'unit_code',
 	casting_number: 'casting_number',
+	part_number: 'casting_number',
 	sales_district: 'sales_district',
 	transmission: 'transmission',
 	engine: 'engine',
@@ -49,25 +51,6 @@ const ORDER = Object.keys(FIELD_OF) as TableName[];
 /** At most so many readings come back; the rest is counted. */
 const MOST = 24;
 
-/**
- * A bare code comes without its car: one meaning is enough, wherever it holds.
- * Without a year, rows of different years do not contradict each other: the code means several things.
- */
-function answerOf(rows: readonly CompiledRow[], scope: Scope): Answer {
-	const answer = choose(rows, scope);
-	if (answer.kind === 'depends') {
-		const [first] = answer.rows as readonly [CompiledRow, ...CompiledRow[]];
-		const one = answer.rows.every((row) => saysTheSame(first, row));
-		return one ? { kind: 'found', rows: answer.rows } : answer;
-	}
-	if (answer.kind !== 'contested' || scope.year !== null) return answer;
-	const all = answer.groups.flat();
-	const contested = all.every((row) =>
-		all.every((other) => saysTheSame(row, other) || row.contested_by.includes(other.row_key))
-	);
-	return contested ? answer : { kind: 'depends', on: 'line', rows: all };
-}
-
 function readField(
 	head: FieldHead,
 	characters: Characters,
@@ -82,7 +65,7 @@ function readField(
 			detail: text.fields.unread(cells),
 			possible: possibleOf(rows)
 		});
-	const answer = answerOf(rows, scope);
+	const answer = answerAlone(rows, scope);
 	switch (answer.kind) {
 		case 'found':
 			return foundField(head, normalised, answer.rows);

@@ -22,4 +22,9 @@ export {
 	type TableSet
 } from './engine/table-set';
 export { LAYOUTS } from './layouts';
-export { candidatesOf, read, type ReadRequest } from './read';
+export { LINED_LAYOUTS } from './layouts/lined';
+export type { LinedKind, LinedLayout } from './engine/lined-layout';
+export { hasLines, linesOf } from './engine/lines';
+export { read, type ReadRequest } from './read';
+export { readStamps, type StampsRequest } from './read-stamps';
+export { candidatesOf } from './serial-reading';

@@ -1,25 +1,26 @@
 /** Reads one stamp against one edition. */
-import type { Problem, ReadContext, Reading, ReadResult, StampKind } from '../types';
-import { isRead, normalise, type Cell, type Characters } from './engine/characters';
-import { fits } from './engine/fit';
-import type { PrimaryField } from './engine/layout';
-import type { PreparedLayout } from './engine/plan';
-import {
-	bareSequence,
-	checkDigitOffers,
-	foreignLetters,
-	lookAlikes,
-	misfit
-} from './engine/problems';
-import { ranked } from './engine/ranking';
-import { draftsOf, hasRow, type Draft } from './engine/reading';
-import type { TableSet } from './engine/table-set';
+import type { FieldName, Problem, ReadContext, Reading, ReadResult, StampKind } from '../types';
 import { readCode } from './code-reading';
+import { readDateAlone } from './date-reading';
+import { normalise, type Characters } from './engine/characters';
+import type { LinedKind, LinedLayout } from './engine/lined-layout';
+import { hasLines } from './engine/lines';
+import { textOfFields, type NamedFields } from './engine/named-fields';
+import type { PreparedLayout } from './engine/plan';
+import { foreignLetters } from './engine/problems';
+import { MOST_READINGS } from './engine/ranking';
+import type { TableSet } from './engine/table-set';
+import { knownCar } from './known-car';
 import { PREPARED } from './layouts';
+import { LINED_LAYOUTS } from './layouts/lined';
+import { readLined } from './lined-stamps';
+import { readSerial, shortest } from './serial-reading';
 
 export interface ReadRequest {
 	/** As typed; see `examineText` for what cannot be read at all. */
 	readonly text: string;
+	/** For a body tag, in place of the text: what stands in each named field. */
+	readonly fields?: NamedFields;
 	/** Left out: every kind that fits. */
 	readonly kind?: StampKind;
 	readonly context?: ReadContext;
@@ -27,108 +28,120 @@ export interface ReadRequest {
 	readonly lookups?: boolean;
 	/** The layouts to try: those of the product when left out. */
 	readonly layouts?: readonly PreparedLayout[];
+	readonly lined?: readonly LinedLayout[];
 }
 
-/** Shortest serial; what is shorter is read as a beginning. */
-const shortest = (layouts: readonly PreparedLayout[]): number =>
-	layouts === PREPARED ? SHORTEST : lengthOfShortest(layouts);
-const lengthOfShortest = (layouts: readonly PreparedLayout[]): number =>
-	Math.min(...layouts.map(({ layout }) => layout.length));
-const SHORTEST = lengthOfShortest(PREPARED);
-/** Up to so many characters, a text without a kind is first taken as a bare code. */
-const LIKELY_CODE = 3;
-
-export interface Candidate {
-	readonly prepared: PreparedLayout;
-	readonly years: readonly (number | null)[];
-}
-
-/**
- * The layouts and model years that a serial may be. Unread places give more of them, never fewer:
- * the set for a marked text contains that of every text it stands for.
- */
-export function candidatesOf(
-	cells: readonly Cell[],
-	layouts: readonly PreparedLayout[] = PREPARED
-): Candidate[] {
-	const partial = cells.length < shortest(layouts);
-	const found: Candidate[] = [];
-	for (const own of layouts) {
-		if (partial ? cells.length > own.layout.length : cells.length !== own.layout.length) continue;
-		if (!fits(own, cells)) continue;
-		const missing = own.layout.length - cells.length;
-		const whole = missing > 0 ? [...cells, ...Array<Cell>(missing).fill('?')] : cells;
-		const open = missing > 0 && own.layout.beginsWithoutYear === true;
-		const years = open ? [null] : own.layout.yearsOf(whole);
-		if (years.length > 0) found.push({ prepared: own, years });
-	}
-	return found;
-}
-
-interface Serial {
+interface Read {
+	readonly kind: StampKind;
 	readonly readings: readonly Reading[];
 	readonly more: number;
 	readonly problems: readonly Problem[];
+	/** Of stamps that are read line by line: tokens joined by one space, lines by " / ". */
+	readonly normalised?: string;
+}
+interface Typed extends Required<Omit<ReadRequest, 'kind' | 'fields'>> {
+	readonly fields?: NamedFields;
+	readonly characters: Characters;
+	readonly tables: TableSet;
 }
 
-function firstProblems(
-	reading: Reading,
-	candidate: Candidate,
-	cells: readonly Cell[],
-	tables: TableSet,
-	context: ReadContext
-): Problem[] {
-	const { prepared } = candidate;
-	if (cells.length !== prepared.layout.length) return [];
-	const meaning = (index: number, other: readonly Cell[]): string | null => {
-		const { from } = prepared.layout.fields[index] as PrimaryField;
-		for (const year of prepared.layout.yearsOf(other))
-			if (year === reading.model_year)
-				for (const draft of draftsOf(prepared, other, year, tables, context)) {
-					const own = draft.results.find(({ field, counts }) => field.from === from && counts);
-					if (own !== undefined) return own.field.meaning;
-				}
-		return null;
-	};
-	const has = (index: number, other: readonly Cell[]): boolean =>
-		hasRow(prepared, index, other, tables);
-	const check = prepared.layout.length === 17 ? checkDigitOffers(prepared, cells) : null;
-	return [
-		...lookAlikes(reading, prepared, cells, { hasRow: has, meaning }),
-		...(check === null ? [] : [check])
-	];
-}
+/** Up to so many characters, a text without a kind is first taken as a bare code. */
+const LIKELY_CODE = 3;
 
-function readSerial(
-	characters: Characters,
-	tables: TableSet,
-	context: ReadContext,
-	lookups: boolean,
-	layouts: readonly PreparedLayout[]
-): Serial {
-	const { cells } = characters;
-	const candidates = candidatesOf(cells, layouts);
-	const drafts: Draft[] = [];
-	const whole = cells.every(isRead) ? characters.normalised : '';
-	for (const { prepared, years } of candidates)
-		for (const year of years) {
-			const plain = whole.length === prepared.layout.length ? whole : null;
-			for (const draft of draftsOf(prepared, cells, year, tables, context, plain))
-				drafts.push(draft);
-		}
-	const { readings, more } = ranked(drafts, context, lookups);
-	const [first] = readings;
-	if (first === undefined) return { readings, more, problems: [misfit(layouts, cells)] };
-	const own = candidates.find(({ prepared }) => prepared.layout.id === first.layout) as Candidate;
-	const bare = bareSequence(layouts, cells);
+/** What the serial beside it tells joins what was given in so many words. */
+function withSerial({ context, tables, layouts }: Typed): ReadContext {
+	if (context.serial === undefined) return context;
+	const { maker, division, year } = knownCar(tables, context, layouts);
 	return {
-		readings,
-		more,
-		problems: [
-			...(bare === null ? [] : [bare]),
-			...firstProblems(first, own, cells, tables, context)
-		]
+		...context,
+		...(maker === undefined ? {} : { maker }),
+		...(division === undefined ? {} : { division }),
+		...(year === undefined ? {} : { year })
 	};
+}
+
+function asCode(typed: Typed, field?: FieldName): Read {
+	const { characters, tables, lookups } = typed;
+	const context = withSerial(typed);
+	const own = field === undefined ? context : { ...context, field };
+	return { kind: 'code', ...readCode(characters, tables, own, lookups) };
+}
+
+function asSerial({ characters, tables, context, lookups, layouts }: Typed): Read {
+	return { kind: 'serial', ...readSerial(characters, tables, context, lookups, layouts) };
+}
+
+const asDate = (typed: Typed): Read => ({
+	kind: 'date',
+	...readDateAlone(typed.text, typed.tables, withSerial(typed))
+});
+
+/** One list of readings, the second's ranks after the first's; the problems are those of the first. */
+function joined(first: Read, second: Read): Read {
+	const all = [
+		...first.readings,
+		...second.readings.map((reading) => ({
+			...reading,
+			rank: reading.rank + first.readings.length
+		}))
+	];
+	return {
+		...first,
+		readings: all.slice(0, MOST_READINGS),
+		more: first.more + second.more + Math.max(0, all.length - MOST_READINGS)
+	};
+}
+
+/** The field of a bare code that a lined stamp may consist of. */
+const SINGLE: Partial<Record<LinedKind, FieldName>> = {
+	engine: 'unit_code',
+	casting: 'casting_number'
+};
+const tells = (reading: Reading | undefined): boolean =>
+	reading?.fields.some(({ rows }) => rows.length > 0) === true;
+
+function asLined(kind: LinedKind, typed: Typed): Read & { readonly whole: boolean } {
+	const lined = readLined(typed.tables, { ...typed, kind });
+	const single = SINGLE[kind];
+	if (single === undefined) return { kind, ...lined };
+	// A pad or casting may be worn down to one code, or be one of which no form is known.
+	const code = asCode(typed, single);
+	if (code.readings.length === 0) return { kind, ...lined };
+	const first = lined.whole && tells(lined.readings[0]);
+	const [one, two] = first ? [{ ...lined, kind }, code] : [code, { ...lined, kind }];
+	return { ...joined(one, two), kind, whole: true, normalised: lined.normalised };
+}
+
+function asKind(kind: StampKind, typed: Typed): Read {
+	switch (kind) {
+		case 'serial':
+			return asSerial(typed);
+		case 'code':
+			return asCode(typed);
+		case 'date':
+			return asDate(typed);
+		default:
+			return asLined(kind, typed);
+	}
+}
+
+/** Reads a text as every kind that fits: a serial that fits whole is one, and nothing else is tried. */
+function asAny(typed: Typed): Read {
+	const { characters, text, layouts } = typed;
+	if (typed.fields !== undefined || hasLines(text)) return asLined('body_tag', typed);
+	const { cells } = characters;
+	const serial = asSerial(typed);
+	if (serial.readings[0]?.state === 'complete') return serial;
+	const parts = (['engine', 'casting', 'body_tag'] as const).map((kind) => asLined(kind, typed));
+	const sure = parts.filter(({ whole, readings }) => whole && tells(readings[0]));
+	const others = parts.filter((part) => !sure.includes(part));
+	const code = cells.length < shortest(layouts) ? [asCode(typed)] : [];
+	const codeFirst = cells.length <= LIKELY_CODE || serial.readings.length === 0 || sure.length > 0;
+	const ordered = codeFirst
+		? [...(cells.length <= LIKELY_CODE ? [...code, ...sure] : [...sure, ...code]), serial]
+		: [serial, ...code];
+	const told = [...ordered, asDate(typed), ...others].filter(({ readings }) => readings.length > 0);
+	return told.length === 0 ? serial : told.reduce(joined);
 }
 
 /**
@@ -137,31 +150,34 @@ function readSerial(
  * @example read(tables, { text: 'RM23N0Gxxxxxx' }).readings[0]?.model_year // 1970
  */
 export function read(tables: TableSet, request: ReadRequest): ReadResult {
-	const { text, kind, context = {}, lookups = false, layouts = PREPARED } = request;
+	const { fields, kind, context = {}, lookups = false } = request;
+	const { layouts = PREPARED, lined = LINED_LAYOUTS } = request;
+	const text = fields === undefined ? request.text : textOfFields(fields);
 	const characters = normalise(text);
-	const { normalised, cells } = characters;
-	const input = (own: StampKind | null) => ({ kind: own, text, normalised });
+	const { cells, normalised } = characters;
 	if (cells.length === 0)
-		return { input: input(kind ?? null), readings: [], more: 0, problems: [] };
+		return {
+			input: { kind: kind ?? null, text, normalised },
+			readings: [],
+			more: 0,
+			problems: []
+		};
+	const typed: Typed = {
+		tables,
+		characters,
+		text,
+		context,
+		lookups,
+		layouts,
+		lined,
+		...(fields === undefined ? {} : { fields })
+	};
+	const result = kind === undefined ? asAny(typed) : asKind(kind, typed);
 	const foreign = normalised === text ? [] : foreignLetters(text, characters);
-	const asCode =
-		kind === 'code' || (kind === undefined && cells.length < shortest(layouts))
-			? readCode(characters, tables, context, lookups)
-			: null;
-	if (kind === 'code' && asCode !== null)
-		return { input: input('code'), ...asCode, problems: [...foreign, ...asCode.problems] };
-	const serial = readSerial(characters, tables, context, lookups, layouts);
-	if (asCode === null || asCode.readings.length === 0)
-		return { input: input('serial'), ...serial, problems: [...foreign, ...serial.problems] };
-	const codeFirst = cells.length <= LIKELY_CODE || serial.readings.length === 0;
-	const [one, two] = codeFirst ? [asCode, serial] : [serial, asCode];
-	const all = [...one.readings, ...two.readings].map((reading, index) =>
-		index < one.readings.length ? reading : { ...reading, rank: reading.rank + one.readings.length }
-	);
 	return {
-		input: input(codeFirst ? 'code' : 'serial'),
-		readings: all.slice(0, 24),
-		more: one.more + two.more + Math.max(0, all.length - 24),
-		problems: [...foreign, ...one.problems]
+		input: { kind: result.kind, text, normalised: result.normalised ?? normalised },
+		readings: result.readings,
+		more: result.more,
+		problems: foreign.length === 0 ? result.problems : [...foreign, ...result.problems]
 	};
 }

@@ -112,10 +112,17 @@ export const mayBe = (cell: Cell, character: string): boolean =>
 
 export type TextFault = 'empty' | 'too_long' | 'nothing_struck';
 
-/** Why a text cannot be read at all, or null. The limits are those of the kind, 64 characters when none is given. */
+/** What divides the lines of a body tag. */
+const SEVERAL_LINES = /[\r\n]|\s\/+\s/;
+
+/**
+ * Why a text cannot be read at all, or null. The limits are those of the kind; when none is given, those of a body tag
+ * for several lines and of a serial for one.
+ */
 export function examineText(text: string, kind?: StampKind): TextFault | null {
 	if (text.trim() === '') return 'empty';
-	if ([...text].length > MAX_TEXT[kind ?? 'serial']) return 'too_long';
+	if ([...text].length > MAX_TEXT[kind ?? (SEVERAL_LINES.test(text) ? 'body_tag' : 'serial')])
+		return 'too_long';
 	if (!normalise(text).cells.some((cell) => cell !== UNREAD)) return 'nothing_struck';
 	return null;
 }

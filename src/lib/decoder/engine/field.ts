@@ -37,16 +37,23 @@ export interface FieldResult {
 	readonly outOfRun?: boolean;
 	/** The table that was asked; null when none was. */
 	readonly table: TableName | null;
+	/** The code that it was asked for, where that is not all of the field's characters. */
+	readonly asked?: string;
 }
 
 /** The questions that a field put to the tables: one for each row, or the miss. */
-export function lookupsOf({ field, rows, table }: FieldResult): readonly Lookup[] {
+export function lookupsOf({
+	field,
+	rows,
+	table,
+	asked: code = field.code
+}: FieldResult): readonly Lookup[] {
 	const asked = (name: TableName, exact: string): string => {
 		const { match } = tableDefinition(name);
-		return match === 'exact' ? exact : match === 'range' ? field.code : '';
+		return match === 'exact' ? exact : match === 'range' ? code : '';
 	};
 	if (rows.length === 0)
-		return table === null ? [] : [{ table, code: asked(table, field.code), row_key: null }];
+		return table === null ? [] : [{ table, code: asked(table, code), row_key: null }];
 	return rows.map((row) => ({
 		table: row.table,
 		code: asked(row.table, row.code),

@@ -98,7 +98,7 @@ export interface LinedLayout {
 	readonly years: readonly [from: number, to: number];
 	/** Where the form is published, in a sentence. */
 	readonly source: string;
-	/** The lines, in the order in which they are read. A layout of one line takes everything typed as one line. */
+	/** The lines, in the order in which they are read. Engine stamps and castings are taken as one line, however typed. */
 	readonly lines: readonly LineForm[];
 	/** Whether the first of `lines` is the top or the bottom one of the plate. */
 	readonly order: 'down' | 'up';

@@ -11,6 +11,7 @@ interface Key {
 	readonly notUsed: number;
 	readonly outOfRun: number;
 	readonly hintsMissed: number;
+	readonly misfit: number;
 	readonly found: number;
 	readonly thin: number;
 	readonly fields: number;
@@ -53,6 +54,7 @@ function keyOf(draft: Draft, context: ReadContext): Key {
 		notUsed: outcomes.not_used,
 		outOfRun: strayNumber(draft) === undefined ? 0 : 1,
 		hintsMissed: hintsMissed(draft, context),
+		misfit: draft.misfit ?? 0,
 		found,
 		thin,
 		fields,
@@ -63,21 +65,26 @@ function keyOf(draft: Draft, context: ReadContext): Key {
 	};
 }
 
+/** A hint that is missed weighs as much as three tokens that nothing takes. */
+const HINT = 60;
+const against = ({ hintsMissed: missed, misfit }: Key): number => missed * HINT + misfit;
+
 const compareKeys = (a: Key, b: Key): number =>
 	Math.sign(a.notUsed) - Math.sign(b.notUsed) ||
-	a.hintsMissed - b.hintsMissed ||
+	against(a) - against(b) ||
 	a.outOfRun - b.outOfRun ||
 	b.found - a.found ||
 	a.thin - b.thin;
 
 /** Why a reading stands where it does, beside what it tells. */
 type Reason =
-	'none' | 'equalFirst' | 'equal' | 'fewerHints' | 'outOfRun' | 'fewerFound' | 'thinner';
+	'none' | 'equalFirst' | 'equal' | 'fewerHints' | 'misfit' | 'outOfRun' | 'fewerFound' | 'thinner';
 const REASONS = [
 	'none',
 	'equalFirst',
 	'equal',
 	'fewerHints',
+	'misfit',
 	'outOfRun',
 	'fewerFound',
 	'thinner'
@@ -87,6 +94,7 @@ function reasonOf(key: Key, first: Key, equalFirst: boolean): Reason {
 	if (key === first) return equalFirst ? 'equalFirst' : 'none';
 	if (compareKeys(key, first) === 0) return 'equal';
 	if (key.hintsMissed > first.hintsMissed) return 'fewerHints';
+	if (key.misfit > first.misfit) return 'misfit';
 	if (key.outOfRun > first.outOfRun) return 'outOfRun';
 	if (key.found < first.found) return 'fewerFound';
 	return key.thin > first.thin ? 'thinner' : 'none';
@@ -97,8 +105,9 @@ const said = new Map<number, string>();
 
 function whyOf(key: Key, reason: Reason): string {
 	const counts = [key.told, key.fields, key.contested, key.notListed, key.illegible, key.notUsed];
-	// No layout has as many as sixteen fields, so each count has a digit of its own.
-	const id = counts.reduce((sum, count) => sum * 16 + count, REASONS.indexOf(reason));
+	// No serial has as many as sixteen fields, so each count has a digit of its own; a tag is worded anew.
+	const id =
+		key.fields < 16 ? counts.reduce((sum, count) => sum * 16 + count, REASONS.indexOf(reason)) : -1;
 	const before = said.get(id);
 	if (before !== undefined) return before;
 	const words = text.why;
@@ -109,7 +118,7 @@ function whyOf(key: Key, reason: Reason): string {
 	if (key.notUsed > 0) parts.push(words.notUsed(key.notUsed));
 	if (reason !== 'none') parts.push(words[reason]);
 	const why = parts.join(' ');
-	said.set(id, why);
+	if (id >= 0) said.set(id, why);
 	return why;
 }
 

@@ -14,7 +14,9 @@ import { rowsInYear, type CodeEntry, type CompiledRow, type TableSet } from './t
 
 /** A reading before it is ranked. */
 export interface Draft {
-	readonly layout: Layout;
+	readonly layout: Pick<Layout, 'id' | 'title' | 'maker'>;
+	/** How badly a stamp of several lines fits its layout; a serial fits or does not. */
+	readonly misfit?: number;
 	readonly maker: Maker;
 	readonly division: string | null;
 	readonly year: number | null;

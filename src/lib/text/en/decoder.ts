@@ -183,6 +183,7 @@ export const decoderText = {
 		notUsed: (n: number) =>
 			`${counted(n, 'code was', 'codes were')} not used in this scope, by a source that lists all.`,
 		fewerHints: 'It does not agree with what you gave beside it.',
+		misfit: 'Its lines and fields fit what was typed less well than the first.',
 		outOfRun: 'Its running number stands outside the run that we have on record for the division.',
 		fewerFound: 'Fewer of its fields are in the tables than in the first.',
 		thinner: 'More of it rests on thin rows than in the first.',

@@ -1,0 +1,224 @@
+/** Makes the readings of a stamp under one lined layout: one for each year and division that it may be of. */
+import { DIVISIONS, makerOf, type ReadContext, type Reading, type ReadingField } from '../../types';
+import { stampsText as text } from '../../text/en/stamps';
+import { decoderText } from '../../text/en/decoder';
+import { readStampedSerial, carOf, type KnownCar } from '../known-car';
+import { isRead, textOf } from './characters';
+import { fieldOf, type FieldResult } from './field';
+import { cellsOfPlaced, linedField, serialFields, type LinedReader } from './lined-field';
+import { partsOf } from './lined-lookup';
+import type { LinedMatch } from './lined-match';
+import type { Placed } from './line-match';
+import type { Line } from './lines';
+import { entriesMatching, type Scope } from './look-up';
+import type { Draft } from './reading';
+import { rowsInYear, tableId, type TableSet } from './table-set';
+
+export interface LinedStamp {
+	readonly match: LinedMatch;
+	readonly tables: TableSet;
+	readonly context: ReadContext;
+	readonly car: KnownCar;
+}
+
+const placedIn = ({ lines }: LinedMatch): Placed[] => lines.flatMap(({ placed }) => placed);
+
+/** The car's own number where the stamp carries it or a part of it: the readings of each. */
+function serialsOn({ match, tables, context }: LinedStamp): Map<Placed, readonly Reading[]> {
+	const serials = new Map<Placed, readonly Reading[]>();
+	for (const placed of placedIn(match)) {
+		const { reads } = placed.field;
+		if (reads.by !== 'serial') continue;
+		const { layouts, places } = reads;
+		serials.set(placed, readStampedSerial(cellsOfPlaced(placed), layouts, places, tables, context));
+	}
+	return serials;
+}
+
+/**
+ * The fields of a serial that stand whole in the places given, as equally likely readings have them; where those
+ * differ, all that they say is listed.
+ */
+function agreedFields(readings: readonly Reading[], placed: Placed): ReadingField[] {
+	const { reads } = placed.field;
+	const places = reads.by === 'serial' ? reads.places : undefined;
+	const [first] = readings;
+	const here = (first?.fields ?? []).filter(
+		({ from, to, outcome }) =>
+			outcome !== 'illegible' &&
+			(places === undefined ||
+				Array.from({ length: to - from + 1 }, (_, n) => from + n).every((at) =>
+					places.includes(at)
+				))
+	);
+	return here.map((field): ReadingField => {
+		const same = readings.flatMap(({ fields }) =>
+			fields.filter(({ name, from }) => name === field.name && from === field.from)
+		);
+		if (same.every(({ meaning }) => meaning === field.meaning)) return field;
+		const possible = same.flatMap(({ meaning, values }) =>
+			meaning === null ? [] : [{ meaning, values }]
+		);
+		return { ...field, meaning: text.differs, detail: '', values: {}, possible };
+	});
+}
+
+/** Model years that the stamp itself names, else the one that is known of the car, else an open one. */
+function yearsOf({ match, car }: LinedStamp): readonly (number | null)[] {
+	const [from, to] = match.layout.years;
+	for (const placed of placedIn(match)) {
+		const { reads } = placed.field;
+		if (reads.by !== 'year') continue;
+		const cells = cellsOfPlaced(placed);
+		const named = cells.every(isRead) ? (reads.years[cells.join('')] ?? []) : [];
+		if (named.length > 0) return named;
+	}
+	if (from === to) return [from];
+	const { year } = car;
+	return [year !== undefined && from <= year && year <= to ? year : null];
+}
+
+/** Divisions that the rows of the naming field are of. */
+function divisionsOf(stamp: LinedStamp, year: number | null): readonly string[] {
+	const { layout } = stamp.match;
+	const allowed: readonly string[] = layout.divisions ?? DIVISIONS[layout.maker];
+	const [only] = allowed;
+	if (only !== undefined && allowed.length === 1) return allowed;
+	const { division } = stamp.car;
+	const known = division !== undefined && allowed.includes(division) ? [division] : [];
+	const naming = placedIn(stamp.match).find(({ field }) => field.name === layout.divisionFrom);
+	if (naming?.field.reads.by !== 'table') return known;
+	const { table, parts, otherwise = [] } = naming.field.reads;
+	const compiled = stamp.tables.tables.get(tableId(layout.maker, table));
+	const named = [parts, ...otherwise]
+		.flatMap((split) => entriesMatching(compiled, partsOf(cellsOfPlaced(naming), split)))
+		.flatMap((entry) => rowsInYear(entry, year))
+		.flatMap(({ values, division: own }) =>
+			typeof values.division === 'string' ? [values.division] : own
+		);
+	const all = [...new Set([...known, ...named])].filter((own) => allowed.includes(own));
+	return all.sort();
+}
+
+/** What scopes the other fields comes first: what the layout names, then numbers, then dates. */
+function orderOf(placed: readonly Placed[], first: readonly string[]): Placed[] {
+	const rank = ({ field }: Placed): number => {
+		const at = first.indexOf(field.name);
+		if (at >= 0) return at;
+		return field.reads.by === 'date' ? first.length + 1 : first.length;
+	};
+	return [...placed].sort((a, b) => rank(a) - rank(b));
+}
+
+/** What a field's rows tell of the car that others are scoped by. */
+function learn(scope: Scope, results: readonly FieldResult[]): void {
+	for (const { field } of results) {
+		if (field.outcome !== 'found' || field.possible.length > 0) continue;
+		const { line, plant_code } = field.values;
+		if (typeof line === 'string') scope.line ??= [line];
+		if (field.name === 'assembly_plant') scope.plant ??= String(plant_code ?? field.code);
+		if (field.name === 'body_style') scope.body ??= field.code;
+	}
+}
+
+/** Calendar years before and in which a part with these rows was made. */
+function yearsOfParts(results: readonly FieldResult[], layout: readonly [number, number]) {
+	const rows = results
+		.filter(({ field }) => field.name === 'casting_number')
+		.flatMap((result) => result.rows);
+	const from = rows.map((row) => row.years_from ?? layout[0]);
+	const to = rows.map((row) => row.years_to ?? layout[1]);
+	const span = rows.length === 0 ? layout : ([Math.min(...from), Math.max(...to)] as const);
+	return [span[0] - 1, span[1]] as const;
+}
+
+function unplacedField(line: Line, from: number, to: number, why: string): FieldResult {
+	const cells = line.cells.slice(from, to);
+	const read = cells.every(isRead);
+	const head = {
+		name: 'unknown' as const,
+		label: text.unplaced,
+		from: (line.places[from] as readonly [number, number])[0],
+		to: (line.places[to - 1] as readonly [number, number])[1]
+	};
+	const field = fieldOf(head, {
+		code: textOf(cells),
+		outcome: read ? 'not_listed' : 'illegible',
+		detail: read ? why : decoderText.fields.unread(cells)
+	});
+	return { field, rows: [], counts: false, table: null };
+}
+
+const onLine = ({ number }: Line, several: boolean, result: FieldResult): FieldResult =>
+	several ? { ...result, field: { ...result.field, line: number } } : result;
+
+/** Everything that the stamp says under one year and division, in the order in which it is typed. */
+function resultsOf(
+	stamp: LinedStamp,
+	scope: Scope,
+	serials: ReadonlyMap<Placed, readonly Reading[]>
+): FieldResult[] {
+	const { layout, lines } = stamp.match;
+	const { tables } = stamp;
+	const several = lines.length > 1 || layout.lines.length > 1;
+	const told: FieldResult[] = [];
+	for (const placed of orderOf(placedIn(stamp.match), layout.lookFirst ?? [])) {
+		const reader: LinedReader = {
+			tables,
+			maker: layout.maker,
+			scope,
+			loose: layout.kind !== 'body_tag',
+			years: yearsOfParts(told, layout.years)
+		};
+		const serial = serials.get(placed);
+		const own =
+			serial === undefined
+				? linedField(placed, reader)
+				: serialFields(placed, agreedFields(serial, placed), (key) => {
+						const row = tables.rows.get(key);
+						return row === undefined ? [] : [row];
+					});
+		learn(scope, own);
+		told.push(...own.map((result) => onLine(placed.line, several, result)));
+	}
+	for (const { line, unplaced } of lines)
+		for (const [from, to] of unplaced)
+			told.push(onLine(line, several, unplacedField(line, from, to, text.noField)));
+	return told
+		.map((result, index) => ({ result, index }))
+		.sort((a, b) => a.result.field.from - b.result.field.from || a.index - b.index)
+		.map(({ result }) => result);
+}
+
+/** What is known of the car, as far as it may be a car of this maker; the number on the stamp itself goes first. */
+function carFor(stamp: LinedStamp, serials: ReadonlyMap<Placed, readonly Reading[]>): KnownCar {
+	const { maker } = stamp.match.layout;
+	const own = [...serials.values()].find((readings) => readings.length > 0);
+	const beside = (stamp.car.maker ?? maker) === maker ? stamp.car : {};
+	return { ...beside, ...(own === undefined ? {} : carOf(own)) };
+}
+
+/** The readings of a stamp under a layout, before they are ranked. */
+export function linedDrafts(stamp: LinedStamp): Draft[] {
+	const { match } = stamp;
+	const serials = serialsOn(stamp);
+	const own = { ...stamp, car: carFor(stamp, serials) };
+	const complete =
+		match.missing.length === 0 && match.lines.every(({ missing }) => missing.length === 0);
+	return yearsOf(own).flatMap((year) => {
+		const divisions = divisionsOf(own, year);
+		return (divisions.length === 0 ? [undefined] : divisions).map((division): Draft => {
+			const { maker: _maker, year: _year, division: _division, ...others } = own.car;
+			const scope: Scope = { ...others, year, ...(division === undefined ? {} : { division }) };
+			return {
+				layout: match.layout,
+				maker: makerOf(division ?? '') ?? match.layout.maker,
+				division: division ?? null,
+				year,
+				misfit: match.cost,
+				complete,
+				results: resultsOf(own, scope, serials)
+			};
+		});
+	});
+}
