@@ -30,7 +30,16 @@ import { FILE_BYTES } from '../../src/lib/types';
 import { DAY, HOUR, MINUTE, standingClock } from '../fixtures/clock';
 import { openTestDatabase, type TestDatabase } from '../fixtures/database';
 import { actorOf, addPerson } from '../fixtures/people';
-import { heic, jpegThatSays, pdf, phoneJpeg, plainPng, plainWebp, zip } from '../fixtures/pictures';
+import {
+	heic,
+	jpegThatSays,
+	largeJpeg,
+	pdf,
+	phoneJpeg,
+	plainPng,
+	plainWebp,
+	zip
+} from '../fixtures/pictures';
 
 const folder = mkdtempSync(join(tmpdir(), 'tallyplate-store-'));
 let database: TestDatabase;
@@ -166,6 +175,14 @@ describe('a picture', () => {
 			width: 200,
 			height: 100,
 			takenAt: null
+		});
+	});
+
+	it('of 60 megapixels is taken', { timeout: 60_000 }, async () => {
+		expect(await kept(await largeJpeg(9_000, 6_700))).toMatchObject({
+			state: 'ready',
+			width: 9_000,
+			height: 6_700
 		});
 	});
 
