@@ -78,13 +78,14 @@ function withPlaces(cells: readonly Cell[], places: readonly number[], length: n
 	return whole;
 }
 
-/** The car's number, or a part of it, as it stands on another stamp. */
+/** The car's number, or a part of it, as it stands on another stamp; of the years of that stamp where it can be. */
 export function readStampedSerial(
 	cells: readonly Cell[],
 	ids: readonly string[],
 	places: readonly number[] | undefined,
 	tables: TableSet,
-	context: ReadContext
+	context: ReadContext,
+	years: readonly [from: number, to: number]
 ): readonly Reading[] {
 	const own = PREPARED.filter(({ layout }) => ids.includes(layout.id));
 	const readings = own.flatMap((prepared) => {
@@ -93,5 +94,13 @@ export function readStampedSerial(
 		const text = { cells: whole, normalised: '', origins: [] };
 		return readSerial(text, tables, context, false, [prepared]).readings;
 	});
-	return readings.filter(({ rank }) => rank === 1);
+	const narrowed = [
+		(reading: Reading) => reading.rank === 1,
+		({ model_year: year }: Reading) => year !== null && years[0] <= year && year <= years[1],
+		({ model_year: year }: Reading) => year === context.year
+	].reduce((left, test) => {
+		const kept = left.filter(test);
+		return kept.length > 0 ? kept : left;
+	}, readings);
+	return narrowed.map((reading) => ({ ...reading, rank: 1 }));
 }

@@ -36,7 +36,7 @@ const NEAR = 120;
 /** At most so many layouts are read; the others fit less well than all of these. */
 const MOST_LAYOUTS = 12;
 
-/** Whether at least half of what is typed has its field. */
+/** Whether at least a third of what is typed has its field: two plates may be typed into one. */
 function mostlyPlaced({ lines }: LinedMatch): boolean {
 	let typed = 0;
 	let placed = 0;
@@ -44,7 +44,7 @@ function mostlyPlaced({ lines }: LinedMatch): boolean {
 		typed += line.cells.length;
 		for (const { from, to } of own) placed += to - from;
 	}
-	return placed * 2 >= typed && placed > 0;
+	return placed * 3 >= typed && placed > 0;
 }
 
 /** Pads and castings are typed as one line, whatever stood beneath what. */

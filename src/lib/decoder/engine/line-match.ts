@@ -30,16 +30,6 @@ export const COSTS = {
 	optionalField: 1
 } as const;
 
-interface Step {
-	readonly cost: number;
-	readonly next: readonly [state: number, at: number];
-	readonly takes?: readonly [from: number, to: number];
-	readonly drops?: readonly [from: number, to: number];
-	readonly lacks?: true;
-}
-
-const END: Step = { cost: 0, next: [-1, -1] };
-
 /** The place after a printed word that begins at a place, or null. */
 function afterWord(words: readonly string[], { cells, edges }: Line, at: number): number | null {
 	if (edges[at] !== true) return null;
@@ -73,82 +63,107 @@ function reach({ shape: { chars } }: LineField, cells: readonly Cell[], at: numb
 	return length;
 }
 
-/** The cheapest way to lay the fields over the line; of equally cheap ones the one with the longer fields. */
-export function matchLine(form: LineForm, line: Line): LineMatch {
-	const { fields } = form;
-	const { cells, edges } = line;
-	const width = cells.length + 1;
-	// Two states a field: not yet taken, and taken once and free to repeat.
-	const known = new Array<Step | undefined>((fields.length * 2 + 1) * width);
+/** What is known of a state: its cost, what it does, and where that leads. */
+const SLOTS = 6;
+const [COST, ACT, STATE, AT, FROM, TO] = [0, 1, 2, 3, 4, 5] as const;
+const [TAKE, PASS, LACK, DROP] = [1, 2, 3, 4] as const;
+/** Costs are kept from one up, so that naught stands for "not worked out yet". */
+const BASE = 1;
 
-	const edgeCost = (at: number): number => (edges[at] === true ? 0 : COSTS.withinToken);
-	const tokenEnd = (at: number): number => edges.indexOf(true, at + 1);
+/** Works out the cheapest way from each state that is reached; of equally cheap ones the one with the longer field. */
+class Laying {
+	private readonly known: Int32Array;
+	private readonly width: number;
 
-	function* takings(state: number, begin: number): Generator<Step> {
-		const field = fields[state >> 1] as LineField;
-		const after = field.words === undefined ? null : afterWord(field.words, line, begin);
-		const [fewest, most] = lengthsOf(field);
-		for (const from of after === null ? [begin] : [after, begin])
-			for (let length = reach(field, cells, from, most); length >= fewest; length -= 1) {
-				const to = from + length;
-				const whole = edges[to] === true && (edges[from] === true || from === after);
-				if (field.shape.whole === true && !whole) continue;
-				const unread = cells.slice(from, to).every((cell) => cell === UNREAD);
-				const own =
-					(from === after ? 0 : edgeCost(from)) + edgeCost(to) + (unread ? COSTS.unreadField : 0);
-				const end =
-					field.wordsAfter === undefined ? to : (afterWord(field.wordsAfter, line, to) ?? to);
-				const next = field.repeats === true ? state | 1 : (state | 1) + 1;
-				yield {
-					cost: own + best(next, end).cost,
-					next: [next, end],
-					takes: [from, to]
-				};
-			}
+	constructor(
+		private readonly fields: readonly LineField[],
+		private readonly line: Line
+	) {
+		this.width = line.cells.length + 1;
+		// Two states a field: not yet taken, and taken once and free to repeat.
+		this.known = new Int32Array((fields.length * 2 + 1) * this.width * SLOTS);
 	}
 
-	function* steps(state: number, at: number): Generator<Step> {
+	slot(state: number, at: number, name: number): number {
+		return this.known[(state * this.width + at) * SLOTS + name] as number;
+	}
+
+	private keep(id: number, act: number, cost: number, state: number, at: number, from = 0, to = 0) {
+		const { known } = this;
+		const before = known[id + COST] as number;
+		if (before !== 0 && before <= cost + BASE) return;
+		known[id + COST] = cost + BASE;
+		known[id + ACT] = act;
+		known[id + STATE] = state;
+		known[id + AT] = at;
+		known[id + FROM] = from;
+		known[id + TO] = to;
+	}
+
+	private take(id: number, state: number, field: LineField, from: number, afterWords: boolean) {
+		const { cells, edges } = this.line;
+		const [fewest, most] = lengthsOf(field);
+		const next = field.repeats === true ? state | 1 : (state | 1) + 1;
+		const begins = afterWords || edges[from] === true;
+		for (let length = reach(field, cells, from, most); length >= fewest; length -= 1) {
+			const to = from + length;
+			const whole = begins && edges[to] === true;
+			if (field.shape.whole === true && !whole) continue;
+			let own = (begins ? 0 : COSTS.withinToken) + (edges[to] === true ? 0 : COSTS.withinToken);
+			let read = false;
+			for (let index = from; index < to; index += 1) {
+				if (index > from && edges[index] === true) own += COSTS.withinToken;
+				if (cells[index] !== UNREAD) read = true;
+			}
+			if (!read) own += COSTS.unreadField;
+			const end =
+				field.wordsAfter === undefined ? to : (afterWord(field.wordsAfter, this.line, to) ?? to);
+			this.keep(id, TAKE, own + this.best(next, end), next, end, from, to);
+		}
+	}
+
+	best(state: number, at: number): number {
+		const { fields, line, width } = this;
 		const field = fields[state >> 1];
+		if (field === undefined && at === line.cells.length) return 0;
+		const id = (state * width + at) * SLOTS;
+		const before = this.known[id + COST] as number;
+		if (before !== 0) return before - BASE;
 		if (field !== undefined) {
-			yield* takings(state, at);
+			const after = field.words === undefined ? null : afterWord(field.words, line, at);
+			if (after !== null) this.take(id, state, field, after, true);
+			this.take(id, state, field, at, false);
 			const next = (state | 1) + 1;
 			const taken = (state & 1) === 1;
 			const lacks = !taken && field.optional !== true;
 			const own = taken ? 0 : lacks ? COSTS.missingField : COSTS.optionalField;
-			const rest = own + best(next, at).cost;
-			yield lacks
-				? { cost: rest, next: [next, at], lacks: true }
-				: { cost: rest, next: [next, at] };
+			this.keep(id, lacks ? LACK : PASS, own + this.best(next, at), next, at);
 		}
-		if (at < cells.length) {
-			const end = tokenEnd(at);
-			yield { cost: COSTS.token + best(state, end).cost, next: [state, end], drops: [at, end] };
+		if (at < line.cells.length) {
+			const end = line.edges.indexOf(true, at + 1);
+			this.keep(id, DROP, COSTS.token + this.best(state, end), state, end, at, end);
 		}
+		return (this.known[id + COST] as number) - BASE;
 	}
+}
 
-	function best(state: number, at: number): Step {
-		if (state >> 1 >= fields.length && at === cells.length) return END;
-		const id = state * width + at;
-		const before = known[id];
-		if (before !== undefined) return before;
-		let found: Step | undefined;
-		for (const step of steps(state, at))
-			if (found === undefined || step.cost < found.cost) found = step;
-		return (known[id] = found as Step);
-	}
-
+/** The cheapest way to lay the fields of a form over a line. */
+export function matchLine({ fields }: LineForm, line: Line): LineMatch {
+	const laying = new Laying(fields, line);
+	const cost = laying.best(0, 0);
 	const placed: Placed[] = [];
 	const unplaced: (readonly [number, number])[] = [];
 	const missing: LineField[] = [];
 	let [state, at] = [0, 0];
-	const { cost } = best(0, 0);
-	for (let step = best(0, 0); step !== END; step = best(state, at)) {
+	while (state >> 1 < fields.length || at < line.cells.length) {
 		const field = fields[state >> 1] as LineField;
-		if (step.takes !== undefined)
-			placed.push({ field, line, from: step.takes[0], to: step.takes[1] });
-		if (step.drops !== undefined) unplaced.push(step.drops);
-		if (step.lacks === true) missing.push(field);
-		[state, at] = step.next;
+		const from = laying.slot(state, at, FROM);
+		const to = laying.slot(state, at, TO);
+		const act = laying.slot(state, at, ACT);
+		if (act === TAKE) placed.push({ field, line, from, to });
+		else if (act === DROP) unplaced.push([from, to]);
+		else if (act === LACK) missing.push(field);
+		[state, at] = [laying.slot(state, at, STATE), laying.slot(state, at, AT)];
 	}
 	return { line, cost, placed, unplaced, missing };
 }

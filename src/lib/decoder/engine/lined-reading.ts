@@ -30,7 +30,10 @@ function serialsOn({ match, tables, context }: LinedStamp): Map<Placed, readonly
 		const { reads } = placed.field;
 		if (reads.by !== 'serial') continue;
 		const { layouts, places } = reads;
-		serials.set(placed, readStampedSerial(cellsOfPlaced(placed), layouts, places, tables, context));
+		serials.set(
+			placed,
+			readStampedSerial(cellsOfPlaced(placed), layouts, places, tables, context, match.layout.years)
+		);
 	}
 	return serials;
 }
