@@ -85,9 +85,9 @@ export const peopleText = {
 		'person.second_factor_added': () => 'added a second factor',
 		'person.second_factor_removed': () => 'removed the second factor',
 		'person.role_changed': ({ from, to, areas_to }) => {
-			const areas =
-				Array.isArray(areas_to) && areas_to.length > 0 ? ` for ${areas_to.join(', ')}` : '';
-			return `changed the role from ${from} to ${to}${areas}`;
+			const areas = Array.isArray(areas_to) ? areas_to.join(', ') : '';
+			if (from === to) return `changed the divisions of a ${to} to ${areas || 'none'}`;
+			return `changed the role from ${from} to ${to}${areas && ` for ${areas}`}`;
 		},
 		'person.paused': ({ until, reason }) => `paused until ${String(until).slice(0, 10)}: ${reason}`,
 		'person.resumed': () => 'ended the pause',
