@@ -125,6 +125,9 @@ function asKind(kind: StampKind, typed: Typed): Read {
 	}
 }
 
+const NO_CODE: Read = { kind: 'code', readings: [], more: 0, problems: [] };
+const hasReadings = ({ readings }: Read): boolean => readings.length > 0;
+
 /** Reads a text as every kind that fits: a serial that fits whole is one, and nothing else is tried. */
 function asAny(typed: Typed): Read {
 	const { characters, text, layouts } = typed;
@@ -132,16 +135,18 @@ function asAny(typed: Typed): Read {
 	const { cells } = characters;
 	const serial = asSerial(typed);
 	if (serial.readings[0]?.state === 'complete') return serial;
-	const parts = (['engine', 'casting', 'body_tag'] as const).map((kind) => asLined(kind, typed));
-	const sure = parts.filter(({ whole, readings }) => whole && tells(readings[0]));
-	const others = parts.filter((part) => !sure.includes(part));
-	const code = cells.length < shortest(layouts) ? [asCode(typed)] : [];
-	const codeFirst = cells.length <= LIKELY_CODE || serial.readings.length === 0 || sure.length > 0;
-	const ordered = codeFirst
-		? [...(cells.length <= LIKELY_CODE ? [...code, ...sure] : [...sure, ...code]), serial]
-		: [serial, ...code];
-	const told = [...ordered, asDate(typed), ...others].filter(({ readings }) => readings.length > 0);
-	return told.length === 0 ? serial : told.reduce(joined);
+	const parts = (['engine', 'casting', 'body_tag'] as const)
+		.map((kind) => asLined(kind, typed))
+		.filter(({ readings }) => tells(readings[0]));
+	const sure = parts.filter(({ whole }) => whole);
+	const code = cells.length < shortest(layouts) ? asCode(typed) : NO_CODE;
+	const likelyCode = cells.length <= LIKELY_CODE;
+	const one = likelyCode ? [code, ...sure] : [...sure, code];
+	const first = likelyCode || sure.length > 0 || serial.readings.length === 0;
+	const fitting = (first ? [...one, serial] : [serial, code]).filter(hasReadings);
+	// What only may be one is told after the serial, whose problems say what stands in its way.
+	const others = [asDate(typed), ...parts.filter(({ whole }) => !whole)].filter(hasReadings);
+	return [...(fitting.length === 0 ? [serial] : fitting), ...others].reduce(joined);
 }
 
 /**
