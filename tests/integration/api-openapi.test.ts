@@ -88,7 +88,7 @@ describe('the OpenAPI document', () => {
 		}
 		expect(Object.keys(readingQuerySchema.shape).sort()).toEqual([...READING_PARAMETERS].sort());
 		expect(Object.keys(readingBodySchema.shape).sort()).toEqual(
-			[...READING_PARAMETERS, 'context'].sort()
+			[...READING_PARAMETERS, 'context', 'fields'].sort()
 		);
 	});
 

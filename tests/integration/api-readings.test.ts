@@ -5,6 +5,7 @@ import { READER, READER_DIGEST } from '../../src/lib/server/readings';
 import {
 	problemDetailsSchema,
 	readAnswerSchema,
+	STAMP_KINDS,
 	type ProblemDetails,
 	type ReadAnswer
 } from '../../src/lib/types';
@@ -87,7 +88,7 @@ describe('GET /api/v1/readings', () => {
 			'plant plant_too_long',
 			'field unknown_field'
 		]);
-		expect(problem.errors[0]?.accepted).toEqual(['serial', 'code']);
+		expect(problem.errors[0]?.accepted).toEqual([...STAMP_KINDS]);
 		expect(problem.errors[2]?.accepted).toContain('Pontiac');
 	});
 
@@ -96,8 +97,9 @@ describe('GET /api/v1/readings', () => {
 		['?text=', [422, 'text empty']],
 		[`?text=${'1'.repeat(65)}`, [422, 'text too_long']],
 		['?text=%3F%3F-*', [422, 'text nothing_struck']],
-		['?text=1&kind=body_tag', [422, 'kind kind_not_available']],
-		['?text=1&kind=engine', [422, 'kind kind_not_available']],
+		[`?text=${'1'.repeat(121)}&kind=engine`, [422, 'text too_long']],
+		[`?text=${'1'.repeat(601)}&kind=body_tag`, [422, 'text too_long']],
+		[`?text=1&serial=${'1'.repeat(65)}`, [422, 'serial too_long']],
 		['?text=1&year=1967.5', [422, 'year year_out_of_range']],
 		['?text=1&year=2040', [422, 'year year_out_of_range']],
 		['?text=1&maker=ford&division=Pontiac', [422, 'division division_of_other_maker']],
@@ -185,8 +187,14 @@ describe('POST /api/v1/readings', () => {
 		[{}, [422, 'text empty']],
 		[{ text: 5 }, [422, 'text not_text']],
 		[{ text: '1', year: [1967] }, [422, 'year not_text']],
-		[{ text: '1', fields: { paint: '50' } }, [422, 'fields kind_not_available']],
-		[{ text: '1', context: { serial: '1' } }, [422, 'context serial_not_available']],
+		[{ text: '1', fields: { paint: '50' } }, [422, 'fields given_twice']],
+		[{ kind: 'engine', fields: { paint: '50' } }, [422, 'fields fields_of_other_kind']],
+		[
+			{ fields: { paint: ['50'], color: '1' } },
+			[422, 'fields.paint not_text', 'fields.color unknown_field']
+		],
+		[{ fields: { paint: ' ' } }, [422, 'fields empty']],
+		[{ fields: '50' }, [422, 'fields not_an_object']],
 		[{ text: '1', year: 1967, context: { year: 1967 } }, [422, 'year given_twice']],
 		[{ text: '1', context: 'gm' }, [400, 'context not_an_object']],
 		[

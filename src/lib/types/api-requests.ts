@@ -8,9 +8,6 @@ import { FIELD_NAMES } from './fields';
 import { MAX_STAMPS, MAX_TEXT, STAMP_KINDS } from './readings';
 import { FIRST_YEAR, LAST_YEAR, SOURCE_KINDS } from './rows';
 
-/** Kinds of stamp that can be read. */
-export const AVAILABLE_KINDS = STAMP_KINDS;
-
 const maker = z.string().describe('Corporation or division, by any name that /makers lists');
 const division = z.string().describe('Division, by any name that /makers lists');
 const year = z.int().min(FIRST_YEAR).max(LAST_YEAR).describe('Model year');
@@ -41,10 +38,15 @@ const reading = {
 			'What is struck on the car. ?, _, a star inside, or a run of lower-case x stand for what cannot be read; [38] for either. ' +
 				'Lines of a body tag are joined by " / " or line breaks. 64 characters; engine and casting 120; body_tag 600 and 14 lines'
 		),
-	kind: z.enum(AVAILABLE_KINDS).optional().describe('Left out: every kind that fits, ranked'),
+	kind: z.enum(STAMP_KINDS).optional().describe('Left out: every kind that fits, ranked'),
 	...context,
 	edition: edition.optional()
 };
+
+const fields = z
+	.partialRecord(z.enum(FIELD_NAMES), z.string().max(MAX_TEXT.serial))
+	.optional()
+	.describe('For body_tag in place of text: what stands in each named field');
 
 /** GET /readings. */
 export const readingQuerySchema = z.strictObject({
@@ -61,6 +63,8 @@ export const readingQuerySchema = z.strictObject({
 /** The body of POST /readings: the same, the context beside the text or under `context`. */
 export const readingBodySchema = z.strictObject({
 	...reading,
+	text: reading.text.optional(),
+	fields,
 	reader: z.string().optional(),
 	explain: z.boolean().optional(),
 	context: z.strictObject(context).optional()
@@ -73,10 +77,7 @@ export const stampsBodySchema = z.strictObject({
 			z.strictObject({
 				kind: reading.kind,
 				text: reading.text.optional(),
-				fields: z
-					.partialRecord(z.enum(FIELD_NAMES), z.string().max(MAX_TEXT.serial))
-					.optional()
-					.describe('For body_tag in place of text: what stands in each named field'),
+				fields,
 				place: z.string().max(100).optional().describe('Where it sits')
 			})
 		)

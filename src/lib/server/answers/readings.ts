@@ -7,7 +7,15 @@ import {
 	REVALIDATE,
 	type Asked
 } from '../http';
-import { isThisReader, READER, readAgainst, writeAnswer, type ReadRequest } from '../readings';
+import {
+	isThisReader,
+	READER,
+	readAgainst,
+	readStampsAgainst,
+	writeAnswer,
+	type ReadRequest,
+	type StampsRequest
+} from '../readings';
 import { current, editionAt, type CompiledEdition } from '../reference';
 import { editionAsked } from './edition';
 
@@ -39,4 +47,13 @@ export async function answerPostedReading(
 ): Promise<Response> {
 	const edition = await editionAsked(asked.edition);
 	return answerPosted(counted(getClientAddress(), () => readAgainst(edition, asked)));
+}
+
+/** Answers several stamps of one car. */
+export async function answerStamps(
+	{ getClientAddress }: Asked,
+	asked: StampsRequest
+): Promise<Response> {
+	const edition = await editionAsked(asked.edition);
+	return answerPosted(counted(getClientAddress(), () => readStampsAgainst(edition, asked)));
 }

@@ -1,13 +1,17 @@
 import { z } from 'zod';
 import * as api from '../../types/api';
-import { readingBodySchema } from '../../types/api-requests';
+import { tallyLineSchema } from '../../types/tally';
+import { readingBodySchema, stampsBodySchema } from '../../types/api-requests';
 
 /** Schemas that the document names. An answer's parts are named too, so that it stays readable. */
 export const NAMED = {
 	Problem: api.problemDetailsSchema,
 	FieldError: api.fieldErrorSchema,
 	ReadingBody: readingBodySchema,
+	StampsBody: stampsBodySchema,
 	ReadAnswer: api.readAnswerSchema,
+	StampsAnswer: api.stampsAnswerSchema,
+	TallyLine: tallyLineSchema,
 	Reading: api.readingSchema,
 	ReadingField: api.readingFieldSchema,
 	ReadProblem: api.readProblemSchema,

@@ -37,10 +37,7 @@ function refusal(status: number): JsonSchema {
 }
 
 function success({ answers, csv, method }: Operation): JsonSchema {
-	const json =
-		answers === undefined
-			? { schema: { type: 'object' } }
-			: { schema: { $ref: refTo(answers) }, ...exampleOf(answers) };
+	const json = answers === undefined ? { schema: { type: 'object' } } : contentOf(answers);
 	return {
 		description: 'The answer',
 		...(method === 'get' && {
@@ -56,6 +53,16 @@ function success({ answers, csv, method }: Operation): JsonSchema {
 }
 
 const exampleOf = (name: SchemaName) => (EXAMPLES[name] ? { example: EXAMPLES[name] } : {});
+
+/** A schema with its example, or the several that it may be. */
+function contentOf(names: SchemaName | readonly SchemaName[]): JsonSchema {
+	if (typeof names === 'string') return { schema: { $ref: refTo(names) }, ...exampleOf(names) };
+	const shown = names.filter((name) => EXAMPLES[name]);
+	return {
+		schema: { oneOf: names.map((name) => ({ $ref: refTo(name) })) },
+		examples: Object.fromEntries(shown.map((name) => [name, { value: EXAMPLES[name] }]))
+	};
+}
 
 function parametersOf({ places, query }: Operation): JsonSchema[] {
 	const inPath = Object.entries(places ?? {}).map(([name, { description, example, values }]) => ({
@@ -88,7 +95,7 @@ function describe(operation: Operation): JsonSchema {
 		...(body && {
 			requestBody: {
 				required: true,
-				content: { 'application/json': { schema: { $ref: refTo(body) }, ...exampleOf(body) } }
+				content: { 'application/json': contentOf(body) }
 			}
 		}),
 		responses: {

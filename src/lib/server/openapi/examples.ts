@@ -19,6 +19,13 @@ const plain = {
 
 /** Shapes with values made up to show them; a test holds each against its schema. */
 export const EXAMPLES: Partial<Record<SchemaName, unknown>> = {
+	StampsBody: {
+		stamps: [
+			{ kind: 'serial', text: '24237?B1?????', place: 'dash' },
+			{ kind: 'engine', text: '0112 WS', place: 'pad of the block' }
+		],
+		context: { maker: 'Pontiac' }
+	},
 	ReadingBody: { text: '*24237?B1?????*', kind: 'serial', context: { maker: 'Pontiac' } },
 	ReadAnswer: {
 		edition: 1,

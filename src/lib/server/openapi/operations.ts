@@ -14,9 +14,10 @@ export interface Operation {
 		Record<string, { description: string; example: string; values?: readonly string[] }>
 	>;
 	readonly query?: z.ZodObject;
-	readonly body?: SchemaName;
+	/** One schema, or the several that a body may be of. */
+	readonly body?: SchemaName | readonly SchemaName[];
 	/** Left out for the document itself, which has no schema of its own. */
-	readonly answers?: SchemaName;
+	readonly answers?: SchemaName | readonly SchemaName[];
 	readonly csv?: boolean;
 	/** Refusals beside those that every address has. */
 	readonly refuses: readonly (404 | 413 | 415 | 422)[];
@@ -40,10 +41,11 @@ export const OPERATIONS: readonly Operation[] = [
 		path: '/readings',
 		method: 'post',
 		id: 'readPosted',
-		summary: 'Read a stamp, asked as JSON',
-		description: 'The same as GET, for askers who keep serials out of addresses.',
-		body: 'ReadingBody',
-		answers: 'ReadAnswer',
+		summary: 'Read a stamp, or several of one car, asked as JSON',
+		description:
+			'One stamp: the same as GET, for askers who keep serials out of addresses. Several under `stamps`: a result each, in the order asked, and `lines` in which they agree or disagree.',
+		body: ['ReadingBody', 'StampsBody'],
+		answers: ['ReadAnswer', 'StampsAnswer'],
 		refuses: [404, 413, 415, 422]
 	},
 	{

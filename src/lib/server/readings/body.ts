@@ -1,13 +1,32 @@
 import { interfaceText } from '../../text/en/interface';
-import type { FieldError } from '../../types';
+import { FIELD_NAMES, MAX_STAMPS, type FieldError, type FieldName } from '../../types';
 import { fault, invalid, malformed, type Parameters } from '../http';
-import { READING_PARAMETERS, type ReadingParameter } from './request';
+import {
+	READING_PARAMETERS,
+	readContext,
+	readEdition,
+	readRequest,
+	readStamp,
+	readSwitch,
+	type NamedFields,
+	type ReadingParameter,
+	type ReadRequest
+} from './request';
+import type { StampsRequest } from './stamps';
 
-const CONTEXT = ['field', 'maker', 'division', 'year', 'plant'] as const;
+const CONTEXT = ['field', 'maker', 'division', 'year', 'plant', 'serial'] as const;
 const MEMBERS: readonly string[] = [...READING_PARAMETERS, 'context', 'fields'];
-const CONTEXT_MEMBERS: readonly string[] = [...CONTEXT, 'serial'];
+const STAMPS_MEMBERS: readonly string[] = ['stamps', 'context', 'edition', 'explain'];
+const STAMP_MEMBERS: readonly string[] = ['kind', 'text', 'fields', 'place'];
+const MOST_OF_PLACE = 100;
 
 type Members = Readonly<Record<string, unknown>>;
+
+const isObject = (value: unknown): value is Members =>
+	typeof value === 'object' && value !== null && !Array.isArray(value);
+
+const within = (path: string, faults: readonly FieldError[]): FieldError[] =>
+	faults.map((one) => ({ ...one, field: path + one.field }));
 
 function unknownMembers(object: Members, accepted: readonly string[]): FieldError[] {
 	return Object.keys(object)
@@ -34,21 +53,51 @@ function asText(name: string, value: unknown, faults: FieldError[]): string | un
 	return undefined;
 }
 
-const isObject = (value: unknown): value is Members =>
-	typeof value === 'object' && value !== null && !Array.isArray(value);
+const isFieldName = (name: string): name is FieldName =>
+	(FIELD_NAMES as readonly string[]).includes(name);
+
+/** The named fields of a body tag; blank ones count as absent. */
+function asFields(value: unknown, faults: FieldError[]): NamedFields | undefined {
+	if (value === undefined || value === null) return undefined;
+	if (!isObject(value)) {
+		faults.push(
+			fault('fields', 'not_an_object', interfaceText.malformed.notAnObjectNamed('fields'))
+		);
+		return undefined;
+	}
+	const fields: Partial<Record<FieldName, string>> = {};
+	for (const [name, content] of Object.entries(value)) {
+		const path = `fields.${name.slice(0, 40)}`;
+		if (!isFieldName(name)) {
+			faults.push(fault(path, 'unknown_field', interfaceText.invalid.field(name), FIELD_NAMES));
+			continue;
+		}
+		const text = asText(path, content, faults);
+		if (text !== undefined) fields[name] = text;
+	}
+	return fields;
+}
+
+/** Context of a body: an object, or nothing. @throws {Refusal} 400 */
+function contextOf(body: Members, accepted: readonly string[]): Members {
+	const context = body['context'] ?? {};
+	const unknown = unknownMembers(body, accepted);
+	if (isObject(context)) unknown.push(...unknownMembers(context, CONTEXT));
+	else
+		unknown.push(
+			fault('context', 'not_an_object', interfaceText.malformed.notAnObjectNamed('context'))
+		);
+	if (unknown.length > 0) throw malformed(...unknown);
+	return context as Members;
+}
 
 /**
- * The parameters of a reading that a JSON body gives: the same as in an address, the context beside the
- * text or under `context`.
- * @throws {Refusal} 400 for an unknown member; 422 for one of the wrong sort, given twice, or not read yet
+ * What a JSON body asks of one stamp: the same as in an address, the context beside the text or under
+ * `context`, and for a body tag `fields` in place of the text.
+ * @throws {Refusal} 400 for an unknown member; 422 for one of the wrong sort, or given twice
  */
-export function parametersOfBody(body: Members): Parameters<ReadingParameter> {
-	const context = body['context'] ?? {};
-	const unknown = unknownMembers(body, MEMBERS);
-	if (isObject(context)) unknown.push(...unknownMembers(context, CONTEXT_MEMBERS));
-	else unknown.push(fault('context', 'not_an_object', interfaceText.malformed.contextObject));
-	if (unknown.length > 0) throw malformed(...unknown);
-
+export function requestOfBody(body: Members): ReadRequest {
+	const context = contextOf(body, MEMBERS);
 	const faults: FieldError[] = [];
 	const given: Parameters<ReadingParameter> = {};
 	for (const name of READING_PARAMETERS) {
@@ -56,15 +105,67 @@ export function parametersOfBody(body: Members): Parameters<ReadingParameter> {
 		if (value !== undefined) given[name] = value;
 	}
 	for (const name of CONTEXT) {
-		const value = asText(name, (context as Members)[name], faults);
+		const value = asText(name, context[name], faults);
 		if (value === undefined) continue;
 		if (given[name] === undefined) given[name] = value;
 		else faults.push(fault(name, 'given_twice', interfaceText.invalid.twice(name)));
 	}
-	if (body['fields'] !== undefined && body['fields'] !== null)
-		faults.push(fault('fields', 'kind_not_available', interfaceText.invalid.tagFields));
-	if ((context as Members)['serial'] !== undefined)
-		faults.push(fault('context', 'serial_not_available', interfaceText.invalid.contextSerial));
+	const fields = asFields(body['fields'], faults);
 	if (faults.length > 0) throw invalid(...faults);
-	return given;
+	return readRequest(given, fields);
+}
+
+function stampOf(value: unknown, faults: FieldError[]): StampsRequest['stamps'][number] {
+	if (!isObject(value)) {
+		faults.push(fault('', 'not_an_object', interfaceText.malformed.notAnObjectNamed('A stamp')));
+		return { text: '' };
+	}
+	const text = asText('text', value['text'], faults);
+	const kind = asText('kind', value['kind'], faults);
+	const fields = asFields(value['fields'], faults);
+	const place = asText('place', value['place'], faults);
+	if (place !== undefined && [...place].length > MOST_OF_PLACE)
+		faults.push(fault('place', 'too_long', interfaceText.invalid.place(MOST_OF_PLACE)));
+	return {
+		...readStamp({ kind, text, fields }, faults),
+		...(place === undefined ? {} : { place })
+	};
+}
+
+/**
+ * What a JSON body asks of several stamps of one car. What is wrong with one names it: `stamps[2].text`.
+ * @throws {Refusal} 400 for an unknown member; 422 naming everything else that is wrong
+ */
+export function stampsRequestOfBody(body: Members): StampsRequest {
+	const known = contextOf(body, STAMPS_MEMBERS);
+	const { stamps } = body;
+	if (!Array.isArray(stamps) || stamps.length === 0 || stamps.length > MAX_STAMPS)
+		throw invalid(fault('stamps', 'number_of_stamps', interfaceText.invalid.stamps(MAX_STAMPS)));
+	const strange = stamps.flatMap((stamp, index) =>
+		isObject(stamp) ? within(`stamps[${index}].`, unknownMembers(stamp, STAMP_MEMBERS)) : []
+	);
+	if (strange.length > 0) throw malformed(...strange);
+
+	const faults: FieldError[] = [];
+	const edition = readEdition(asText('edition', body['edition'], faults));
+	const explain = readSwitch('explain', asText('explain', body['explain'], faults));
+	const given: Parameters<ReadingParameter> = {};
+	for (const name of CONTEXT) {
+		const value = asText(name, known[name], faults);
+		if (value !== undefined) given[name] = value;
+	}
+	const context = readContext(given, faults);
+	const read = stamps.map((stamp, index) => {
+		const own: FieldError[] = [];
+		const request = stampOf(stamp, own);
+		faults.push(
+			...own.map((one) => ({
+				...one,
+				field: one.field === '' ? `stamps[${index}]` : `stamps[${index}].${one.field}`
+			}))
+		);
+		return request;
+	});
+	if (faults.length > 0) throw invalid(...faults);
+	return { stamps: read, context, edition, explain };
 }

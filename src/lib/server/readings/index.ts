@@ -1,6 +1,6 @@
-/** Readings: what one stamp says against one edition. */
+/** Readings: what one stamp says against one edition, and what the stamps of one car say against each other. */
 export { divisionNamed, MAKER_LIST, makerNamed } from './aliases';
-export { parametersOfBody } from './body';
+export { requestOfBody, stampsRequestOfBody } from './body';
 export { readAgainst } from './read';
 export { isThisReader, READER, READER_DIGEST } from './reader';
 export {
@@ -10,4 +10,5 @@ export {
 	type ReadingParameter,
 	type ReadRequest
 } from './request';
+export { readStampsAgainst, type StampsRequest } from './stamps';
 export { writeAnswer } from './write';

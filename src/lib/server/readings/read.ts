@@ -5,7 +5,7 @@ import { READER } from './reader';
 import type { ReadRequest } from './request';
 
 /** The corporation by its full name; null where it is none of those whose tables we keep. */
-const named = (reading: Reading): ReadAnswer['readings'][number] => ({
+export const named = (reading: Reading): ReadAnswer['readings'][number] => ({
 	layout: reading.layout,
 	layout_title: reading.layout_title,
 	maker: reading.maker === null || reading.maker === 'other' ? null : MAKER_NAMES[reading.maker],
@@ -21,9 +21,9 @@ const named = (reading: Reading): ReadAnswer['readings'][number] => ({
 /** Reads against an edition in memory. Never waits. */
 export function readAgainst(
 	{ head, tables }: CompiledEdition,
-	{ text, kind, context, explain }: ReadRequest
+	{ text, fields, kind, context, explain }: ReadRequest
 ): ReadAnswer {
-	const result = read(tables, { text, kind, context, lookups: explain });
+	const result = read(tables, { text, fields, kind, context, lookups: explain });
 	return {
 		edition: head.number,
 		digest: head.digest,

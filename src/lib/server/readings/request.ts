@@ -1,7 +1,6 @@
 import { interfaceText } from '../../text/en/interface';
 import {
 	ALL_DIVISIONS,
-	AVAILABLE_KINDS,
 	FIELD_NAMES,
 	FIRST_YEAR,
 	LAST_YEAR,
@@ -11,7 +10,8 @@ import {
 	type FieldError,
 	type FieldName,
 	type ReadContext,
-	type StampKind
+	type StampKind,
+	type StampRequest
 } from '../../types';
 import { examineText } from '../../decoder';
 import { fault, malformed, invalid, type Parameters } from '../http';
@@ -26,6 +26,7 @@ export const READING_PARAMETERS = [
 	'division',
 	'year',
 	'plant',
+	'serial',
 	'edition',
 	'reader',
 	'explain'
@@ -35,7 +36,9 @@ export type ReadingParameter = (typeof READING_PARAMETERS)[number];
 /** What is to be read, checked: against which edition, and what is known beside it. */
 export interface ReadRequest {
 	readonly text: string;
-	/** Left out: every kind that is available, ranked. */
+	/** For a body tag, in place of the text: what stands in each named field. */
+	readonly fields?: NamedFields;
+	/** Left out: every kind that fits, ranked. */
 	readonly kind?: StampKind;
 	readonly context: ReadContext;
 	/** Left out: the present edition. */
@@ -46,7 +49,9 @@ export interface ReadRequest {
 	readonly explain: boolean;
 }
 
-type Faults = FieldError[];
+/** What stands in each named field of a body tag. */
+export type NamedFields = NonNullable<StampRequest['fields']>;
+export type Faults = FieldError[];
 const ON = ['1', 'true', 'yes', 'on'];
 const OFF = ['0', 'false', 'no', 'off'];
 
@@ -61,23 +66,11 @@ function readKind(value: string | undefined, faults: Faults): StampKind | undefi
 	if (value === undefined) return undefined;
 	const word = spelled(value);
 	const kind = STAMP_KINDS.find((one) => one === word);
-	if (kind !== undefined && (AVAILABLE_KINDS as readonly StampKind[]).includes(kind)) return kind;
-	faults.push(
-		kind === undefined
-			? fault(
-					'kind',
-					'unknown_kind',
-					interfaceText.invalid.kind(value, AVAILABLE_KINDS),
-					AVAILABLE_KINDS
-				)
-			: fault(
-					'kind',
-					'kind_not_available',
-					interfaceText.invalid.kindNotAvailable(kind, AVAILABLE_KINDS),
-					AVAILABLE_KINDS
-				)
-	);
-	return undefined;
+	if (kind === undefined)
+		faults.push(
+			fault('kind', 'unknown_kind', interfaceText.invalid.kind(value, STAMP_KINDS), STAMP_KINDS)
+		);
+	return kind;
 }
 
 function readField(value: string | undefined, faults: Faults): FieldName | undefined {
@@ -148,7 +141,8 @@ export function readEdition(value: string | undefined): number | undefined {
 	throw malformed(fault('edition', 'edition_invalid', interfaceText.malformed.edition));
 }
 
-function readSwitch(name: string, value: string | undefined): boolean {
+/** A switch as an address has it. @throws {Refusal} 400 unless one of the words for on and off */
+export function readSwitch(name: string, value: string | undefined): boolean {
 	const text = value?.trim().toLowerCase();
 	if (text === undefined || OFF.includes(text)) return false;
 	if (ON.includes(text)) return true;
@@ -158,27 +152,61 @@ function readSwitch(name: string, value: string | undefined): boolean {
 	);
 }
 
+function readSerial(value: string | undefined, faults: Faults): string | undefined {
+	if (value === undefined || [...value].length <= MAX_TEXT.serial) return value;
+	faults.push(fault('serial', 'too_long', interfaceText.text.too_long(MAX_TEXT.serial)));
+	return undefined;
+}
+
+/** What is known beside a stamp, checked; what is wrong with it joins `faults`. */
+export function readContext(given: Parameters<ReadingParameter>, faults: Faults): ReadContext {
+	const serial = readSerial(given.serial, faults);
+	return {
+		...readMaker(given.maker, given.division, faults),
+		year: readYear(given.year, faults),
+		plant: readPlant(given.plant, faults),
+		field: readField(given.field, faults),
+		// A stamp beside it that is a serial stands in for one that is not given.
+		...(serial === undefined ? {} : { serial })
+	};
+}
+
+const allOf = (fields: NamedFields): string => Object.values(fields).join(' / ');
+
+/** One stamp, checked: its kind, and its text or fields; what is wrong with it joins `faults`. */
+export function readStamp(
+	given: { readonly kind?: string; readonly text?: string; readonly fields?: NamedFields },
+	faults: Faults
+): Pick<ReadRequest, 'kind' | 'text' | 'fields'> {
+	const { fields } = given;
+	const kind = readKind(given.kind, faults);
+	if (fields !== undefined && kind !== undefined && kind !== 'body_tag')
+		faults.push(fault('fields', 'fields_of_other_kind', interfaceText.invalid.fieldsOfTag));
+	if (fields !== undefined && given.text !== undefined)
+		faults.push(fault('fields', 'given_twice', interfaceText.invalid.fieldsAndText));
+	const text = given.text ?? '';
+	const unreadable = examineText(fields === undefined ? text : allOf(fields), kind);
+	if (unreadable !== null) {
+		const name = fields === undefined ? 'text' : 'fields';
+		const most = MAX_TEXT[kind ?? (name === 'fields' ? 'body_tag' : 'serial')];
+		faults.push(fault(name, unreadable, interfaceText.text[unreadable](most)));
+	}
+	return { text, kind, ...(fields === undefined ? {} : { fields }) };
+}
+
 /**
  * Checks what an address or a form gives. Forgiving about case and space; what is blank counts as absent.
  * @throws {Refusal} 400 for an edition or switch that cannot be one; 422 naming everything else that is wrong
  */
-export function readRequest(given: Parameters<ReadingParameter>): ReadRequest {
+export function readRequest(
+	given: Parameters<ReadingParameter>,
+	fields?: NamedFields
+): ReadRequest {
 	const edition = readEdition(given.edition);
 	const explain = readSwitch('explain', given.explain);
 	const faults: Faults = [];
-	const kind = readKind(given.kind, faults);
-	const text = given.text ?? '';
-	const unreadable = examineText(text, kind);
-	if (unreadable !== null)
-		faults.push(
-			fault('text', unreadable, interfaceText.text[unreadable](MAX_TEXT[kind ?? 'serial']))
-		);
-	const context: ReadContext = {
-		...readMaker(given.maker, given.division, faults),
-		year: readYear(given.year, faults),
-		plant: readPlant(given.plant, faults),
-		field: readField(given.field, faults)
-	};
+	const stamp = readStamp({ kind: given.kind, text: given.text, fields }, faults);
+	const context = readContext(given, faults);
 	if (faults.length > 0) throw invalid(...faults);
-	return { text, kind, context, edition, reader: given.reader, explain };
+	return { ...stamp, context, edition, reader: given.reader, explain };
 }

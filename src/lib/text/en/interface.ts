@@ -16,7 +16,7 @@ export const interfaceText = {
 		repeated: (name: string) => `${name} is given more than once.`,
 		json: 'The body is no JSON.',
 		notAnObject: 'The body must be one JSON object.',
-		contextObject: 'context must be an object.',
+		notAnObjectNamed: (name: string) => `${name} must be an object.`,
 		notText: (name: string) => `${name} must be a text.`,
 		limit: (most: number) => `limit is a whole number from 1 to ${most}.`,
 		cursor: 'The cursor is none of ours, or belongs to another list or other filters.',
@@ -34,10 +34,10 @@ export const interfaceText = {
 	invalid: {
 		kind: (value: string, accepted: readonly string[]) =>
 			`${quoted(value)} is no kind of stamp. Taken: ${listed(accepted)}.`,
-		kindNotAvailable: (kind: string, accepted: readonly string[]) =>
-			`Stamps of kind ${kind} cannot be read yet. Taken: ${listed(accepted)}.`,
-		tagFields: 'Body tags cannot be read yet, and so no fields of one.',
-		contextSerial: 'A serial cannot be taken as context yet. Give maker, division and year.',
+		fieldsOfTag: 'fields are those of a body tag: leave kind out, or give body_tag.',
+		fieldsAndText: 'Give either the text of the tag or its fields.',
+		place: (most: number) => `A place has ${most} characters at most.`,
+		stamps: (most: number) => `stamps is a list of 1 to ${most} stamps of one car.`,
 		field: (value: string) => `${quoted(value)} is no field of a reading.`,
 		maker: (value: string) => `We know no maker by the name of ${quoted(value)}.`,
 		division: (value: string) => `We know no division by the name of ${quoted(value)}.`,

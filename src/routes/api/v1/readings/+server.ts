@@ -1,14 +1,22 @@
-import { answerPostedReading, answerReading } from '$lib/server/answers';
+import { answerPostedReading, answerReading, answerStamps } from '$lib/server/answers';
 import { jsonEndpoint, otherMethods, readJsonObject, readParameters } from '$lib/server/http';
-import { parametersOfBody, READING_PARAMETERS, readRequest } from '$lib/server/readings';
+import {
+	READING_PARAMETERS,
+	readRequest,
+	requestOfBody,
+	stampsRequestOfBody
+} from '$lib/server/readings';
 
 export const GET = jsonEndpoint((event) =>
 	answerReading(event, readRequest(readParameters(event.url.search, READING_PARAMETERS)))
 );
 
+/** One stamp, or under `stamps` several of one car. */
 export const POST = jsonEndpoint(async (event) => {
 	const body = await readJsonObject(event.request);
-	return answerPostedReading(event, readRequest(parametersOfBody(body)));
+	return 'stamps' in body
+		? answerStamps(event, stampsRequestOfBody(body))
+		: answerPostedReading(event, requestOfBody(body));
 });
 
 export const fallback = otherMethods('GET', 'POST');
