@@ -2,13 +2,7 @@
 export { digestKind, EVERY_MORNING } from './digest';
 export { UnknownNoticeError } from './errors';
 export { giveNotice, type Notice } from './give';
-export {
-	archiveNotice,
-	noticesFor,
-	openNotice,
-	readAllNotices,
-	type OwnNotice
-} from './mine';
+export { archiveNotice, noticesFor, openNotice, readAllNotices, type OwnNotice } from './mine';
 export {
 	lookAtUnsubscription,
 	ownPreferences,
