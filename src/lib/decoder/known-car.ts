@@ -1,9 +1,8 @@
 /** What a car's serial tells, for reading its other stamps. */
 import type { Maker, ReadContext, Reading, ReadingField } from '../types';
-import { isRead, normalise, type Cell } from './engine/characters';
+import { isRead, normalise } from './engine/characters';
 import type { Scope } from './engine/look-up';
 import type { PreparedLayout } from './engine/plan';
-import { PREPARED } from './layouts';
 import { readSerial } from './serial-reading';
 import type { TableSet } from './engine/table-set';
 
@@ -69,38 +68,4 @@ export function knownCar(
 		...carOf(readings),
 		...given<KnownCar>({ maker, division, year, plant: plant?.toUpperCase() })
 	};
-}
-
-/** A serial of which only some places are known. */
-function withPlaces(cells: readonly Cell[], places: readonly number[], length: number): Cell[] {
-	const whole = new Array<Cell>(length).fill('?');
-	for (const [index, place] of places.entries()) whole[place - 1] = cells[index] as Cell;
-	return whole;
-}
-
-/** The car's number, or a part of it, as it stands on another stamp; of the years of that stamp where it can be. */
-export function readStampedSerial(
-	cells: readonly Cell[],
-	ids: readonly string[],
-	places: readonly number[] | undefined,
-	tables: TableSet,
-	context: ReadContext,
-	years: readonly [from: number, to: number]
-): readonly Reading[] {
-	const own = PREPARED.filter(({ layout }) => ids.includes(layout.id));
-	const readings = own.flatMap((prepared) => {
-		const whole = places === undefined ? cells : withPlaces(cells, places, prepared.layout.length);
-		if (whole.length !== prepared.layout.length) return [];
-		const text = { cells: whole, normalised: '', origins: [] };
-		return readSerial(text, tables, context, false, [prepared]).readings;
-	});
-	const narrowed = [
-		(reading: Reading) => reading.rank === 1,
-		({ model_year: year }: Reading) => year !== null && years[0] <= year && year <= years[1],
-		({ model_year: year }: Reading) => year === context.year
-	].reduce((left, test) => {
-		const kept = left.filter(test);
-		return kept.length > 0 ? kept : left;
-	}, readings);
-	return narrowed.map((reading) => ({ ...reading, rank: 1 }));
 }

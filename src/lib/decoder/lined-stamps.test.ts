@@ -10,6 +10,7 @@ import {
 import type { Problem, ReadContext, Reading, ReadingField, ReadResult } from '../types';
 import {
 	compile,
+	examineText,
 	hasLines,
 	linesOf,
 	read,
@@ -17,7 +18,14 @@ import {
 	type LinedLayout,
 	type ReadRequest
 } from '.';
-import { gmTag, chryslerTag, pad, casting, twoLinePad } from '../../../tests/fixtures/lined';
+import {
+	gmTag,
+	chryslerTag,
+	pad,
+	casting,
+	twoLinePad,
+	shortPad
+} from '../../../tests/fixtures/lined';
 
 const firm = [
 	'gm.paint.52.1',
@@ -49,6 +57,12 @@ const tables = compile(
 			buildRow('gm', 'plant_abbreviation', 'LOS', 'Los Angeles', { values: {} }),
 			buildRow('gm', 'assembly_plant', 'N', 'Norwood', { values: { plant_city: 'Norwood' } }),
 			buildRow('gm', 'trim', '711', 'Black', {}),
+			buildRow('gm', 'trim', '713', 'Ivory', { division: ['Pontiac'] }),
+			buildRow('gm', 'assembly_plant', 'L', 'Van Nuys', { division: ['Chevrolet'] }),
+			buildRow('gm', 'assembly_plant', 'L', 'Elsewhere', { n: 2, division: ['Pontiac'] }),
+			buildRow('gm', 'assembly_plant', 'P', 'Pontiac plant', { division: ['Pontiac'] }),
+			buildRow('gm', 'assembly_plant', 'P', 'Here', { n: 2, division: ['Chevrolet'] }),
+			buildRow('gm', 'assembly_plant', 'P', 'There', { n: 3, division: ['Chevrolet'] }),
 			buildRow('gm', 'trim', '712', 'Blue', { division: ['Chevrolet'] }),
 			buildRow('gm', 'trim', '712', 'Green', { n: 2, division: ['Pontiac'] }),
 			buildRow('gm', 'paint', '52', 'Red', { years: [1969, 1969], note: 'Early cars.' }),
@@ -104,7 +118,7 @@ const tables = compile(
 		]
 	})
 );
-const LINED: readonly LinedLayout[] = [gmTag, chryslerTag, pad, casting, twoLinePad];
+const LINED: readonly LinedLayout[] = [gmTag, chryslerTag, pad, casting, twoLinePad, shortPad];
 const ask = (text: string, request: Partial<ReadRequest> = {}): ReadResult =>
 	read(tables, { text, kind: 'body_tag', lined: LINED, ...request });
 const first = (result: ReadResult): Reading => result.readings[0] as Reading;
@@ -310,6 +324,22 @@ describe('bad input', () => {
 		expect(codes(ask(`${TAG} / ????????????????????????????`))).toEqual(['unread_line']);
 	});
 
+	it('of two plates that several forms take names the nearest', () => {
+		const lined = [gmTag, { ...gmTag, id: 'gm-invented-tag-2', title: 'The same again' }];
+		const two = ask(`${TAG} / ST 69 12437 LOS 111111 / TR 711 50 / 02B`, { lined });
+		expect(problem(two, 'two_plates').offers.length).toBe(2);
+	});
+
+	it('of signs alone before a character that stands too far out has nothing to read', () => {
+		expect(codes(ask(`${'.'.repeat(600)}A`))).toEqual(['too_long', 'no_form']);
+	});
+
+	it('may be as long as its kind allows, or as its lines let expect', () => {
+		expect(examineText('A'.repeat(65))).toBe('too_long');
+		expect(examineText(`${TAG} / ${'A'.repeat(65)}`)).toBeNull();
+		expect(examineText(TAG.padEnd(601, 'A'), 'body_tag')).toBe('too_long');
+	});
+
 	it('of fifteen lines or 601 characters is read as far as a stamp goes', () => {
 		const many = ask(
 			`${TAG}${' / 0'.repeat(1)}${Array.from({ length: 11 }, (_, n) => ` / Q${n}`).join('')}`
@@ -366,6 +396,18 @@ describe('an engine stamp', () => {
 		const result = engine('CC');
 		expect(result.input.kind).toBe('engine');
 		expect(fieldOf(result, 'unit_code')).toMatchObject({ meaning: '300 V8' });
+	});
+
+	it('whose part of a serial lacks the division says what depends on it', () => {
+		const other = engine('K9L512345');
+		expect(fieldOf(other, 'assembly_plant')).toMatchObject({
+			meaning: 'Depends on the rest of the serial'
+		});
+		expect(fieldOf(other, 'assembly_plant').possible.map(({ meaning }) => meaning)).toEqual([
+			'Van Nuys',
+			'Elsewhere'
+		]);
+		expect(fieldOf(engine('K9P512345'), 'assembly_plant').possible.length).toBe(1);
 	});
 
 	it('with a whole serial, or one that fits none, says what it can', () => {

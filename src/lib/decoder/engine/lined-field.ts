@@ -92,7 +92,7 @@ function tableFields(
 export function serialFields(
 	placed: Placed,
 	found: readonly ReadingField[],
-	rowsOf: (key: string) => readonly CompiledRow[]
+	rowOf: (key: string) => CompiledRow
 ): FieldResult[] {
 	const head = headOf(placed);
 	const cells = cellsOfPlaced(placed);
@@ -105,7 +105,7 @@ export function serialFields(
 	);
 	const derived = found.map((field): FieldResult => ({
 		field: { ...field, from: head.from, to: head.to, derived_from: [head.name] },
-		rows: field.rows.flatMap(rowsOf),
+		rows: field.rows.map(rowOf),
 		counts: false,
 		table: null
 	}));
@@ -149,8 +149,7 @@ export function linedField(placed: Placed, reader: LinedReader): FieldResult[] {
 					why: decoderText.layoutStrength
 				})
 			);
-		case 'serial':
-		case 'unknown':
+		default:
 			return alone(plainField(head, cells, null));
 	}
 }

@@ -12,10 +12,9 @@ const joined = (lines: readonly Line[]): string => lines.map(lineText).join(' / 
 /** What is wrong with the text whatever it is. */
 export function textProblems({ lines, beyond }: Lines): Problem[] {
 	const problems: Problem[] = [];
-	const last = lines.at(-1)?.number ?? 1;
 	if (beyond.characters > 0)
 		problems.push({
-			line: last,
+			line: Math.max(1, lines.length),
 			code: 'too_long',
 			message: text.tooLong(MAX_TEXT.body_tag, beyond.characters),
 			offers: []

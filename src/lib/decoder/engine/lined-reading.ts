@@ -2,7 +2,8 @@
 import { DIVISIONS, makerOf, type ReadContext, type Reading, type ReadingField } from '../../types';
 import { stampsText as text } from '../../text/en/stamps';
 import { decoderText } from '../../text/en/decoder';
-import { readStampedSerial, carOf, type KnownCar } from '../known-car';
+import { carOf, type KnownCar } from '../known-car';
+import { agreedFields, readStampedSerial } from '../stamped-serial';
 import { isRead, textOf } from './characters';
 import { fieldOf, type FieldResult } from './field';
 import { cellsOfPlaced, linedField, serialFields, type LinedReader } from './lined-field';
@@ -12,7 +13,7 @@ import type { Placed } from './line-match';
 import type { Line } from './lines';
 import { entriesMatching, type Scope } from './look-up';
 import type { Draft } from './reading';
-import { rowsInYear, tableId, type TableSet } from './table-set';
+import { rowsInYear, tableId, type CompiledRow, type TableSet } from './table-set';
 
 export interface LinedStamp {
 	readonly match: LinedMatch;
@@ -23,47 +24,24 @@ export interface LinedStamp {
 
 const placedIn = ({ lines }: LinedMatch): Placed[] => lines.flatMap(({ placed }) => placed);
 
-/** The car's own number where the stamp carries it or a part of it: the readings of each. */
-function serialsOn({ match, tables, context }: LinedStamp): Map<Placed, readonly Reading[]> {
-	const serials = new Map<Placed, readonly Reading[]>();
+interface Serial {
+	readonly readings: readonly Reading[];
+	/** The fields that stand here. */
+	readonly fields: readonly ReadingField[];
+}
+type Serials = ReadonlyMap<Placed, Serial>;
+
+/** The car's own number where the stamp carries it or a part of it. */
+function serialsOn({ match, tables, context }: LinedStamp): Serials {
+	const serials = new Map<Placed, Serial>();
 	for (const placed of placedIn(match)) {
 		const { reads } = placed.field;
 		if (reads.by !== 'serial') continue;
-		const { layouts, places } = reads;
-		serials.set(
-			placed,
-			readStampedSerial(cellsOfPlaced(placed), layouts, places, tables, context, match.layout.years)
-		);
+		const cells = cellsOfPlaced(placed);
+		const readings = readStampedSerial(cells, reads, tables, context, match.layout.years);
+		serials.set(placed, { readings, fields: agreedFields(readings, reads.places) });
 	}
 	return serials;
-}
-
-/**
- * The fields of a serial that stand whole in the places given, as equally likely readings have them; where those
- * differ, all that they say is listed.
- */
-function agreedFields(readings: readonly Reading[], placed: Placed): ReadingField[] {
-	const { reads } = placed.field;
-	const places = reads.by === 'serial' ? reads.places : undefined;
-	const [first] = readings;
-	const here = (first?.fields ?? []).filter(
-		({ from, to, outcome }) =>
-			outcome !== 'illegible' &&
-			(places === undefined ||
-				Array.from({ length: to - from + 1 }, (_, n) => from + n).every((at) =>
-					places.includes(at)
-				))
-	);
-	return here.map((field): ReadingField => {
-		const same = readings.flatMap(({ fields }) =>
-			fields.filter(({ name, from }) => name === field.name && from === field.from)
-		);
-		if (same.every(({ meaning }) => meaning === field.meaning)) return field;
-		const possible = same.flatMap(({ meaning, values }) =>
-			meaning === null ? [] : [{ meaning, values }]
-		);
-		return { ...field, meaning: text.differs, detail: '', values: {}, possible };
-	});
 }
 
 /** Model years that the stamp itself names, else the one that is known of the car, else an open one. */
@@ -156,11 +134,7 @@ const onLine = ({ number }: Line, several: boolean, result: FieldResult): FieldR
 	several ? { ...result, field: { ...result.field, line: number } } : result;
 
 /** Everything that the stamp says under one year and division, in the order in which it is typed. */
-function resultsOf(
-	stamp: LinedStamp,
-	scope: Scope,
-	serials: ReadonlyMap<Placed, readonly Reading[]>
-): FieldResult[] {
+function resultsOf(stamp: LinedStamp, scope: Scope, serials: Serials): FieldResult[] {
 	const { layout, lines } = stamp.match;
 	const { tables } = stamp;
 	const several = lines.length > 1 || layout.lines.length > 1;
@@ -177,10 +151,7 @@ function resultsOf(
 		const own =
 			serial === undefined
 				? linedField(placed, reader)
-				: serialFields(placed, agreedFields(serial, placed), (key) => {
-						const row = tables.rows.get(key);
-						return row === undefined ? [] : [row];
-					});
+				: serialFields(placed, serial.fields, (key) => tables.rows.get(key) as CompiledRow);
 		learn(scope, own);
 		told.push(...own.map((result) => onLine(placed.line, several, result)));
 	}
@@ -194,11 +165,11 @@ function resultsOf(
 }
 
 /** What is known of the car, as far as it may be a car of this maker; the number on the stamp itself goes first. */
-function carFor(stamp: LinedStamp, serials: ReadonlyMap<Placed, readonly Reading[]>): KnownCar {
+function carFor(stamp: LinedStamp, serials: Serials): KnownCar {
 	const { maker } = stamp.match.layout;
-	const own = [...serials.values()].find((readings) => readings.length > 0);
+	const own = [...serials.values()].find(({ readings }) => readings.length > 0);
 	const beside = (stamp.car.maker ?? maker) === maker ? stamp.car : {};
-	return { ...beside, ...(own === undefined ? {} : carOf(own)) };
+	return { ...beside, ...(own === undefined ? {} : carOf(own.readings)) };
 }
 
 /** The readings of a stamp under a layout, before they are ranked. */
