@@ -79,13 +79,11 @@ export const accountsText = {
 		link: 'Have a sign-in link sent',
 		reset: 'Choose a new password',
 		signUp: 'Open an account',
-		others: 'Other ways',
 		out: 'You are signed out.',
 		changed: 'Your password is changed. Sign in with the new one.',
 		demo: 'People of the demonstration',
 		demoIntro:
-			'All of them are invented. Choose one, and the form fills itself; then sign in as them.',
-		demoFill: (name: string) => `Fill in ${name}`
+			'All of them are invented. Choose one, and the form fills itself; then sign in as them.'
 	},
 	code: {
 		title: 'One step more',

@@ -70,7 +70,6 @@ export const peopleText = {
 		title: 'Audit trail',
 		intro:
 			'What was done to accounts, and by whom. Nothing here can be changed: each entry carries the hash of the one before.',
-		about: (name: string) => `Entries about ${name}`,
 		heads: { number: 'No.', at: 'When', who: 'Who', what: 'What', whom: 'Whom' },
 		product: 'the console',
 		older: 'Older entries',
