@@ -2,11 +2,12 @@ import { readFileSync } from 'node:fs';
 import { parse } from 'csv-parse/sync';
 import { readContent } from '../../scripts/data/read';
 import { inProject } from '../../scripts/lib/project.mjs';
+import { MAX_LINES } from '../../src/lib/types';
 import { inventedEdition, inventedSerials } from './invented-edition';
 import { bundledDecoder } from './lib/decoder';
 import { median, rateOf, ratioOf } from './lib/rounds';
 
-const { checkDigitOf, compile, read } = await bundledDecoder();
+const { checkDigitOf, compile, LINED_LAYOUTS, read } = await bundledDecoder();
 const released = compile(readContent(inProject('data')));
 
 /** Serials as published, of which only the running number may be masked. */
@@ -57,6 +58,14 @@ const cost = (size: number) => {
 };
 const base = cost(2_000);
 
+/** A tag as long as one can be: a published form, then lines that no form has, so that every form is tried on all. */
+const longTag = [
+	...(LINED_LAYOUTS.find(({ kind }) => kind === 'body_tag')?.examples.good.split(' / ') ?? []),
+	...Array.from({ length: MAX_LINES }, (_, n) => `W${n + 10} Y3${n % 10} B51 C16 M${n + 20}`)
+]
+	.slice(0, MAX_LINES)
+	.join(' / ');
+
 const marked = ['RM23N0G10????', '24237?P?1?41?7'.slice(0, 13), '9F?1H5?1?3?', '1G4AH59H?5?11?34?'];
 
 export const figures = [
@@ -83,6 +92,24 @@ export const figures = [
 						})
 					)
 				)
+			)
+	},
+	{
+		name: 'A body tag of 14 lines, every form tried, with the serial beside it',
+		bound: 2,
+		unit: 'ms',
+		direction: 'at most',
+		run: () =>
+			median(
+				Array.from({ length: 201 }, () => {
+					const started = performance.now();
+					read(released, {
+						text: longTag,
+						kind: 'body_tag',
+						context: { serial: '124379N512345' }
+					});
+					return performance.now() - started;
+				})
 			)
 	},
 	{
