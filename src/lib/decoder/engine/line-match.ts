@@ -1,5 +1,5 @@
 /** Lays the fields of a line form over the cells of a line. */
-import { isRead, mayBe, UNREAD, type Cell } from './characters';
+import { UNREAD, type Cell } from './characters';
 import type { LineField, LineForm } from './lined-layout';
 import { tokensOf, type Line } from './lines';
 
@@ -33,33 +33,58 @@ export const COSTS = {
 /** The place after a printed word that begins at a place, or null. */
 function afterWord(words: readonly string[], { cells, edges }: Line, at: number): number | null {
 	if (edges[at] !== true) return null;
-	for (const word of words)
-		if (word.length <= cells.length - at && [...word].every((own, n) => cells[at + n] === own))
-			return at + word.length;
+	for (const word of words) {
+		let length = 0;
+		while (length < word.length && cells[at + length] === word[length]) length += 1;
+		if (length === word.length) return at + length;
+	}
 	return null;
 }
 
-const lengthsOf = ({ shape }: LineField): readonly [number, number] => {
-	const { chars, length } = shape;
-	if (typeof chars !== 'string') return [chars.length, chars.length];
-	if (length === undefined) return [1, 1];
-	return typeof length === 'number' ? [length, length] : length;
-};
+/** What a field takes, worked out: for each place, by character code, 1 where a character may stand. */
+interface Taking {
+	readonly masks: readonly Uint8Array[];
+	readonly fewest: number;
+	readonly most: number;
+}
+
+function maskOf(chars: string): Uint8Array {
+	const mask = new Uint8Array(128);
+	for (const character of chars + UNREAD) mask[character.charCodeAt(0)] = 1;
+	return mask;
+}
+
+function takingOf({ shape: { chars, length = 1 } }: LineField): Taking {
+	if (typeof chars !== 'string')
+		return { masks: chars.map(maskOf), fewest: chars.length, most: chars.length };
+	const [fewest, most] = typeof length === 'number' ? [length, length] : length;
+	return { masks: new Array<Uint8Array>(most).fill(maskOf(chars)), fewest, most };
+}
+
+const takings = new WeakMap<LineForm, readonly Taking[]>();
+
+/** What the fields of a form take; a form always takes the same, so it is worked out once. */
+function takingsOf(form: LineForm): readonly Taking[] {
+	const known = takings.get(form);
+	if (known !== undefined) return known;
+	const own = form.fields.map(takingOf);
+	takings.set(form, own);
+	return own;
+}
 
 /** Whether a cell may hold one of the characters allowed. */
-const allows = (chars: string, cell: Cell): boolean =>
-	isRead(cell)
-		? chars.includes(cell)
-		: cell === UNREAD || [...chars].some((own) => mayBe(cell, own));
+function allows(mask: Uint8Array, cell: Cell): boolean {
+	for (let index = 0; index < cell.length; index += 1)
+		if (mask[cell.charCodeAt(index)] === 1) return true;
+	return false;
+}
 
 /** How many cells from a place on are such as the field has. */
-function reach({ shape: { chars } }: LineField, cells: readonly Cell[], at: number, most: number) {
+function reach({ masks, most }: Taking, cells: readonly Cell[], at: number): number {
+	const end = Math.min(most, cells.length - at);
 	let length = 0;
-	while (length < most && at + length < cells.length) {
-		const allowed = typeof chars === 'string' ? chars : (chars[length] as string);
-		if (!allows(allowed, cells[at + length] as Cell)) break;
+	while (length < end && allows(masks[length] as Uint8Array, cells[at + length] as Cell))
 		length += 1;
-	}
 	return length;
 }
 
@@ -70,18 +95,30 @@ const [TAKE, PASS, LACK, DROP] = [1, 2, 3, 4] as const;
 /** Costs are kept from one up, so that naught stands for "not worked out yet". */
 const BASE = 1;
 
+/** Room for the states of one line; a line is laid out before the next one is. */
+let room = new Int32Array(8_192);
+function emptyRoom(size: number): Int32Array {
+	if (size > room.length) room = new Int32Array(size * 2);
+	else room.fill(0, 0, size);
+	return room;
+}
+
 /** Works out the cheapest way from each state that is reached; of equally cheap ones the one with the longer field. */
 class Laying {
+	private readonly fields: readonly LineField[];
+	private readonly takings: readonly Taking[];
 	private readonly known: Int32Array;
 	private readonly width: number;
 
 	constructor(
-		private readonly fields: readonly LineField[],
+		form: LineForm,
 		private readonly line: Line
 	) {
+		this.fields = form.fields;
+		this.takings = takingsOf(form);
 		this.width = line.cells.length + 1;
 		// Two states a field: not yet taken, and taken once and free to repeat.
-		this.known = new Int32Array((fields.length * 2 + 1) * this.width * SLOTS);
+		this.known = emptyRoom((form.fields.length * 2 + 1) * this.width * SLOTS);
 	}
 
 	slot(state: number, at: number, name: number): number {
@@ -102,10 +139,10 @@ class Laying {
 
 	private take(id: number, state: number, field: LineField, from: number, afterWords: boolean) {
 		const { cells, edges } = this.line;
-		const [fewest, most] = lengthsOf(field);
+		const taking = this.takings[state >> 1] as Taking;
 		const next = field.repeats === true ? state | 1 : (state | 1) + 1;
 		const begins = afterWords || edges[from] === true;
-		for (let length = reach(field, cells, from, most); length >= fewest; length -= 1) {
+		for (let length = reach(taking, cells, from); length >= taking.fewest; length -= 1) {
 			const to = from + length;
 			const whole = begins && edges[to] === true;
 			if (field.shape.whole === true && !whole) continue;
@@ -148,8 +185,9 @@ class Laying {
 }
 
 /** The cheapest way to lay the fields of a form over a line. */
-export function matchLine({ fields }: LineForm, line: Line): LineMatch {
-	const laying = new Laying(fields, line);
+export function matchLine(form: LineForm, line: Line): LineMatch {
+	const { fields } = form;
+	const laying = new Laying(form, line);
 	const cost = laying.best(0, 0);
 	const placed: Placed[] = [];
 	const unplaced: (readonly [number, number])[] = [];

@@ -97,6 +97,27 @@ function anyOrder(count: number, forms: readonly LineForm[], cost: Cost): Laid {
 	return { cost: total, forms: own };
 }
 
+/** The order in which the lines fit best; another one than that of the plate only where it fits much better. */
+function cheapest(
+	count: number,
+	down: readonly number[],
+	forms: readonly LineForm[],
+	cost: Cost
+): { readonly order: LineOrder; readonly laid: Laid } {
+	const listed = inOrder(count, down, forms, cost);
+	let least = 0;
+	for (let line = 0; line < count; line += 1)
+		least += Math.min(UNPLACED_LINE, ...down.map((form) => cost(line, form)));
+	if (least + BETTER > listed.cost) return { order: 'as_listed', laid: listed };
+	const turned = inOrder(count, down.toReversed(), forms, cost);
+	const swapped = anyOrder(count, forms, cost);
+	if (turned.cost + BETTER <= listed.cost && swapped.cost + BETTER > turned.cost)
+		return { order: 'turned', laid: turned };
+	return swapped.cost + BETTER <= listed.cost
+		? { order: 'swapped', laid: swapped }
+		: { order: 'as_listed', laid: listed };
+}
+
 /** Lines that say the same as one before them; a line that is wholly unread repeats none. */
 function doublesOf(lines: readonly Line[]): (readonly [Line, Line])[] {
 	const first = new Map<string, Line>();
@@ -128,18 +149,7 @@ export function matchLayout(layout: LinedLayout, all: readonly Line[]): LinedMat
 	};
 	const listed = forms.map((_, index) => index);
 	const down = layout.order === 'down' ? listed : listed.toReversed();
-	const ways: readonly (readonly [LineOrder, Laid])[] = [
-		['as_listed', inOrder(lines.length, down, forms, cost)],
-		...(lines.length < 2 || forms.length < 2
-			? []
-			: ([
-					['turned', inOrder(lines.length, down.toReversed(), forms, cost)],
-					['swapped', anyOrder(lines.length, forms, cost)]
-				] as const))
-	];
-	const [order, laid] = ways.reduce((one, other) =>
-		other[1].cost + BETTER <= one[1].cost ? other : one
-	);
+	const { order, laid } = cheapest(lines.length, down, forms, cost);
 	const rank = (line: Line): number => down.indexOf(laid.forms[lines.indexOf(line)] as number);
 	return {
 		layout,

@@ -41,8 +41,13 @@ function edgesOf(text: string, origins: readonly number[]): boolean[] {
 
 /** The tokens of a line, as spans of its cells. */
 export function tokensOf({ cells, edges }: Line): (readonly [from: number, to: number])[] {
-	const starts = cells.flatMap((_, index) => (edges[index] === true ? [index] : []));
-	return starts.map((start, index) => [start, starts[index + 1] ?? cells.length]);
+	const tokens: (readonly [number, number])[] = [];
+	for (let from = 0; from < cells.length;) {
+		const to = edges.indexOf(true, from + 1);
+		tokens.push([from, to]);
+		from = to;
+	}
+	return tokens;
 }
 
 /** The text of a span of a line, tokens joined by a space. */
