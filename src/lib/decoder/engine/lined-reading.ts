@@ -30,16 +30,33 @@ interface Serial {
 	readonly fields: readonly ReadingField[];
 }
 type Serials = ReadonlyMap<Placed, Serial>;
+/** A part of the car's number, and its places there; the whole number without. */
+interface Part {
+	readonly placed: Placed;
+	readonly places: readonly number[] | undefined;
+}
 
-/** The car's own number where the stamp carries it or a part of it. */
+/**
+ * The car's own number where the stamp carries it: whole, or in parts, of which those of one form are read together.
+ */
 function serialsOn({ match, tables, context }: LinedStamp): Serials {
-	const serials = new Map<Placed, Serial>();
+	const numbers = new Map<string, { layouts: readonly string[]; parts: Part[] }>();
 	for (const placed of placedIn(match)) {
 		const { reads } = placed.field;
 		if (reads.by !== 'serial') continue;
-		const cells = cellsOfPlaced(placed);
+		const { layouts, places } = reads;
+		const key = `${layouts.join()} ${places === undefined}`;
+		const parts = [...(numbers.get(key)?.parts ?? []), { placed, places }];
+		numbers.set(key, { layouts, parts });
+	}
+	const serials = new Map<Placed, Serial>();
+	for (const { layouts, parts } of numbers.values()) {
+		const cells = parts.flatMap(({ placed }) => cellsOfPlaced(placed));
+		const places = parts.flatMap((part) => part.places ?? []);
+		const reads = { layouts, ...(places.length > 0 ? { places } : {}) };
 		const readings = readStampedSerial(cells, reads, tables, context, match.layout.years);
-		serials.set(placed, { readings, fields: agreedFields(readings, reads.places) });
+		for (const part of parts)
+			serials.set(part.placed, { readings, fields: agreedFields(readings, part.places) });
 	}
 	return serials;
 }
