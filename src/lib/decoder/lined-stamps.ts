@@ -34,7 +34,7 @@ export interface LinedResult {
 /** So much worse may another layout fit than the best and still be told. */
 const NEAR = 120;
 /** At most so many layouts are read; the others fit less well than all of these. */
-const MOST_LAYOUTS = 12;
+const MOST_LAYOUTS = 8;
 
 /** Whether at least a third of what is typed has its field: two plates may be typed into one. */
 function mostlyPlaced({ lines }: LinedMatch): boolean {

@@ -103,13 +103,12 @@ const tells = (reading: Reading | undefined): boolean =>
 function asLined(kind: LinedKind, typed: Typed): Read & { readonly whole: boolean } {
 	const lined = readLined(typed.tables, { ...typed, kind });
 	const single = SINGLE[kind];
-	if (single === undefined) return { kind, ...lined };
+	if (single === undefined || (lined.whole && tells(lined.readings[0]))) return { kind, ...lined };
 	// A pad or casting may be worn down to one code, or be one of which no form is known.
 	const code = asCode(typed, single);
 	if (code.readings.length === 0) return { kind, ...lined };
-	const first = lined.whole && tells(lined.readings[0]);
-	const [one, two] = first ? [{ ...lined, kind }, code] : [code, { ...lined, kind }];
-	return { ...joined(one, two), kind, whole: true, normalised: lined.normalised };
+	const all = joined(code, { ...lined, kind });
+	return { ...all, kind, whole: true, normalised: lined.normalised };
 }
 
 function asKind(kind: StampKind, typed: Typed): Read {
