@@ -40,6 +40,13 @@ function tokenise(text: string): Token[] {
 	const tokens: Token[] = [];
 	let at = 0;
 	while (at < text.length) {
+		// Most characters are what they seem: only others need a closer look.
+		const own = text.charAt(at);
+		if (own === ' ' || STRUCK.test(own)) {
+			if (own !== ' ') tokens.push({ cell: own, at });
+			at += 1;
+			continue;
+		}
 		const rest = text.slice(at);
 		const run = /^(?:x{2,}|#{2,})/.exec(rest)?.[0];
 		if (run !== undefined) {

@@ -67,11 +67,13 @@ export const isUnread = ({ cells }: Line): boolean => cells.every((cell) => cell
 export function linesOf(typed: string, asOne = false): Lines {
 	const points = [...typed];
 	const text = points.slice(0, MAX_TEXT.body_tag).join('');
-	const parts = text.split(LINE_BREAK).filter((part) => normalise(part).cells.length > 0);
-	const kept = asOne ? [parts.join(' ')].filter((part) => part !== '') : parts.slice(0, MAX_LINES);
+	const whole = text.split(LINE_BREAK);
+	const parts = (asOne ? [whole.join(' ')] : whole)
+		.map((part) => ({ part, characters: normalise(part) }))
+		.filter(({ characters }) => characters.cells.length > 0);
+	const kept = parts.slice(0, MAX_LINES);
 	let at = 0;
-	const lines = kept.map((part, index): Line => {
-		const { cells, origins } = normalise(part);
+	const lines = kept.map(({ part, characters: { cells, origins } }, index): Line => {
 		const edges = edgesOf(part, origins);
 		if (index > 0) at += ' / '.length;
 		const places = cells.map((cell, place): readonly [number, number] => {
@@ -86,7 +88,7 @@ export function linesOf(typed: string, asOne = false): Lines {
 		lines,
 		normalised: lines.map(lineText).join(' / '),
 		beyond: {
-			lines: asOne ? 0 : parts.length - kept.length,
+			lines: parts.length - kept.length,
 			characters: Math.max(0, points.length - MAX_TEXT.body_tag)
 		}
 	};
