@@ -98,13 +98,16 @@ export function modelYears(
 	};
 }
 
+/** As many years are named; of more, the day alone says as much. */
+const MOST_NAMED = 10;
+
 /** The calendar years of a date without a year. */
 export function unstampedYears(month: number, format: DateFormat, context: DateContext): Years {
 	const choose = format.yearsOf ?? yearsOfModelYear;
 	if (context.year !== undefined)
 		return { choices: choose(month, context.year), settled: 'by_car' };
-	if (context.years === undefined) return { choices: [null], settled: 'open' };
-	const [from, to] = context.years;
+	const [from, to] = context.years ?? [0, MOST_NAMED];
+	if (to - from >= MOST_NAMED) return { choices: [null], settled: 'open' };
 	return {
 		choices: Array.from({ length: to - from + 1 }, (_, index) => usual(from + index)),
 		settled: 'open'

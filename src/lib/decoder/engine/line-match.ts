@@ -25,7 +25,7 @@ export interface LineMatch {
 export const COSTS = {
 	missingField: 40,
 	token: 20,
-	withinToken: 6,
+	withinToken: 4,
 	unreadField: 4,
 	optionalField: 1
 } as const;
