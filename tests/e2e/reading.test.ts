@@ -16,6 +16,12 @@ const PAGES = [
 	['a marked reading', '/?text=242379P9%3F4117'],
 	['a beginning', '/?text=RM23N0G'],
 	['a bare code', '/?kind=code&text=EB5'],
+	['an engine stamp', '/?kind=engine&text=V0525CNR&year=1970'],
+	['a casting with its date', '/?kind=casting&text=3914678+F106'],
+	[
+		'a body tag',
+		'/?kind=body_tag&text=C16+J25+%2F+EV2+H6X9+000+B30+E12345+%2F+E74+D32+RM23+R0B123456'
+	],
 	['a text that nothing fits', `/?text=${MISFIT}`],
 	['a form with faults', '/?text=---&maker=nobody']
 ] as const;
@@ -60,13 +66,13 @@ describe.each(PAGES)('%s', (_, path) => {
 describe('without script', () => {
 	it('reads what is typed and leads to the usual address', async () => {
 		await closing(openPage('/', { script: false }), async ({ page }) => {
-			await page.getByLabel('Serial number or code').fill(PLYMOUTH);
+			await page.getByLabel('Serial number, stamp or code').fill(PLYMOUTH);
 			await page.getByRole('combobox', { name: /^Maker/ }).selectOption('plymouth');
 			await page.getByRole('combobox', { name: /^Model year/ }).selectOption('1970');
 			await page.getByRole('button', { name: 'Read' }).click();
 			expect(new URL(page.url()).search).toBe(`?text=${PLYMOUTH}&maker=plymouth&year=1970`);
 			expect(await page.locator('h1').textContent()).toMatch(/^1970 Plymouth/);
-			expect(await page.getByLabel('Serial number or code').inputValue()).toBe(PLYMOUTH);
+			expect(await page.getByLabel('Serial number, stamp or code').inputValue()).toBe(PLYMOUTH);
 			expect(await page.getByRole('combobox', { name: /^Maker/ }).inputValue()).toBe('plymouth');
 		});
 	});
@@ -128,7 +134,7 @@ describe('with script', () => {
 
 	it('names the kind while it is typed', async () => {
 		await closing(openPage('/'), async ({ page }) => {
-			const field = page.getByLabel('Serial number or code');
+			const field = page.getByLabel('Serial number, stamp or code');
 			await field.pressSequentially('RM23');
 			expect(await page.getByText('Characters: 4. A single code.').isVisible()).toBe(true);
 			await field.pressSequentially('N0G[12]04127');
@@ -144,7 +150,7 @@ describe('with script', () => {
 			page.on('request', (request) => {
 				if (request.isNavigationRequest()) asked.push(new URL(request.url()).search);
 			});
-			await page.getByLabel('Serial number or code').fill('RH23L0E9?4127');
+			await page.getByLabel('Serial number, stamp or code').fill('RH23L0E9?4127');
 			await page.getByRole('radio', { name: 'serial number' }).check();
 			await page.keyboard.press('Enter');
 			await page.waitForURL(/text=/);
@@ -191,7 +197,7 @@ describe('with script', () => {
 			await page.getByRole('link', { name: 'Read', exact: true }).click();
 			await page.waitForURL(/\/$/);
 			await page.locator('html.live').waitFor();
-			await page.getByLabel('Serial number or code').fill('RM23N0G904127');
+			await page.getByLabel('Serial number, stamp or code').fill('RM23N0G904127');
 			expect(await page.getByText('13 characters: a serial number.').isVisible()).toBe(true);
 		});
 	});
@@ -204,7 +210,7 @@ describe('bad input', () => {
 		['too much', 'A'.repeat(65), /64 characters at most/]
 	])('says beside the field what is wrong with %s, and keeps it', async (_, text, message) => {
 		await closing(openPage(`/?text=${text}`), async ({ page }) => {
-			const field = page.getByLabel('Serial number or code');
+			const field = page.getByLabel('Serial number, stamp or code');
 			expect(await field.inputValue()).toBe(text);
 			expect(await field.getAttribute('aria-invalid')).toBe('true');
 			const ids = (await field.getAttribute('aria-describedby'))!.split(' ');

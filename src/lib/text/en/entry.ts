@@ -2,33 +2,43 @@
 export const entryText = {
 	pageTitle: 'Read a stamp',
 	heading: 'Read what is stamped on the car',
-	label: 'Serial number or code, as it stands on the car',
-	labelShort: 'Serial number or code',
+	label: 'Serial number, stamp or code, as it stands on the car',
+	labelShort: 'Serial number, stamp or code',
 	read: 'Read',
 	hint: {
 		before: 'Write ',
 		unread: '?',
 		between: ' for a character you cannot read, ',
 		either: '[38]',
-		after: ' for one that could be either. Spaces and dividers do not matter.'
+		after:
+			' for one that could be either. Spaces and dividers do not matter; write / between the lines of a tag.'
 	},
 	kind: {
 		legend: 'Read as',
 		any: 'whatever fits',
 		serial: 'serial number',
+		body_tag: 'body tag',
+		engine: 'engine stamp',
+		casting: 'casting',
+		date: 'date',
 		code: 'single code'
 	},
 	/** Under the field while something is typed; {n} is the number of characters. */
 	detected: {
 		code: 'Characters: {n}. A single code.',
 		sequence: 'Six figures: the sequence of a serial number, or a code.',
-		short: '{n} characters: the beginning of a serial number, or a code.',
+		short:
+			'{n} characters: an engine stamp, a casting, the beginning of a serial number, or a code.',
 		serial: '{n} characters: a serial number.',
 		seventeen: '17 characters: a serial number in the standard form.',
-		long: '{n} characters: more than any serial number has.'
+		long: '{n} characters: more than a serial number has, as on a body tag.'
 	},
 	wasRead: {
 		serial: (n: number) => `Read as a serial number, ${n} characters.`,
+		body_tag: 'Read as a body tag.',
+		engine: 'Read as an engine stamp.',
+		casting: 'Read as a casting.',
+		date: 'Read as a date.',
 		code: 'Read as a single code.'
 	},
 	maker: 'Maker, if known',

@@ -36,6 +36,8 @@ export const readingText = {
 	group: (places: string, code: string, label: string) => `${places}, ${code}: ${label}`,
 	unreadCharacter: 'unread',
 	eitherCharacter: (set: string) => [...set].join(' or '),
+	/** Head of a line of a body tag. */
+	line: (n: number) => `Line ${n}`,
 	fields: 'What the characters say',
 	fromPlaces: (places: string) => `from ${places}`,
 	fromSameRow: 'from the same row',

@@ -4,7 +4,7 @@ import { day } from '$lib/format/editions';
 import { stampCells } from '$lib/format/stamp';
 import { entryText } from '$lib/text/en/entry';
 import { readingText as text } from '$lib/text/en/reading';
-import type { EditionHead, ReadAnswer } from '$lib/types';
+import type { EditionHead, ReadAnswer, StampKind } from '$lib/types';
 import { checkDigitWork } from './check-digit-work';
 import type { AnswerView } from './page-data';
 import { layoutTitleOf, titleOf, viewOf } from './view';
@@ -20,9 +20,9 @@ interface Shown {
 	readonly index: number;
 }
 
-const wasRead = (kind: string | null, n: number): string => {
-	if (kind === 'serial') return entryText.wasRead.serial(n);
-	return kind === 'code' ? entryText.wasRead.code : '';
+const wasRead = (kind: StampKind | null, n: number): string => {
+	if (kind === null) return '';
+	return kind === 'serial' ? entryText.wasRead.serial(n) : entryText.wasRead[kind];
 };
 
 /** Readings of one text: which is shown, what else it could be, what stands in the way. */

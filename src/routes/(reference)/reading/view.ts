@@ -41,6 +41,8 @@ export interface AlternativeView {
 }
 export interface GroupView {
 	readonly id: string;
+	/** The line of a stamp of several lines, from the top; null for a stamp of one. */
+	readonly line: number | null;
 	readonly from: number;
 	readonly to: number;
 	readonly cells: readonly StampCell[];
@@ -154,6 +156,7 @@ function groupsOf(reading: AnsweredReading, normalised: string): GroupView[] {
 		const plain = own.every((cell) => cell.length === 1 && cell !== '?');
 		groups.push({
 			id: field.from === field.to ? `at-${field.from}` : `at-${field.from}-${field.to}`,
+			line: field.line ?? null,
 			from: field.from,
 			to: field.to,
 			cells: own,
@@ -197,10 +200,14 @@ function sourcesOf(reading: AnsweredReading): SourceView[] {
 	return [...byKey.values()].sort((a, b) => BY_KIND.indexOf(a.kind) - BY_KIND.indexOf(b.kind));
 }
 
-/** A reading's title; a bare code is named by its field. */
+/** What a part is named by: the code of its engine or gearbox, or its casting number. */
+const partOf = (reading: AnsweredReading): ReadingField | undefined =>
+	reading.fields.find(({ name }) => name === 'unit_code' || name === 'casting_number');
+
+/** A reading's title; a bare code is named by its field, a part by its code. */
 export function titleOf(reading: AnsweredReading): string {
-	const [only] = reading.fields;
-	if (reading.layout === null && only !== undefined) {
+	const only = reading.layout === null ? reading.fields[0] : partOf(reading);
+	if (only !== undefined) {
 		const name = text.codeTitle(only.label, only.code);
 		const told = only.outcome === 'found' && only.possible.length === 0;
 		return told && only.meaning !== null ? `${name}: ${only.meaning}` : name;
