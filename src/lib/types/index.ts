@@ -10,6 +10,7 @@ export * from './makers';
 export * from './name-schemas';
 export * from './notices';
 export * from './people';
+export * from './published';
 export * from './readings';
 export * from './rows';
 export * from './tables';

@@ -3,7 +3,7 @@
  * and needs no database to be read; everything that looks back into history asks the database.
  */
 import { tableId, type CompiledRow, type CompiledTable, type TableSet } from '../../decoder';
-import type { EditionContent, EditionHead, Maker, TableName } from '../../types';
+import type { EditionContent, EditionHead, Maker, PublishedExamples, TableName } from '../../types';
 import { asking, connect, type Database } from '../db';
 import { editions as heads, type RowVersion } from '../db/repositories';
 import type { CompiledEdition } from './compiled-editions';
@@ -18,6 +18,7 @@ import {
 } from './editions';
 import { contentOfEntries } from './entries';
 import { NoTablesYetError, UnknownRowError } from './errors';
+import examples from './published-examples.json';
 
 export type { RowEntry, RowVersion } from '../db/repositories';
 export type { CompiledEdition } from './compiled-editions';
@@ -132,3 +133,6 @@ export async function contentOf(
 	const head = await headOf(database, asked);
 	return { head, content: contentOfEntries(await asking(() => entriesAt(database, asked))) };
 }
+
+/** Worked examples of published pages, as `npm run data:examples` counted them. */
+export const PUBLISHED_EXAMPLES = examples as PublishedExamples;

@@ -1,4 +1,5 @@
 /** How far the tables reach, and where they end. */
+import type { StampKind } from '../../types';
 import { counted } from './counts';
 
 export const coverageText = {
@@ -29,6 +30,24 @@ export const coverageText = {
 	byTable: 'By table',
 	byTableNote:
 		'Rows of every strength. A thin row rests on one web page, on memory or on practice.',
+	lined: 'Other stamps that are read',
+	linedNote:
+		'Body tags, engine stamps and castings as a whole. What has no form here is read as single codes and dates.',
+	linedHeads: { layout: 'Form', years: 'Model years', kind: 'Kind' },
+	kinds: {
+		serial: 'Serial numbers',
+		body_tag: 'Body tags',
+		engine: 'Engine stamps',
+		casting: 'Castings',
+		date: 'Dates',
+		code: 'Single codes'
+	} satisfies Record<StampKind, string>,
+	examples: 'Published examples',
+	examplesNote:
+		'Stamps that a published page prints together with what they mean. Every release is read against all of them.',
+	exampleHeads: { kind: 'Kind', met: 'Read as published', of: 'Examples' },
+	misses: 'Where we knowingly differ',
+	missHeads: { text: 'Stamp', source: 'Published in', reason: 'Why we differ' },
 	layouts: 'Serial numbers that are read',
 	layoutsNote:
 		'A number in another form is refused, with the nearest layout named; it is not guessed at.',
@@ -62,8 +81,8 @@ export const coverageText = {
 			text: 'No tables.'
 		},
 		{
-			title: 'Body tags, engine pads, castings, dates and glass',
-			text: 'Their codes stand in the tables and can be looked up one by one. Whole tags and stamps are not read yet.'
+			title: 'Body tags of other makers',
+			text: 'Whole tags are read for Chrysler Corporation of 1968 to 1974. The codes of the others stand in the tables and can be looked up one by one. The Chrysler tags of 1965 to 1967, and those of Lynch Road of 1969, have other forms, for which we have no source.'
 		},
 		{
 			title: 'Trim, paint and tops',

@@ -1,8 +1,8 @@
-import { LAYOUTS } from '$lib/decoder';
+import { LAYOUTS, LINED_LAYOUTS } from '$lib/decoder';
 import { drawnCoverage } from '$lib/format/coverage';
 import { yearSpan } from '$lib/format/years';
 import { admit } from '$lib/server/http';
-import { coverage, current } from '$lib/server/reference';
+import { coverage, current, PUBLISHED_EXAMPLES } from '$lib/server/reference';
 import type { PageServerLoad } from './$types';
 import { coverageByTable } from './by-table';
 
@@ -14,6 +14,13 @@ export const load: PageServerLoad = ({ getClientAddress }) => {
 		coverage: drawnCoverage(coverage(tables).divisions),
 		makers: coverageByTable(tables),
 		claims: tables.claims.length,
+		examples: PUBLISHED_EXAMPLES,
+		lined: LINED_LAYOUTS.map(({ id, title, years, kind }) => ({
+			id,
+			title,
+			kind,
+			years: yearSpan(...years)
+		})),
 		layouts: LAYOUTS.filter(({ kind }) => kind === 'serial').map(
 			({ id, title, years, length }) => ({
 				id,
