@@ -3,6 +3,10 @@ const MASK = '******';
 const LAST = MASK.length;
 /** As much as may stay of any stamp; further on in a body tag other numbers follow. */
 const FIRST = 11;
+/** No one serial that we read is longer; beyond it a text holds several numbers, and any of them may be the serial. */
+const LONGEST = 17;
+/** What a running number is made of: figures, and what could not be read. */
+const FIGURE = /^(?:\p{N}|[?_*x]|\[)/u;
 /** The shortest full serial that we read has eleven characters. */
 const SHORTEST = 11;
 
@@ -56,14 +60,26 @@ const withoutEndMarks = (positions: readonly RegExpExecArray[]) => {
 	return first < 0 ? [] : positions.slice(first, last + 1);
 };
 
+/** How many positions stand before the first six figures in a row; all when there are none. */
+function beforeRunningNumber(positions: readonly RegExpExecArray[]): number {
+	let figures = 0;
+	for (const [index, [position]] of positions.entries()) {
+		figures = FIGURE.test(position) ? figures + 1 : 0;
+		if (figures === LAST) return index + 1 - LAST;
+	}
+	return positions.length;
+}
+
 /**
  * A text with the last six positions of one stamp struck out, and all that stands between them or
- * behind them. Of a shorter stamp nothing is left, of a longer one no more than eleven.
+ * behind them. Of a shorter stamp nothing is left, of a longer one no more than eleven, and of a text
+ * that holds several numbers nothing from its first running number on.
  */
 export function maskStamp(stamp: string): string {
 	const positions = withoutEndMarks([...stamp.matchAll(POSITION)]);
 	if (positions.length === 0) return stamp;
-	const cut = positions[Math.min(FIRST, positions.length - LAST)];
+	const kept = positions.length > LONGEST ? beforeRunningNumber(positions) : FIRST;
+	const cut = positions[Math.min(FIRST, kept, positions.length - LAST)];
 	return stamp.slice(0, cut?.index ?? 0) + MASK;
 }
 
