@@ -2,7 +2,7 @@
  * The decoder's public face: pure functions over tables that come in as an argument.
  * No I/O, no framework; would run unchanged in a browser.
  */
-export { examineText, normalise, type TextFault } from './engine/characters';
+export { examineText, mostCharacters, normalise, type TextFault } from './engine/characters';
 export {
 	checkDigitOf,
 	VALUES as CHECK_DIGIT_VALUES,

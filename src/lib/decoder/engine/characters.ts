@@ -123,13 +123,16 @@ export type TextFault = 'empty' | 'too_long' | 'nothing_struck';
 const SEVERAL_LINES = /[\r\n]|\s\/+\s/;
 
 /**
- * Why a text cannot be read at all, or null. The limits are those of the kind; when none is given, those of a body tag
- * for several lines and of a serial for one.
+ * Most characters that a text may have: those of its kind; when none is given, those of a body tag for several lines and
+ * of a serial for one.
  */
+export const mostCharacters = (text: string, kind?: StampKind): number =>
+	MAX_TEXT[kind ?? (SEVERAL_LINES.test(text) ? 'body_tag' : 'serial')];
+
+/** Why a text cannot be read at all, or null; see `mostCharacters` for the limits. */
 export function examineText(text: string, kind?: StampKind): TextFault | null {
 	if (text.trim() === '') return 'empty';
-	if ([...text].length > MAX_TEXT[kind ?? (SEVERAL_LINES.test(text) ? 'body_tag' : 'serial')])
-		return 'too_long';
+	if ([...text].length > mostCharacters(text, kind)) return 'too_long';
 	if (!normalise(text).cells.some((cell) => cell !== UNREAD)) return 'nothing_struck';
 	return null;
 }

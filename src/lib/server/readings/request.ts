@@ -13,7 +13,7 @@ import {
 	type StampKind,
 	type StampRequest
 } from '../../types';
-import { examineText } from '../../decoder';
+import { examineText, mostCharacters } from '../../decoder';
 import { fault, malformed, invalid, type Parameters } from '../http';
 import { ACCEPTED_MAKERS, divisionNamed, makerNamed, type Named } from './aliases';
 
@@ -185,10 +185,12 @@ export function readStamp(
 	if (fields !== undefined && given.text !== undefined)
 		faults.push(fault('fields', 'given_twice', interfaceText.invalid.fieldsAndText));
 	const text = given.text ?? '';
-	const unreadable = examineText(fields === undefined ? text : allOf(fields), kind);
+	const [typed, limited]: [string, StampKind?] =
+		fields === undefined ? [text, kind] : [allOf(fields), 'body_tag'];
+	const unreadable = examineText(typed, limited);
 	if (unreadable !== null) {
 		const name = fields === undefined ? 'text' : 'fields';
-		const most = MAX_TEXT[kind ?? (name === 'fields' ? 'body_tag' : 'serial')];
+		const most = mostCharacters(typed, limited);
 		faults.push(fault(name, unreadable, interfaceText.text[unreadable](most)));
 	}
 	return { text, kind, ...(fields === undefined ? {} : { fields }) };
