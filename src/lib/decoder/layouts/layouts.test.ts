@@ -176,3 +176,30 @@ describe('seventeen characters', () => {
 		expect(field('1J9RP1A36A1644345', 'check_digit').strength).toBe('not_rated');
 	});
 });
+
+describe('the model year of the 17-character standard', () => {
+	const yearsOf = (first: string, seventh: string, tenth: string) =>
+		readings(`${first}G4AH5${seventh}?5${tenth}G118341`)
+			.filter(({ layout }) => layout === 'iso-17')
+			.map(({ model_year }) => model_year)
+			.sort();
+
+	it.each([
+		['1', '9', 'G', [1986]],
+		['1', 'A', 'G', [2016]],
+		['1', '?', 'G', [1986, 2016]],
+		['1', '[9A]', 'G', [1986, 2016]],
+		['W', '9', 'G', [null]],
+		['[1W]', '9', 'G', [1986, null]],
+		['[WS]', '9', 'G', [null]],
+		['?', '9', 'G', [1986, null]],
+		['?', 'A', 'G', [2016, null]]
+	])('of %s…%s…%s is %j', (first, seventh, tenth, expected) => {
+		expect(yearsOf(first, seventh, tenth)).toEqual(expected);
+	});
+
+	it('is open where its character is unread, and none where it stands for none', () => {
+		expect(yearsOf('1', '9', '?').length).toBeGreaterThan(1);
+		expect(yearsOf('1', '9', '0')).toEqual([]);
+	});
+});
