@@ -143,10 +143,11 @@ describe('a password', () => {
 				await timeOf(address, `192.0.2.${100 + n}`),
 				await timeOf(`no-${address}`, `192.0.2.${100 + n}`)
 			]);
-		const median = (of: 0 | 1) => times.map((pair) => pair[of]).sort((a, b) => a - b)[4]!;
+		// What else runs on the machine only ever adds to a time: the shortest of each tells.
+		const shortest = (of: 0 | 1) => Math.min(...times.map((pair) => pair[of]));
 		// Hashing takes many times as long as all else: without it the answer would come in a tenth of the time.
-		expect(median(1)).toBeGreaterThan(median(0) * 0.6);
-		expect(median(1)).toBeLessThan(median(0) * 1.6);
+		expect(shortest(1)).toBeGreaterThan(shortest(0) * 0.4);
+		expect(shortest(1)).toBeLessThan(shortest(0) * 2.5);
 	});
 
 	it('may be guessed ten times from one place; others and the owner elsewhere are not locked out', async () => {
