@@ -79,24 +79,23 @@ async function start() {
 		fillDatabase(database),
 		step('Build', async (say) => say((await ensureBuild()) ? 'built' : 'in place'))
 	]);
-	const [running] = await Promise.all([
-		step('Server', async (say) => {
-			const running = await serve({ build: BUILD });
-			toStop.push(() => running.close('stop'));
-			say(`listening on ${host}:${running.port}`);
-			return running;
-		}),
-		step('Worker', async (say) => {
-			const worker = await startWorkerProcess();
-			toStop.push(worker.stop);
-			say('sends mail and does what takes long');
-		})
-	]);
+	const running = await step('Server', async (say) => {
+		const running = await serve({ build: BUILD });
+		toStop.push(() => running.close('stop'));
+		say(`listening on ${host}:${running.port}`);
+		return running;
+	});
 	open = true;
 	console.log(`\nOpen ${running.origin}`);
 	console.log(
 		`Ready after ${seconds(performance.now() - started)}. Ctrl-C stops all that was started.`
 	);
+	// Nobody waits for it: it takes up what was left for it once it is there.
+	await step('Worker', async (say) => {
+		const worker = await startWorkerProcess();
+		toStop.push(worker.stop);
+		say('sends mail and does what takes long');
+	});
 }
 
 try {
