@@ -41,7 +41,9 @@ export default defineConfig({
 					testTimeout: 60_000,
 					hookTimeout: 120_000,
 					// Browser tests mostly wait; two files at a time fill what two cores have.
-					maxWorkers: 2
+					maxWorkers: 2,
+					// A browser on a busy machine is late now and then; what fails twice is wrong.
+					retry: 1
 				}
 			},
 			{
