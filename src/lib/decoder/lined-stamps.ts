@@ -2,11 +2,11 @@
 import type { FieldName, Problem, ReadContext, Reading } from '../types';
 import { stampsText as text } from '../text/en/stamps';
 import type { LinedKind, LinedLayout } from './engine/lined-layout';
-import { matchLayout, type LinedMatch } from './engine/lined-match';
+import { leastCost, matchLayout, type LinedMatch } from './engine/lined-match';
 import { lineProblems, otherMaker, textProblems } from './engine/lined-problems';
 import { linedDrafts } from './engine/lined-reading';
 import { matchFields } from './engine/named-fields';
-import { linesOf } from './engine/lines';
+import { linesOf, type Line } from './engine/lines';
 import type { PreparedLayout } from './engine/plan';
 import { ranked } from './engine/ranking';
 import type { TableSet } from './engine/table-set';
@@ -47,6 +47,21 @@ function mostlyPlaced({ lines }: LinedMatch): boolean {
 	return placed * 3 >= typed && placed > 0;
 }
 
+/** The layouts over the lines; left out are those that cannot come near one that fits, as they have too few lines. */
+function matchesOf(layouts: readonly LinedLayout[], lines: readonly Line[]): LinedMatch[] {
+	const bounds = new Map(layouts.map((layout) => [layout, leastCost(layout, lines.length)]));
+	const boundOf = (layout: LinedLayout): number => bounds.get(layout) as number;
+	const found = new Map<LinedLayout, LinedMatch>();
+	let least = Infinity;
+	for (const layout of [...layouts].sort((a, b) => boundOf(a) - boundOf(b))) {
+		if (boundOf(layout) > least + NEAR) break;
+		const match = matchLayout(layout, lines);
+		found.set(layout, match);
+		if (mostlyPlaced(match)) least = Math.min(least, match.cost);
+	}
+	return layouts.flatMap((layout) => found.get(layout) ?? []);
+}
+
 /** Pads and castings are typed as one line, whatever stood beneath what. */
 const asOneLine = (layout: LinedLayout): LinedLayout =>
 	layout.kind === 'body_tag' || layout.lines.length === 1
@@ -61,11 +76,11 @@ export function readLined(tables: TableSet, request: LinedRequest): LinedResult 
 	const { kind, fields, context, lookups, lined, layouts } = request;
 	const own = lined.filter((layout) => layout.kind === kind).map(asOneLine);
 	const typed = linesOf(request.text, kind !== 'body_tag');
-	const matches = own
-		.map((layout) =>
-			fields === undefined ? matchLayout(layout, typed.lines) : matchFields(layout, fields, typed)
-		)
-		.sort((a, b) => a.cost - b.cost);
+	const matches =
+		fields === undefined
+			? matchesOf(own, typed.lines)
+			: own.map((layout) => matchFields(layout, fields, typed));
+	matches.sort((a, b) => a.cost - b.cost);
 	const fitting = matches.filter(mostlyPlaced);
 	const least = fitting[0]?.cost ?? 0;
 	const near = fitting.filter(({ cost }) => cost <= least + NEAR).slice(0, MOST_LAYOUTS);

@@ -132,6 +132,12 @@ function doublesOf(lines: readonly Line[]): (readonly [Line, Line])[] {
 	return doubles;
 }
 
+/** What a layout costs at least on so many lines: those for which it has no form are left over. */
+export const leastCost = ({ lines: forms }: LinedLayout, count: number): number =>
+	forms.some(({ repeats }) => repeats === true)
+		? 0
+		: Math.max(0, count - forms.length) * UNPLACED_LINE;
+
 /** Lays a layout over lines, in the order of the plate or, where that fits much better, in another. */
 export function matchLayout(layout: LinedLayout, all: readonly Line[]): LinedMatch {
 	const { lines: forms } = layout;

@@ -189,11 +189,17 @@ function carFor(stamp: LinedStamp, serials: Serials): KnownCar {
 	return { ...beside, ...(own === undefined ? {} : carOf(own.readings)) };
 }
 
+/** What speaks against a layout of other years than the car's own: as much as a hint that is missed. */
+const OTHER_YEARS = 60;
+
 /** The readings of a stamp under a layout, before they are ranked. */
 export function linedDrafts(stamp: LinedStamp): Draft[] {
 	const { match } = stamp;
 	const serials = serialsOn(stamp);
 	const own = { ...stamp, car: carFor(stamp, serials) };
+	const [from, to] = match.layout.years;
+	const { year: known = from } = own.car;
+	const otherYears = known < from || known > to;
 	const complete =
 		match.missing.length === 0 && match.lines.every(({ missing }) => missing.length === 0);
 	return yearsOf(own).flatMap((year) => {
@@ -206,7 +212,7 @@ export function linedDrafts(stamp: LinedStamp): Draft[] {
 				maker: makerOf(division ?? '') ?? match.layout.maker,
 				division: division ?? null,
 				year,
-				misfit: match.cost,
+				misfit: match.cost + (otherYears ? OTHER_YEARS : 0),
 				complete,
 				results: resultsOf(own, scope, serials)
 			};
