@@ -73,7 +73,7 @@ const lineKey = ({ left, right, reason }: TallyLine): string =>
 /** By code unit, as everything in an edition is ordered. */
 const order = (a: string, b: string): number => Number(a > b) - Number(a < b);
 
-/** One line for an attribute that a pair of stamps both tell. */
+/** Of what two voices say of an attribute the line that tells most. */
 function bestLine(
 	ones: readonly Statement[],
 	others: readonly Statement[],
@@ -85,6 +85,30 @@ function bestLine(
 		.map((line) => ({ line, key: lineKey(line) }))
 		.sort((a, b) => tells(a.line) - tells(b.line) || order(a.key, b.key));
 	return (sorted[0] as (typeof sorted)[number]).line;
+}
+
+const inVoices = (statements: readonly Statement[]): (readonly Statement[])[] =>
+	[false, true]
+		.map((repeated) => statements.filter((one) => one.repeated === repeated))
+		.filter((voice) => voice.length > 0);
+
+/**
+ * Lines for an attribute that a pair of stamps both tell: one for each result. A number that is repeated on a tag says
+ * nothing for what the tag says in codes of its own, so that neither hides the other.
+ */
+function pairLines(
+	ones: readonly Statement[],
+	others: readonly Statement[],
+	tables: TableSet,
+	company: Company
+): TallyLine[] {
+	const byResult = new Map<TallyLine['result'], TallyLine>();
+	for (const one of inVoices(ones))
+		for (const other of inVoices(others)) {
+			const line = bestLine(one, other, tables, company);
+			if (!byResult.has(line.result)) byResult.set(line.result, line);
+		}
+	return [...byResult.values()];
 }
 
 /** An attribute that one stamp alone tells. */
@@ -114,7 +138,7 @@ function* linesOf(tables: TableSet, stamps: readonly TallyStamp[]): Generator<Ta
 		const [only] = groups;
 		if (only !== undefined && groups.length === 1) yield lonely(only);
 		for (const [index, one] of groups.entries())
-			for (const other of groups.slice(index + 1)) yield bestLine(one, other, tables, company);
+			for (const other of groups.slice(index + 1)) yield* pairLines(one, other, tables, company);
 	}
 	const dates = dateStatementsOf(tables, stamps);
 	for (const [index, one] of dates.entries())

@@ -39,6 +39,8 @@ export interface Statement {
 	readonly options: readonly Option[];
 	readonly gap: Gap;
 	readonly weight: Weight;
+	/** Whether the stamp repeats the car's own number here, rather than saying it in characters of its own. */
+	readonly repeated: boolean;
 }
 
 /** Attributes that are the characters themselves, with the field that carries them. */
@@ -53,6 +55,8 @@ const BY_CHARACTERS: Partial<Record<FieldName, TallyAttribute>> = {
 
 /** Fields of the car's own number, in part or whole. */
 const NUMBER: readonly FieldName[] = ['sequence_number', 'partial_serial'];
+const repeats = ({ derived_from = [] }: ReadingField): boolean =>
+	derived_from.includes('partial_serial');
 const ofNumber = ({ name, derived_from = [] }: ReadingField): boolean =>
 	[name, ...derived_from].some((one) => NUMBER.includes(one));
 
@@ -81,7 +85,8 @@ function statement(
 		year: reading.model_year,
 		options,
 		gap: gapOf(field),
-		weight: weightOf(stamp.kind, stamp.place, reading.maker, ofNumber(field))
+		weight: weightOf(stamp.kind, stamp.place, reading.maker, ofNumber(field)),
+		repeated: repeats(field)
 	};
 }
 

@@ -66,6 +66,19 @@ describe('two statements of an engine', () => {
 		expect(line.reason).toContain('seem to name different engines');
 	});
 
+	it('is held against a code of its own, whatever the number says that the stamp repeats', () => {
+		const repeated = engine('V', 'gm.engine.v.1', { derived_from: ['partial_serial'] });
+		const lines = (own: string) =>
+			tallyStamps(tables, [V(), pad(unit(own), repeated)])
+				.filter(({ attribute }) => attribute === 'engine')
+				.map(({ result, right }) => [result, right?.code]);
+		expect(lines('CX3')).toEqual([
+			['does_not_tally', 'CX3'],
+			['tallies', 'V']
+		]);
+		expect(lines('CX1')).toEqual([['tallies', 'CX1']]);
+	});
+
 	it('cannot be told where we have no row, and a near code is offered', () => {
 		const line = only([V(), pad(fieldOf('unit_code', 'CX7', unlisted))], 'engine');
 		expect(line).toMatchObject({ result: 'cannot_be_told' });
