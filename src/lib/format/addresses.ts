@@ -31,3 +31,25 @@ export function readingAddress(query: ReadingQuery): string {
 
 export const rowAddress = (rowKey: string): string => `/rows/${encodeURIComponent(rowKey)}`;
 export const sourceAddress = (key: string): string => `/sources/${encodeURIComponent(key)}`;
+
+/** What the tag page is asked with. */
+export interface TagQuery {
+	readonly maker: string;
+	readonly year: string;
+	readonly serial: string;
+	/** As they stand on the tag, from the top; blank ones keep their places. */
+	readonly lines: readonly string[];
+}
+
+/** @example tagAddress({ maker: 'gm', year: '', serial: '', lines: ['ST 70'] }) // '/tag?maker=gm&text=ST%2070' */
+export function tagAddress({ maker, year, serial, lines }: TagQuery): string {
+	const given = [
+		...[
+			['maker', maker],
+			['year', year],
+			['serial', serial]
+		].filter(([, value]) => value !== ''),
+		...lines.map((line) => ['text', line])
+	].map(([name = '', value = '']) => `${name}=${encodeURIComponent(value)}`);
+	return given.length === 0 ? '/tag' : `/tag?${given.join('&')}`;
+}

@@ -5,6 +5,7 @@ export { readAgainst } from './read';
 export { isThisReader, READER, READER_DIGEST } from './reader';
 export {
 	READING_PARAMETERS,
+	readContext,
 	readEdition,
 	readRequest,
 	type ReadingParameter,

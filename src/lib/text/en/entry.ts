@@ -67,6 +67,16 @@ export const entryText = {
 			}
 		]
 	},
+	ways: {
+		heading: 'With more on the bench',
+		pages: [
+			{
+				name: 'A body tag, line by line',
+				address: '/tag',
+				about: 'Type it as it stands, and hold it against the serial number.'
+			}
+		]
+	},
 	example: {
 		heading: 'What a reading tells',
 		text: 'RM23N0G904127',

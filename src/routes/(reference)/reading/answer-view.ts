@@ -1,5 +1,5 @@
 /** An answer as the page shows it: one reading whole, the others by name. */
-import { readingAddress, type ReadingQuery } from '$lib/format/addresses';
+import { readingAddress, tagAddress, type ReadingQuery } from '$lib/format/addresses';
 import { day } from '$lib/format/editions';
 import { stampCells } from '$lib/format/stamp';
 import { entryText } from '$lib/text/en/entry';
@@ -72,6 +72,15 @@ export function answerView({ answer, head, present, query, index }: Shown): Answ
 			reading: at + 1
 		}),
 		again: readingAddress({ ...query, edition: null }),
+		lineByLine:
+			input.kind === 'body_tag'
+				? tagAddress({
+						maker: query.maker ?? '',
+						year: String(query.year ?? ''),
+						serial: '',
+						lines: [query.text]
+					})
+				: null,
 		work: seventeen ? checkDigitWork(cells) : null
 	};
 }

@@ -56,6 +56,8 @@ export interface AnswerView {
 	readonly digest: string;
 	readonly reader: string;
 	readonly permanent: string;
+	/** The page on which a body tag is typed line by line; null for other stamps. */
+	readonly lineByLine: string | null;
 	/** The same question to the present edition. */
 	readonly again: string;
 	readonly work: CheckDigitWork | null;
