@@ -2,6 +2,7 @@ import { parse } from 'csv-parse/sync';
 import { describe, expect, it } from 'vitest';
 import type { z } from 'zod';
 import { ADDED, call, PRESENT } from './api-calls';
+import { LAYOUTS, LINED_LAYOUTS } from '../../src/lib/decoder';
 import * as api from '../../src/lib/types/api';
 
 async function get<T extends z.ZodType>(path: string, schema: T): Promise<z.infer<T>> {
@@ -32,6 +33,24 @@ describe('makers and layouts', () => {
 		const first = await get('/layouts?limit=1', api.layoutsAnswerSchema);
 		const second = await get(`/layouts?limit=1&cursor=${first.next}`, api.layoutsAnswerSchema);
 		expect([...first.items, ...second.items]).toEqual(all.items.slice(0, 2));
+	});
+
+	it('tells of a stamp of lines which they are, from which end they are read, and what stands in them', async () => {
+		const { items } = await get('/layouts', api.layoutsAnswerSchema);
+		expect(items.map(({ id }) => id)).toEqual([...LAYOUTS, ...LINED_LAYOUTS].map(({ id }) => id));
+		const tag = items.find(({ id }) => id === 'chrysler-fender-tag-1969-1974');
+		expect(tag).toMatchObject({ kind: 'body_tag', length: null, order: 'up', derived: [] });
+		expect(tag?.lines.map(({ repeats }) => repeats)).toEqual([false, false, true]);
+		expect(tag?.fields[0]).toEqual({
+			name: 'engine',
+			label: 'Engine',
+			line: 1,
+			from: null,
+			to: null,
+			table: 'option'
+		});
+		const pad = items.find(({ kind }) => kind === 'engine');
+		expect(pad?.fields.map(({ line }) => line)).toContain(1);
 	});
 });
 

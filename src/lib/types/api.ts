@@ -170,15 +170,28 @@ export const layoutEntrySchema = z.strictObject({
 	kind: stampKindSchema,
 	years_from: z.number().int(),
 	years_to: z.number().int(),
-	length: z.number().int().min(1),
+	length: z
+		.number()
+		.int()
+		.min(1)
+		.nullable()
+		.describe('Characters; null for a stamp of lines, whose lengths vary'),
 	source: z.string(),
 	example: z.string(),
+	order: z
+		.enum(['down', 'up'])
+		.nullable()
+		.describe('From which end of the plate its lines are read; null for a serial number'),
+	lines: z
+		.array(z.strictObject({ label: z.string(), optional: z.boolean(), repeats: z.boolean() }))
+		.describe('In the order in which they are read; none for a serial number'),
 	fields: z.array(
 		z.strictObject({
 			name: fieldNameSchema,
 			label: z.string(),
-			from: z.number().int().min(1),
-			to: z.number().int().min(1),
+			line: z.number().int().min(1).nullable().describe('Which of `lines`, from 1'),
+			from: z.number().int().min(1).nullable().describe('Null where places vary'),
+			to: z.number().int().min(1).nullable(),
 			table: tableNameSchema.nullable()
 		})
 	),

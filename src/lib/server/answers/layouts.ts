@@ -1,33 +1,79 @@
-import { LAYOUTS, type Layout } from '../../decoder';
-import { MAKER_NAMES, type LayoutsAnswer } from '../../types';
+import { LAYOUTS, LINED_LAYOUTS, type Layout, type LinedLayout } from '../../decoder';
+import { MAKER_NAMES, type LayoutsAnswer, type TableName } from '../../types';
 
 type Entry = LayoutsAnswer['items'][number];
 
-const entryOf = (layout: Layout): Entry => ({
-	id: layout.id,
-	title: layout.title,
-	maker: MAKER_NAMES[layout.maker],
-	maker_key: layout.maker,
-	kind: layout.kind,
-	years_from: layout.years[0],
-	years_to: layout.years[1],
+/** The table that a field is looked up in; null where its characters stand for themselves. */
+const tableOf = (reads: { by: string; table?: TableName }): TableName | null => reads.table ?? null;
+
+const headOf = ({ id, title, maker, kind, years, source, examples }: Layout | LinedLayout) => ({
+	id,
+	title,
+	maker: MAKER_NAMES[maker],
+	maker_key: maker,
+	kind,
+	years_from: years[0],
+	years_to: years[1],
+	source,
+	example: examples.good
+});
+
+const serialEntry = (layout: Layout): Entry => ({
+	...headOf(layout),
 	length: layout.length,
-	source: layout.source,
-	example: layout.examples.good,
+	order: null,
+	lines: [],
 	fields: layout.fields.map(({ name, label, from, to, reads }) => ({
 		name,
 		label,
+		line: null,
 		from,
 		to,
-		table: reads.by === 'table' ? reads.table : null
+		table: tableOf(reads)
 	})),
 	derived: layout.derived.map(({ name, label, parents, reads }) => ({
 		name,
 		label,
 		derived_from: [...parents],
-		table: reads.by === 'table' ? reads.table : null
+		table: tableOf(reads)
 	}))
 });
 
-/** Every layout that readings try, as the interface gives it. */
-export const LAYOUT_LIST: readonly Entry[] = LAYOUTS.map(entryOf);
+const linedEntry = (layout: LinedLayout): Entry => ({
+	...headOf(layout),
+	length: null,
+	order: layout.order,
+	lines: layout.lines.map(({ label, optional = false, repeats = false }) => ({
+		label,
+		optional,
+		repeats
+	})),
+	fields: layout.lines.flatMap(({ fields }, line) =>
+		fields.map(({ name, label, reads }) => ({
+			name,
+			label,
+			line: line + 1,
+			from: null,
+			to: null,
+			table: tableOf(reads)
+		}))
+	),
+	derived: layout.lines
+		.flatMap(({ fields }) => fields)
+		.flatMap(({ name: parent, reads }) =>
+			reads.by !== 'table'
+				? []
+				: (reads.also ?? []).map((also) => ({
+						name: also.name,
+						label: also.label,
+						derived_from: [parent],
+						table: also.by === 'table' ? also.table : null
+					}))
+		)
+});
+
+/** Every layout that readings try, as the interface gives it: serial numbers, then stamps of lines. */
+export const LAYOUT_LIST: readonly Entry[] = [
+	...LAYOUTS.map(serialEntry),
+	...LINED_LAYOUTS.map(linedEntry)
+];
