@@ -10,10 +10,10 @@ import { readAnswerSchema, stampsAnswerSchema } from '../../src/lib/types';
 type Sample = Record<string, string>;
 
 const EACH = 3;
-const published = [
+const published: readonly Sample[] = [
 	...['chrysler', 'ford', 'gm'].flatMap((maker) => samples(`stamps/${maker}.csv`)),
 	...samples('serials/gm.csv').map((sample) => ({ ...sample, kind: 'serial' }))
-].filter(({ known_miss }) => known_miss === '');
+].filter((sample: Sample) => sample['known_miss'] === '');
 
 /** What the interface takes of an example: the division stands for its maker where one is named. */
 const asked = ({ kind = '', text = '', maker, division, year, serial, field }: Sample) => ({

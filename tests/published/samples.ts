@@ -20,7 +20,10 @@ export type Expectation = Readonly<
 >;
 
 /** What a reading does not say although the page does; empty when it says all. */
-export function unmet(reading: Reading | undefined, expectation: Expectation): string[] {
+export function unmet(
+	reading: Pick<Reading, 'model_year' | 'fields'> | undefined,
+	expectation: Expectation
+): string[] {
 	if (reading === undefined) return ['no reading'];
 	return Object.entries(expectation).flatMap(([name, expected]) => {
 		if (name === 'model_year')
