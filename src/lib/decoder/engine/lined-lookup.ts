@@ -31,12 +31,15 @@ export interface Lookups {
 	readonly loose: boolean;
 }
 
-/** The cells that make a code. Places count from the field's start, or from its end when negative. */
+/**
+ * The cells that make a code. Places count from the field's start, or from its end when negative. A place that is taken
+ * twice is written twice: [[1, 1], [1, 1]] makes NN of N.
+ */
 export function partsOf(cells: readonly Cell[], parts: readonly Places[] | undefined): Cell[] {
 	if (parts === undefined) return [...cells];
 	const index = (place: number): number => (place < 0 ? cells.length + place : place - 1);
 	return parts.flatMap(([from, to], part) => [
-		...(part === 0 ? [] : ['/']),
+		...(part === 0 || from === parts[part - 1]?.[0] ? [] : ['/']),
 		...cells.slice(index(from), index(to) + 1)
 	]);
 }

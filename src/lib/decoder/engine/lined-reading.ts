@@ -108,6 +108,13 @@ function orderOf(placed: readonly Placed[], first: readonly string[]): Placed[] 
 	return [...placed].sort((a, b) => rank(a) - rank(b));
 }
 
+/** The body's own code scopes other fields even before, and without, a row for it. */
+function bodyOn(placed: readonly Placed[]): { readonly body?: string } {
+	const body = placed.find(({ field }) => field.name === 'body_style');
+	const cells = body === undefined ? [] : cellsOfPlaced(body);
+	return cells.length > 0 && cells.every(isRead) ? { body: textOf(cells) } : {};
+}
+
 /** What a field's rows tell of the car that others are scoped by. */
 function learn(scope: Scope, results: readonly FieldResult[]): void {
 	for (const { field } of results) {
@@ -115,7 +122,6 @@ function learn(scope: Scope, results: readonly FieldResult[]): void {
 		const { line, plant_code } = field.values;
 		if (typeof line === 'string') scope.line ??= [line];
 		if (field.name === 'assembly_plant') scope.plant ??= String(plant_code ?? field.code);
-		if (field.name === 'body_style') scope.body ??= field.code;
 	}
 }
 
@@ -206,7 +212,12 @@ export function linedDrafts(stamp: LinedStamp): Draft[] {
 		const divisions = divisionsOf(own, year);
 		return (divisions.length === 0 ? [undefined] : divisions).map((division): Draft => {
 			const { maker: _maker, year: _year, division: _division, ...others } = own.car;
-			const scope: Scope = { ...others, year, ...(division === undefined ? {} : { division }) };
+			const scope: Scope = {
+				...bodyOn(placedIn(match)),
+				...others,
+				year,
+				...(division === undefined ? {} : { division })
+			};
 			return {
 				layout: match.layout,
 				maker: makerOf(division ?? '') ?? match.layout.maker,

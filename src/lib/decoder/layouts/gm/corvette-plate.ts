@@ -1,0 +1,87 @@
+/**
+ * The trim plate of the Corvette, 1965 to 1977: date of the body as a letter and two figures, style number, body number,
+ * trim and paint. It says nothing of engine and gearbox. Row `gm-corvette-plate` of table `layout` cites what it rests
+ * on; where the date stands differs, and neither place is held against a plate.
+ */
+import type { LineField, LineForm, LinedLayout } from '../../engine/lined-layout';
+import { ANY, DIGITS } from './signs';
+import { TAG, styleInFigures, styleWithLetters, trim, year } from './tag-fields';
+
+const date: LineField = {
+	name: 'build_date',
+	label: 'Body built',
+	shape: { chars: ['ABCDEFGHIJKLMNOPQ', '0123', DIGITS], whole: true },
+	reads: { by: 'date', format: 'corvette-body-month-day' }
+};
+const dateLine: LineForm = { label: 'Date', optional: true, fields: [date] };
+const bodyNumber: LineField = {
+	name: 'body_number',
+	label: 'Body number',
+	words: ['BODY', 'BDY', 'STL'],
+	wordsAfter: ['BODY', 'BDY'],
+	shape: { chars: ANY, length: [1, 6] },
+	reads: { by: 'number' }
+};
+const trimAndPaint: LineForm = {
+	label: 'Trim and paint',
+	fields: [
+		{ ...trim, shape: { chars: ANY, length: [2, 4], whole: true } },
+		{
+			name: 'paint',
+			label: 'Paint',
+			words: ['PAINT', 'PNT'],
+			wordsAfter: ['PAINT', 'PNT'],
+			shape: { chars: ANY, length: [2, 3] },
+			reads: { by: 'table', table: 'paint' }
+		}
+	]
+};
+const plate = { ...TAG, divisions: ['Chevrolet'] } as const;
+
+export const corvettePlate1965: LinedLayout = {
+	...plate,
+	id: 'gm-corvette-plate-1965-1972',
+	title: 'Trim plate, Corvette, 1965–72',
+	years: [1965, 1972],
+	source:
+		'76vette.com, Is My C3 Corvette an Early or Late Model?, for the date; the rest from memory',
+	lines: [
+		dateLine,
+		{
+			label: 'Style and body',
+			fields: [
+				{ ...year(1965, 1966, 1967, 1968, 1969, 1970, 1971, 1972) },
+				...styleInFigures,
+				bodyNumber
+			]
+		},
+		trimAndPaint,
+		dateLine
+	],
+	examples: {
+		good: 'STYLE 67-19437 BODY S1234 / TRIM STD PAINT 984 / H12',
+		bad: 'STYLE 67-19437 BODY S1234 / H12'
+	}
+};
+
+export const corvettePlate1973: LinedLayout = {
+	...plate,
+	id: 'gm-corvette-plate-1973-1977',
+	title: 'Trim plate, Corvette, 1973–77',
+	years: [1973, 1977],
+	source:
+		'76vette.com, Is My C3 Corvette an Early or Late Model?, for the date; the rest from memory',
+	lines: [
+		dateLine,
+		{
+			label: 'Style and body',
+			fields: [year(1973, 1974, 1975, 1976, 1977), ...styleWithLetters, bodyNumber]
+		},
+		trimAndPaint,
+		dateLine
+	],
+	examples: {
+		good: 'STYLE 74 1YZ37 BODY 12345 / TRIM 400 PAINT 976 / C09',
+		bad: 'STYLE 74 1YZ37 BODY 12345 / C09'
+	}
+};

@@ -1,0 +1,178 @@
+/** The fields that the body tags of Fisher Body share; their order and their forms differ by year and plant. */
+import type { LineField, LineForm, Places } from '../../engine/lined-layout';
+import { ANY, DIGITS, LETTERS } from './signs';
+
+/** The same place twice: a color is listed as NN, and stands as one N before or after another code. */
+export const twice = (place: number): readonly Places[] => [
+	[place, place],
+	[place, place]
+];
+
+/** Month and week, as 04C. */
+export const timeBuilt: LineField = {
+	name: 'build_date',
+	label: 'Time built',
+	shape: { chars: ['01', DIGITS, 'ABCDE'], whole: true },
+	reads: { by: 'date', format: 'gm-body-month-week' }
+};
+
+/** Option codes, as X33 and WS4. What else stands there is the plant's own, and is left as it is. */
+export const options: LineField = {
+	name: 'option',
+	label: 'Option',
+	optional: true,
+	repeats: true,
+	shape: { chars: [LETTERS, ANY, DIGITS], whole: true },
+	reads: { by: 'table', table: 'option' }
+};
+
+/** Groups of options to 1967, as 4L and 2LGSR: a figure for the group, letters for what it holds. They differ by plant. */
+const groups: LineField = {
+	name: 'option',
+	label: 'Option group',
+	optional: true,
+	repeats: true,
+	shape: { chars: ANY, length: [1, 6], whole: true },
+	reads: { by: 'table', table: 'option' }
+};
+
+/** The model year in two figures. */
+export const year = (...years: readonly number[]): LineField => ({
+	name: 'model_year',
+	label: 'Model year',
+	words: ['STYLE', 'ST'],
+	shape: { chars: ['67', years.map((own) => String(own).slice(3)).join('')] },
+	reads: { by: 'year', years: Object.fromEntries(years.map((own) => [String(own % 100), [own]])) }
+});
+
+const division: LineField = {
+	name: 'division',
+	label: 'Division',
+	shape: { chars: ['123467'] },
+	reads: { by: 'table', table: 'division' }
+};
+const body: LineField = {
+	name: 'body_style',
+	label: 'Body style',
+	shape: { chars: [DIGITS, DIGITS] },
+	reads: { by: 'table', table: 'body_style' }
+};
+
+/**
+ * The style number in figures: division, series, body. The series is that of the body and not of the serial number: its
+ * last figure does not tell six from eight cylinders, as it does there.
+ */
+export const styleInFigures: readonly LineField[] = [
+	division,
+	{
+		name: 'line',
+		label: 'Series',
+		shape: { chars: [DIGITS, DIGITS] },
+		reads: { by: 'table', table: 'style_number' }
+	},
+	body
+];
+
+/** The style number with letters: division, body type and series, body. */
+export const styleWithLetters: readonly LineField[] = [
+	division,
+	{
+		name: 'line',
+		label: 'Body type and series',
+		shape: { chars: [LETTERS, LETTERS] },
+		reads: { by: 'table', table: 'style_number' }
+	},
+	body
+];
+
+/** The plant, by its name cut short, and the number that Fisher Body gave the body there. */
+export const plantAndNumber: readonly LineField[] = [
+	{
+		name: 'assembly_plant',
+		label: 'Plant',
+		shape: { chars: LETTERS, length: [2, 3] },
+		reads: { by: 'table', table: 'plant_abbreviation' }
+	},
+	{
+		name: 'body_number',
+		label: 'Body number',
+		wordsAfter: ['BODY', 'BDY'],
+		shape: { chars: ANY, length: [1, 7] },
+		reads: { by: 'number' }
+	}
+];
+
+/** The trim code; on some tags letters follow behind a dash. */
+export const trim: LineField = {
+	name: 'trim',
+	label: 'Trim',
+	words: ['TRIM', 'TR'],
+	shape: { chars: ANY, length: [2, 5] },
+	reads: { by: 'table', table: 'trim', otherwise: [[[1, 3]]] }
+};
+
+/** Two letters to 1968: lower and upper body, the same twice for one color, a figure in the second place for a top. */
+export const paintInLetters: LineField = {
+	name: 'paint',
+	label: 'Paint',
+	wordsAfter: ['PAINT', 'PNT'],
+	shape: { chars: [LETTERS, ANY] },
+	reads: {
+		by: 'table',
+		table: 'paint',
+		otherwise: [twice(1)],
+		also: [
+			{ name: 'roof', label: 'Top', by: 'table', table: 'roof', parts: [[2, 2]] },
+			{ name: 'paint_upper', label: 'Upper body', by: 'table', table: 'paint', parts: twice(2) }
+		]
+	}
+};
+
+/** Two figures from 1969, for the lower body; then two for the upper body, or a letter for a vinyl or cloth top. */
+export const paintInFigures: readonly LineField[] = [
+	{
+		name: 'paint',
+		label: 'Lower body',
+		wordsAfter: ['PAINT', 'PNT'],
+		shape: { chars: [DIGITS, DIGITS] },
+		reads: { by: 'table', table: 'paint' }
+	},
+	{
+		name: 'paint_upper',
+		label: 'Upper body',
+		optional: true,
+		wordsAfter: ['PAINT', 'PNT'],
+		shape: { chars: [DIGITS, DIGITS] },
+		reads: { by: 'table', table: 'paint' }
+	},
+	{
+		name: 'roof',
+		label: 'Top',
+		optional: true,
+		wordsAfter: ['PAINT', 'PNT'],
+		shape: { chars: LETTERS, length: 1, whole: true },
+		reads: { by: 'table', table: 'roof', otherwise: [twice(1)] }
+	}
+];
+
+/** A seat's option code, which some tags carry on the trim line. */
+export const seat: LineField = {
+	name: 'option',
+	label: 'Seat',
+	optional: true,
+	shape: { chars: [LETTERS, DIGITS, DIGITS], whole: true },
+	reads: { by: 'table', table: 'option' }
+};
+
+export const timeLine: LineForm = { label: 'Time built', fields: [timeBuilt, options] };
+export const groupLine: LineForm = { label: 'Option groups', optional: true, fields: [groups] };
+export const optionLine: LineForm = { label: 'Options', optional: true, fields: [options] };
+
+/** What all of these tags share. */
+export const TAG = {
+	kind: 'body_tag',
+	maker: 'gm',
+	order: 'down',
+	divisionFrom: 'division',
+	lookFirst: ['division', 'line', 'body_style', 'assembly_plant']
+} as const;
