@@ -53,3 +53,7 @@ export function tagAddress({ maker, year, serial, lines }: TagQuery): string {
 	].map(([name = '', value = '']) => `${name}=${encodeURIComponent(value)}`);
 	return given.length === 0 ? '/tag' : `/tag?${given.join('&')}`;
 }
+
+/** Where the stamps of a maker's cars sit. @example whereAddress('Plymouth', 1970) // '/where?maker=plymouth&year=1970' */
+export const whereAddress = (maker: string, year: number | null): string =>
+	`/where?maker=${encodeURIComponent(maker.toLowerCase())}${year === null ? '' : `&year=${year}`}`;

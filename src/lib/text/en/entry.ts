@@ -74,6 +74,16 @@ export const entryText = {
 				name: 'A body tag, line by line',
 				address: '/tag',
 				about: 'Type it as it stands, and hold it against the serial number.'
+			},
+			{
+				name: 'Where the stamps sit',
+				address: '/where',
+				about: 'By maker and year, each place with its source.'
+			},
+			{
+				name: 'Paint codes',
+				address: '/paint',
+				about: 'The codes of a make and model year, with chips.'
 			}
 		]
 	},

@@ -75,6 +75,7 @@ export const readingText = {
 	repeat: 'Repeat on another edition',
 	repeatSubmit: 'Repeat',
 	allSources: 'All sources of this reading',
+	where: 'Where its stamps sit',
 	lineByLine: 'Type it line by line, with the serial number beside it',
 	permanent: 'Permanent address',
 	copy: 'Copy link',

@@ -1,5 +1,5 @@
 /** An answer as the page shows it: one reading whole, the others by name. */
-import { readingAddress, tagAddress, type ReadingQuery } from '$lib/format/addresses';
+import { readingAddress, tagAddress, whereAddress, type ReadingQuery } from '$lib/format/addresses';
 import { day } from '$lib/format/editions';
 import { stampCells } from '$lib/format/stamp';
 import { entryText } from '$lib/text/en/entry';
@@ -81,6 +81,10 @@ export function answerView({ answer, head, present, query, index }: Shown): Answ
 						lines: [query.text]
 					})
 				: null,
+		where:
+			shown === undefined || shown.maker_key === null || shown.maker_key === 'other'
+				? null
+				: whereAddress(shown.division ?? shown.maker_key, shown.model_year),
 		work: seventeen ? checkDigitWork(cells) : null
 	};
 }

@@ -58,6 +58,8 @@ export interface AnswerView {
 	readonly permanent: string;
 	/** The page on which a body tag is typed line by line; null for other stamps. */
 	readonly lineByLine: string | null;
+	/** The page of the places where stamps of such a car sit; null where its maker is open. */
+	readonly where: string | null;
 	/** The same question to the present edition. */
 	readonly again: string;
 	readonly work: CheckDigitWork | null;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { stampPlaceText, type StampPlace } from '$lib/text/en/stamp-places';
+import { stampPlaceText, type StampPlace } from '../../text/en/stamp-places';
 import { planLabels } from './plan';
 
 const makers: Readonly<Record<string, readonly StampPlace[]>> = stampPlaceText.places;

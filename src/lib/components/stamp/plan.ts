@@ -1,5 +1,5 @@
-import type { StampPlace } from '$lib/text/en/stamp-places';
-import { yearSpan } from '$lib/format/years';
+import type { StampPlace } from '../../text/en/stamp-places';
+import { yearSpan } from '../../format/years';
 
 /** Where a spot lies in the plan, px from the car's upper left; the driver's side is below. */
 const SPOTS: Readonly<Record<StampPlace['spot'], readonly [x: number, y: number]>> = {
