@@ -54,9 +54,9 @@ function maskOf(chars: string): Uint8Array {
 	return mask;
 }
 
-function takingOf({ shape: { chars, length = 1 } }: LineField): Taking {
+function takingOf({ shape: { chars, length = 1, fewest: least } }: LineField): Taking {
 	if (typeof chars !== 'string')
-		return { masks: chars.map(maskOf), fewest: chars.length, most: chars.length };
+		return { masks: chars.map(maskOf), fewest: least ?? chars.length, most: chars.length };
 	const [fewest, most] = typeof length === 'number' ? [length, length] : length;
 	return { masks: new Array<Uint8Array>(most).fill(maskOf(chars)), fewest, most };
 }

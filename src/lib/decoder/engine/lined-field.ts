@@ -127,7 +127,13 @@ export function linedField(placed: Placed, reader: LinedReader): FieldResult[] {
 			const { year } = reader.scope;
 			const context = { years: reader.years, ...(year === null ? {} : { year }) };
 			const field = dateField(head, reads.format, spanText(line, from, to), context, reader.tables);
-			return alone(field, field.outcome === 'found');
+			const own: FieldResult = {
+				field,
+				rows: [],
+				counts: field.outcome === 'found',
+				table: null
+			};
+			return [own, ...(reads.also ?? []).flatMap((one) => also(own, one, cells, reader))];
 		}
 		case 'year': {
 			const { year } = reader.scope;

@@ -17,6 +17,8 @@ export interface TokenShape {
 	readonly chars: string | readonly string[];
 	/** How many characters, or the fewest and the most. Left out where `chars` has an entry a place. */
 	readonly length?: number | readonly [from: number, to: number];
+	/** With an entry a place: how many of them are always there, where the last ones may be left out. */
+	readonly fewest?: number;
 	/** Whether the field must begin and end at a divider: for single characters among longer codes. */
 	readonly whole?: true;
 }
@@ -43,7 +45,11 @@ export type LineReads =
 			readonly also?: readonly AlsoReads[];
 	  }
 	/** A date in a form of `dates/`. */
-	| { readonly by: 'date'; readonly format: DateFormatId }
+	| {
+			readonly by: 'date';
+			readonly format: DateFormatId;
+			readonly also?: readonly AlsoReads[];
+	  }
 	/** The model year, by what is stamped: `{ '70': [1970] }`. */
 	| { readonly by: 'year'; readonly years: Readonly<Record<string, readonly number[]>> }
 	/**

@@ -30,8 +30,8 @@ export const chevroletEnginePad: LinedLayout = {
 				{
 					name: 'assembly_date',
 					label: 'Assembled',
-					// A one may be struck as I.
-					shape: { chars: `${DIGITS}I`, length: 4 },
+					// A one may be struck as I, and a naught typed as O.
+					shape: { chars: `${DIGITS}IO`, length: 4 },
 					reads: { by: 'date', format: 'gm-assembly-month-day' }
 				},
 				{

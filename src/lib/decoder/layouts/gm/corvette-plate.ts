@@ -13,13 +13,18 @@ const date: LineField = {
 	shape: { chars: ['ABCDEFGHIJKLMNOPQ', '0123', DIGITS], whole: true },
 	reads: { by: 'date', format: 'corvette-body-month-day' }
 };
+/** The style number, of which the series is always the same. */
+const ofCorvettes = (style: readonly LineField[], first: string, second: string) =>
+	style.map((field) =>
+		field.name === 'line' ? { ...field, shape: { chars: [first, second] } } : field
+	);
 const dateLine: LineForm = { label: 'Date', optional: true, fields: [date] };
 const bodyNumber: LineField = {
 	name: 'body_number',
 	label: 'Body number',
 	words: ['BODY', 'BDY', 'STL'],
 	wordsAfter: ['BODY', 'BDY'],
-	shape: { chars: ANY, length: [1, 6] },
+	shape: { chars: [ANY, DIGITS, DIGITS, DIGITS, DIGITS, DIGITS], fewest: 2 },
 	reads: { by: 'number' }
 };
 const trimAndPaint: LineForm = {
@@ -50,8 +55,8 @@ export const corvettePlate1965: LinedLayout = {
 		{
 			label: 'Style and body',
 			fields: [
-				{ ...year(1965, 1966, 1967, 1968, 1969, 1970, 1971, 1972) },
-				...styleInFigures,
+				year(1965, 1966, 1967, 1968, 1969, 1970, 1971, 1972),
+				...ofCorvettes(styleInFigures, '9', '4'),
 				bodyNumber
 			]
 		},
@@ -75,7 +80,11 @@ export const corvettePlate1973: LinedLayout = {
 		dateLine,
 		{
 			label: 'Style and body',
-			fields: [year(1973, 1974, 1975, 1976, 1977), ...styleWithLetters, bodyNumber]
+			fields: [
+				year(1973, 1974, 1975, 1976, 1977),
+				...ofCorvettes(styleWithLetters, 'Y', 'Z'),
+				bodyNumber
+			]
 		},
 		trimAndPaint,
 		dateLine

@@ -1,7 +1,8 @@
 /**
  * The body tag of Fisher Body, 1968 to 1972, lying on the cowl: year and style number, plant and body number; trim and
  * paint; the time built, in 1968 and on early cars of 1969 above the others, later below them and before the option
- * codes. To 1968 paint has letters, from 1969 figures. Rows of table `layout` cite what the two forms rest on.
+ * codes, of which some stand on the trim line. To 1968 paint has letters, from 1969 figures. Rows of table `layout` cite
+ * what the two forms rest on.
  */
 import type { LinedLayout } from '../../engine/lined-layout';
 import {
@@ -28,7 +29,7 @@ export const gmFisherTag1968: LinedLayout = {
 	lines: [
 		{ ...timeLine, optional: true },
 		{ label: 'Style line', fields: [year(1968), ...styleInFigures, ...plantAndNumber] },
-		{ label: 'Trim and paint', fields: [trim, paintInLetters] },
+		{ label: 'Trim and paint', fields: [trim, options, paintInLetters] },
 		{
 			label: 'Time built and options',
 			optional: true,

@@ -1,18 +1,26 @@
 /** The lined layouts of this maker. */
 import type { LinedLayout } from '../../engine/lined-layout';
+import { buickEngine } from './buick-engine';
 import { gmCastingStamp } from './casting';
+import { gmAxleStamp } from './axle-stamp';
 import { gmBodyPlate1976 } from './body-plate-1976-1980';
 import { chevroletEnginePad } from './chevrolet-engine-pad';
 import { corvettePlate1965, corvettePlate1973 } from './corvette-plate';
 import { gmFisherTag1964, gmFisherTag1965 } from './fisher-tag-1964-1967';
 import { gmFisherTag1968, gmFisherTag1969 } from './fisher-tag-1968-1972';
 import { gmFisherTag1973 } from './fisher-tag-1973-1975';
+import { GEARBOXES } from './gearboxes';
 import { gmPartialSerial } from './partial-serial';
+import { pontiacEngine } from './pontiac-engine';
 
 export const GM_LINED: readonly LinedLayout[] = [
 	chevroletEnginePad,
+	pontiacEngine,
+	buickEngine,
 	gmPartialSerial,
 	gmCastingStamp,
+	...GEARBOXES,
+	gmAxleStamp,
 	gmFisherTag1964,
 	gmFisherTag1965,
 	gmFisherTag1968,

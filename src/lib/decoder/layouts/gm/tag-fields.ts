@@ -97,7 +97,7 @@ export const plantAndNumber: readonly LineField[] = [
 		name: 'body_number',
 		label: 'Body number',
 		wordsAfter: ['BODY', 'BDY'],
-		shape: { chars: ANY, length: [1, 7] },
+		shape: { chars: [ANY, ANY, ANY, ANY, DIGITS, DIGITS, DIGITS], fewest: 1 },
 		reads: { by: 'number' }
 	}
 ];
