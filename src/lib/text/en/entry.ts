@@ -76,6 +76,11 @@ export const entryText = {
 				about: 'Type it as it stands, and hold it against the serial number.'
 			},
 			{
+				name: 'A loose part',
+				address: '/part',
+				about: 'What its number names, and which decade its date can mean.'
+			},
+			{
 				name: 'Where the stamps sit',
 				address: '/where',
 				about: 'By maker and year, each place with its source.'
