@@ -84,7 +84,7 @@ describe('six figures alone', () => {
 	it('are offered as a sequence number', () => {
 		expect(read(tables, { text: '904127' }).problems[0]).toMatchObject({
 			code: 'bare_sequence',
-			offers: [{ text: '???????904127' }, { text: '?????904127' }]
+			offers: [{ text: '???????904127' }, { text: '??????904127' }, { text: '?????904127' }]
 		});
 	});
 });

@@ -3,7 +3,7 @@
  * Issued by each division; riveted to the door pillar or hinge pillar through 1967, to the dash top from 1968.
  * Source: Camaro Research Group, "VIN, Cowl Tag and other Numbers"; row `gm-1965-1971` of table `layout` cites all.
  * The second place is a figure here and a letter from 1972: that tells the two forms apart.
- * Chevrolet's and Pontiac's forms of 1964 are others, one a division, and are refused.
+ * The forms of 1964 are others, one a division: Chevrolet’s is read, those of the other divisions are refused.
  */
 import { ANY, DIGITS } from '../engine/characters';
 import { lastDigits, yearsByCharacter, type Layout } from '../engine/layout';

@@ -58,11 +58,19 @@ export const coverageText = {
 	gapList: [
 		{
 			title: 'General Motors of 1964 and before',
-			text: 'Each division had a form of its own until 1965, so that there is no one layout to read by. The 12 characters of a Chevrolet of 1960 to 1964 are refused as one too few for the later form: do not add one to make them fit.'
+			text: 'Each division had a form of its own until 1965. The 12 characters of a Chevrolet of 1964 are read. The forms of Pontiac, Oldsmobile, Buick and Cadillac of that year, and all of 1963 and before, are refused: do not add a character to make them fit.'
 		},
 		{
 			title: 'Cadillac, 1965 to 1970',
 			text: 'The numbers may have been shorter than those of the other divisions. We have no source that settles it.'
+		},
+		{
+			title: 'Body tags of General Motors',
+			text: 'Fisher tags of 1964 to 1975, body plates of 1976 to 1980 and the Corvette’s trim plates of 1965 to 1977 are read. The style line is published; the order of the other lines is from memory for most years. Tags of Canadian plants, and what single plants added, are kept as they stand. Option groups to 1967 are known for one plant, Norwood, and only in part.'
+		},
+		{
+			title: 'Engines, gearboxes and axles of General Motors',
+			text: 'Chevrolet’s suffixes, Pontiac’s codes and Buick’s are listed in part. For Oldsmobile and Cadillac we have no table of engine codes, only the part of the serial number. Axle stamps are dated; what their letters say of the ratio is not listed.'
 		},
 		{
 			title: 'Chrysler Corporation of 1964 and 1965',
