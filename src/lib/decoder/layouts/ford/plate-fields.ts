@@ -42,7 +42,8 @@ export const trim: LineField = {
 	label: 'Trim',
 	words: ['TRIM'],
 	shape: { chars: ANY, length: [2, 3] },
-	reads: { by: 'table', table: 'trim' }
+	// Where the whole code has no row, its last character still tells the color.
+	reads: { by: 'table', table: 'trim', otherwise: [[[-1, -1]]] }
 };
 
 /** The day has two figures; below ten the naught may be left out. */
