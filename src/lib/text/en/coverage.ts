@@ -81,8 +81,12 @@ export const coverageText = {
 			text: 'Ten characters in another order than from 1960 on, and not read.'
 		},
 		{
+			title: 'Body plates and labels of Ford, Mercury and Lincoln',
+			text: 'Plates of 1960 to 1969 and labels of 1970 to 1980 are read. To 1963 it is open whether axle or transmission stands first, and both are offered. Labels of 1979 and 1980 are placed in part. Of trim codes we list a few whole ones; of others the last character tells black, blue, red or aqua, from memory.'
+		},
+		{
 			title: 'American Motors',
-			text: 'Serial numbers are read from 1968 on. For 1966 and 1967 we found no published form, and refuse them.'
+			text: 'Serial numbers are read from 1968 on, body plates of 1968 to 1974 and the day-build code of engines from memory. Paint and trim codes of the plates have no rows. For 1966 and 1967 we found no published form, and refuse them.'
 		},
 		{
 			title: 'Studebaker, and makers of trucks',
