@@ -4,12 +4,9 @@
  * (Olds G-Mail Reference Manual), for 1978 on, and the 1977 Nova tag of the Nova Resource, where the time built is not
  * told and the seat stands before the paint; row `gm-body-plate-1976-1980` of table `layout` cites both.
  */
-import type { LineField, LinedLayout } from '../../engine/lined-layout';
-import { plantLetterAndNumber } from './fisher-tag-1973-1975';
+import type { LinedLayout } from '../../engine/lined-layout';
 import { ANY, DIGITS } from './signs';
-import { TAG, options, seat, styleWithLetters, timeBuilt, trim, year } from './tag-fields';
-
-const years: LineField = year(1976, 1977, 1978, 1979, 1980);
+import { TAG, options, plantAndNumber, seat, style, timeBuilt, trim, year } from './tag-fields';
 
 /** Two figures; the letter for the place on the body may be printed behind them. */
 const paint = (name: 'paint' | 'paint_upper', label: string, letter: string) =>
@@ -31,10 +28,10 @@ export const gmBodyPlate1976: LinedLayout = {
 		{
 			label: 'Style line',
 			fields: [
-				{ ...years, shape: { chars: ['78', '06789'] } },
+				year(1976, 1980),
 				{ ...timeBuilt, optional: true },
-				...styleWithLetters,
-				...plantLetterAndNumber
+				...style('letters'),
+				...plantAndNumber
 			]
 		},
 		{

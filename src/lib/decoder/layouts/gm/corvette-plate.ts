@@ -5,7 +5,7 @@
  */
 import type { LineField, LineForm, LinedLayout } from '../../engine/lined-layout';
 import { ANY, DIGITS } from './signs';
-import { TAG, styleInFigures, styleWithLetters, trim, year } from './tag-fields';
+import { TAG, style, trim, year } from './tag-fields';
 
 const date: LineField = {
 	name: 'build_date',
@@ -13,11 +13,6 @@ const date: LineField = {
 	shape: { chars: ['ABCDEFGHIJKLMNOPQ', '0123', DIGITS], whole: true },
 	reads: { by: 'date', format: 'corvette-body-month-day' }
 };
-/** The style number, of which the series is always the same. */
-const ofCorvettes = (style: readonly LineField[], first: string, second: string) =>
-	style.map((field) =>
-		field.name === 'line' ? { ...field, shape: { chars: [first, second] } } : field
-	);
 const dateLine: LineForm = { label: 'Date', optional: true, fields: [date] };
 const bodyNumber: LineField = {
 	name: 'body_number',
@@ -41,24 +36,20 @@ const trimAndPaint: LineForm = {
 		}
 	]
 };
-const plate = { ...TAG, divisions: ['Chevrolet'] } as const;
 
-export const corvettePlate1965: LinedLayout = {
-	...plate,
-	id: 'gm-corvette-plate-1965-1972',
-	title: 'Trim plate, Corvette, 1965–72',
-	years: [1965, 1972],
+export const corvettePlate: LinedLayout = {
+	...TAG,
+	divisions: ['Chevrolet'],
+	id: 'gm-corvette-plate-1965-1977',
+	title: 'Trim plate, Corvette, 1965–77',
+	years: [1965, 1977],
 	source:
 		'76vette.com, Is My C3 Corvette an Early or Late Model?, for the date; the rest from memory',
 	lines: [
 		dateLine,
 		{
 			label: 'Style and body',
-			fields: [
-				year(1965, 1966, 1967, 1968, 1969, 1970, 1971, 1972),
-				...ofCorvettes(styleInFigures, '9', '4'),
-				bodyNumber
-			]
+			fields: [year(1965, 1977), ...style('either', '9Y', '4Z'), bodyNumber]
 		},
 		trimAndPaint,
 		dateLine
@@ -66,31 +57,5 @@ export const corvettePlate1965: LinedLayout = {
 	examples: {
 		good: 'STYLE 67-19437 BODY S1234 / TRIM STD PAINT 984 / H12',
 		bad: 'STYLE 67-19437 BODY S1234 / H12'
-	}
-};
-
-export const corvettePlate1973: LinedLayout = {
-	...plate,
-	id: 'gm-corvette-plate-1973-1977',
-	title: 'Trim plate, Corvette, 1973–77',
-	years: [1973, 1977],
-	source:
-		'76vette.com, Is My C3 Corvette an Early or Late Model?, for the date; the rest from memory',
-	lines: [
-		dateLine,
-		{
-			label: 'Style and body',
-			fields: [
-				year(1973, 1974, 1975, 1976, 1977),
-				...ofCorvettes(styleWithLetters, 'Y', 'Z'),
-				bodyNumber
-			]
-		},
-		trimAndPaint,
-		dateLine
-	],
-	examples: {
-		good: 'STYLE 74 1YZ37 BODY 12345 / TRIM 400 PAINT 976 / C09',
-		bad: 'STYLE 74 1YZ37 BODY 12345 / C09'
 	}
 };

@@ -5,10 +5,9 @@ import { gmCastingStamp } from './casting';
 import { gmAxleStamp } from './axle-stamp';
 import { gmBodyPlate1976 } from './body-plate-1976-1980';
 import { chevroletEnginePad } from './chevrolet-engine-pad';
-import { corvettePlate1965, corvettePlate1973 } from './corvette-plate';
-import { gmFisherTag1964, gmFisherTag1965 } from './fisher-tag-1964-1967';
-import { gmFisherTag1968, gmFisherTag1969 } from './fisher-tag-1968-1972';
-import { gmFisherTag1973 } from './fisher-tag-1973-1975';
+import { corvettePlate } from './corvette-plate';
+import { gmFisherTag1964, gmFisherTag1965 } from './fisher-tag-1964-1968';
+import { gmFisherTag1969 } from './fisher-tag-1969-1975';
 import { GEARBOXES } from './gearboxes';
 import { gmPartialSerial } from './partial-serial';
 import { pontiacEngine } from './pontiac-engine';
@@ -23,10 +22,7 @@ export const GM_LINED: readonly LinedLayout[] = [
 	gmAxleStamp,
 	gmFisherTag1964,
 	gmFisherTag1965,
-	gmFisherTag1968,
 	gmFisherTag1969,
-	gmFisherTag1973,
 	gmBodyPlate1976,
-	corvettePlate1965,
-	corvettePlate1973
+	corvettePlate
 ];

@@ -32,65 +32,71 @@ const groups: LineField = {
 	label: 'Option group',
 	optional: true,
 	repeats: true,
-	shape: { chars: ANY, length: [1, 6], whole: true },
+	shape: { chars: ['12345', LETTERS, LETTERS, LETTERS, LETTERS, LETTERS], fewest: 2, whole: true },
 	reads: { by: 'table', table: 'option' }
 };
 
-/** The model year in two figures. */
-export const year = (...years: readonly number[]): LineField => ({
-	name: 'model_year',
-	label: 'Model year',
-	words: ['STYLE', 'ST'],
-	shape: { chars: ['67', years.map((own) => String(own).slice(3)).join('')] },
-	reads: { by: 'year', years: Object.fromEntries(years.map((own) => [String(own % 100), [own]])) }
-});
+/** Numbers by which some plants tracked orders and bodies. */
+const tracking: LineField = {
+	name: 'unknown',
+	label: 'Number of the plant’s own',
+	optional: true,
+	repeats: true,
+	shape: { chars: DIGITS, length: [4, 6], whole: true },
+	reads: { by: 'unknown' }
+};
 
-const division: LineField = {
-	name: 'division',
-	label: 'Division',
-	shape: { chars: ['123467'] },
-	reads: { by: 'table', table: 'division' }
-};
-const body: LineField = {
-	name: 'body_style',
-	label: 'Body style',
-	shape: { chars: [DIGITS, DIGITS] },
-	reads: { by: 'table', table: 'body_style' }
-};
+/** The model year in two figures. */
+export function year(from: number, to: number): LineField {
+	const years = Array.from({ length: to - from + 1 }, (_, index) => from + index);
+	const places = [2, 3].map((place) => [...new Set(years.map((own) => String(own).charAt(place)))]);
+	return {
+		name: 'model_year',
+		label: 'Model year',
+		words: ['STYLE', 'ST'],
+		shape: { chars: places.map((characters) => characters.join('')) },
+		reads: { by: 'year', years: Object.fromEntries(years.map((own) => [String(own % 100), [own]])) }
+	};
+}
+
+const SERIES = { figures: DIGITS, letters: LETTERS, either: ANY } as const;
 
 /**
- * The style number in figures: division, series, body. The series is that of the body and not of the serial number: its
- * last figure does not tell six from eight cylinders, as it does there.
+ * The style number: division, series, body; from 1973 two letters, for the type of body and the series, in place of the
+ * two figures of the series. The series is that of the body and not of the serial number: its last figure does not tell
+ * six from eight cylinders, as it does there. `first` and `second` narrow what may stand for the series.
  */
-export const styleInFigures: readonly LineField[] = [
-	division,
+export const style = (
+	series: keyof typeof SERIES,
+	first: string = SERIES[series],
+	second: string = SERIES[series]
+): readonly LineField[] => [
+	{
+		name: 'division',
+		label: 'Division',
+		shape: { chars: ['123467'] },
+		reads: { by: 'table', table: 'division' }
+	},
 	{
 		name: 'line',
 		label: 'Series',
-		shape: { chars: [DIGITS, DIGITS] },
+		shape: { chars: [first, second] },
 		reads: { by: 'table', table: 'style_number' }
 	},
-	body
-];
-
-/** The style number with letters: division, body type and series, body. */
-export const styleWithLetters: readonly LineField[] = [
-	division,
 	{
-		name: 'line',
-		label: 'Body type and series',
-		shape: { chars: [LETTERS, LETTERS] },
-		reads: { by: 'table', table: 'style_number' }
-	},
-	body
+		name: 'body_style',
+		label: 'Body style',
+		shape: { chars: [DIGITS, DIGITS] },
+		reads: { by: 'table', table: 'body_style' }
+	}
 ];
 
-/** The plant, by its name cut short, and the number that Fisher Body gave the body there. */
+/** The plant, by its name cut short or by its letter, and the number that Fisher Body gave the body there. */
 export const plantAndNumber: readonly LineField[] = [
 	{
 		name: 'assembly_plant',
 		label: 'Plant',
-		shape: { chars: LETTERS, length: [2, 3] },
+		shape: { chars: LETTERS, length: [1, 3] },
 		reads: { by: 'table', table: 'plant_abbreviation' }
 	},
 	{
@@ -164,8 +170,12 @@ export const seat: LineField = {
 	reads: { by: 'table', table: 'option' }
 };
 
-export const timeLine: LineForm = { label: 'Time built', fields: [timeBuilt, options] };
-export const groupLine: LineForm = { label: 'Option groups', optional: true, fields: [groups] };
+export const timeLine: LineForm = { label: 'Time built', fields: [timeBuilt, tracking, options] };
+export const groupLine: LineForm = {
+	label: 'Option groups',
+	optional: true,
+	fields: [tracking, groups]
+};
 export const optionLine: LineForm = { label: 'Options', optional: true, fields: [options] };
 
 /** What all of these tags share. */

@@ -52,12 +52,20 @@ describe('a Fisher body tag beside the serial number', () => {
 
 describe('what a tag holds beyond its form', () => {
 	it('is kept as unknown', () => {
-		const { readings } = readTag('ST 68 24237 PON 12345 BDY 7 / TR 223 GG PNT / 04C 1234567');
+		const { readings } = readTag('04C 1234567 / ST 68 24237 PON 12345 BDY 7 / TR 223 GG PNT');
 		const unknown = readings[0]?.fields.filter(({ name }) => name === 'unknown');
 		expect(unknown?.map(({ code, outcome }) => [code, outcome])).toEqual([
-			['7', 'not_listed'],
-			['1234567', 'not_listed']
+			['1234567', 'not_listed'],
+			['7', 'not_listed']
 		]);
+	});
+
+	it('is read in the order that it has, and the order of the plate is offered', () => {
+		const { readings, problems } = readTag('ST 68 24237 PON 12345 BDY / TR 223 GG PNT / 04C');
+		expect(readings[0]?.fields.find(({ name }) => name === 'build_date')?.code).toBe('04C');
+		expect(problems.flatMap(({ offers }) => offers.map(({ text }) => text))).toContain(
+			'04C / ST 68 24237 PON 12345 BDY / TR 223 GG PNT'
+		);
 	});
 
 	it('reads a top beside the color of the body', () => {

@@ -1,17 +1,18 @@
 /**
- * The body tag of Fisher Body, 1964 to 1967, upright on the firewall: the time built; year and style number, plant and
- * body number; trim and paint; option groups, as letters and figures that differ by plant. The style number of 1964 has
- * four figures, without one for the division; paint has figures or one letter then, a pair of letters from 1965. Rows of
- * table `layout` cite what the two forms rest on.
+ * The body tag of Fisher Body, 1964 to 1968, to 1967 upright on the firewall: the time built; year and style number, plant
+ * and body number; trim and paint; option groups, as letters and figures that differ by plant. The style number of 1964
+ * has four figures, without one for the division; paint has figures or one letter then, a pair of letters from 1965.
+ * Rows of table `layout` cite what the two forms rest on.
  */
 import type { LinedLayout } from '../../engine/lined-layout';
 import { ANY } from './signs';
 import {
 	TAG,
 	groupLine,
+	options,
 	paintInLetters,
 	plantAndNumber,
-	styleInFigures,
+	style,
 	timeLine,
 	trim,
 	year
@@ -25,7 +26,10 @@ export const gmFisherTag1964: LinedLayout = {
 	source: 'From memory',
 	lines: [
 		timeLine,
-		{ label: 'Style line', fields: [year(1964), ...styleInFigures.slice(1), ...plantAndNumber] },
+		{
+			label: 'Style line',
+			fields: [year(1964, 1964), ...style('figures').slice(1), ...plantAndNumber]
+		},
 		{
 			label: 'Trim and paint',
 			fields: [
@@ -49,17 +53,14 @@ export const gmFisherTag1964: LinedLayout = {
 
 export const gmFisherTag1965: LinedLayout = {
 	...TAG,
-	id: 'gm-fisher-tag-1965-1967',
-	title: 'Fisher body tag, General Motors, 1965–67',
-	years: [1965, 1967],
+	id: 'gm-fisher-tag-1965-1968',
+	title: 'Fisher body tag, General Motors, 1965–68',
+	years: [1965, 1968],
 	source: 'Fisher Body plates: Kansas City (macswebs.com), for the Chevelle of 1966 and 1967',
 	lines: [
 		timeLine,
-		{
-			label: 'Style line',
-			fields: [year(1965, 1966, 1967), ...styleInFigures, ...plantAndNumber]
-		},
-		{ label: 'Trim and paint', fields: [trim, paintInLetters] },
+		{ label: 'Style line', fields: [year(1965, 1968), ...style('figures'), ...plantAndNumber] },
+		{ label: 'Trim and paint', fields: [trim, options, paintInLetters] },
 		groupLine
 	],
 	examples: {
