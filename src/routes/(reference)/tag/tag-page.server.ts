@@ -16,11 +16,15 @@ import { doubtsOf, tagLines } from './tag-lines';
 const USUAL_LINES = 4;
 const TAGS = LINED_LAYOUTS.filter(({ kind }) => kind === 'body_tag');
 
-/** The one form that a maker and year leave; null when none or several do. */
+/** The one form that a maker and year leave, those of single cars aside; null when none or several do. */
 function formOf({ maker, year }: ReadContext): LinedLayout | null {
 	const fitting = TAGS.filter(
 		(tag) =>
-			tag.maker === maker && year !== undefined && tag.years[0] <= year && year <= tag.years[1]
+			tag.maker === maker &&
+			tag.divisions === undefined &&
+			year !== undefined &&
+			tag.years[0] <= year &&
+			year <= tag.years[1]
 	);
 	return fitting.length === 1 ? (fitting[0] ?? null) : null;
 }
