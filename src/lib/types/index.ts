@@ -14,5 +14,6 @@ export * from './published';
 export * from './readings';
 export * from './rows';
 export * from './tables';
+export * from './contradictions';
 export * from './tally';
 export * from './values';

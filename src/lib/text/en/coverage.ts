@@ -105,6 +105,11 @@ export const coverageText = {
 			text: 'For the 17-character standard the maker’s own characters, 4 to 8, have no table. Older numbers of other countries are not read.'
 		}
 	],
+	questions: 'Open questions in the tables',
+	questionsNote:
+		'What a look over all rows asks. Sources differ and lists have holes: a question says nothing against a row, and waits for somebody who knows.',
+	questionRow: (n: number): string => `Row ${n}`,
+	moreQuestions: (n: number): string => `And ${n} more.`,
 	complete: {
 		none: 'No table carries a claim of completeness: none of our sources lists every code of its scope, so a code that we lack is “not listed” and never “not used”.',
 		some: (n: number): string =>

@@ -5,6 +5,7 @@ import { admit } from '$lib/server/http';
 import { coverage, current, PUBLISHED_EXAMPLES } from '$lib/server/reference';
 import type { PageServerLoad } from './$types';
 import { coverageByTable } from './by-table';
+import { questionsOf } from './questions';
 
 export const load: PageServerLoad = ({ getClientAddress }) => {
 	admit(getClientAddress());
@@ -14,6 +15,7 @@ export const load: PageServerLoad = ({ getClientAddress }) => {
 		coverage: drawnCoverage(coverage(tables).divisions),
 		makers: coverageByTable(tables),
 		claims: tables.claims.length,
+		questions: questionsOf(tables),
 		examples: PUBLISHED_EXAMPLES,
 		lined: LINED_LAYOUTS.map(({ id, title, years, kind }) => ({
 			id,
