@@ -3,6 +3,8 @@
  * Each line of `serials/*.csv` names its source; misprints and known misses say so and why.
  */
 import { describe, expect, it } from 'vitest';
+import { read } from '../../src/lib/decoder';
+import type { ReadingField } from '../../src/lib/types';
 import { firstReading, released, samples, unmet, type Expectation } from './samples';
 
 const tables = released();
@@ -29,6 +31,29 @@ describe.each(['gm', 'chrysler', 'ford', 'amc'])('published serials of %s', (mak
 				expect(unmet(firstReading(tables, sample), expectation)).not.toEqual([]);
 			}
 		);
+});
+
+describe('a published serial with a slip of the hand', () => {
+	const serials = ['gm', 'chrysler', 'ford', 'amc']
+		.flatMap((maker) => samples(`serials/${maker}.csv`))
+		.map(({ text = '' }) => text)
+		// Masked through and through, as little is left of them as of any code.
+		.filter((text) => !/\s|x{7}/.test(text));
+	const isSequence = ({ name }: ReadingField) => name === 'sequence_number';
+	const slips: readonly (readonly [string, (text: string) => string])[] = [
+		['a character too few', (text) => text.slice(0, -1)],
+		['a Z for a figure', (text) => text.slice(0, 2) + 'Z' + text.slice(3)],
+		['its beginning alone', (text) => text.slice(0, 9)]
+	];
+
+	it.each(slips)('%s, is not cut up as a plate, and still told of as a serial', (_, slip) => {
+		for (const serial of serials) {
+			const { input, readings, problems } = read(tables, { text: slip(serial) });
+			expect([serial, input.kind]).not.toEqual([serial, 'body_tag']);
+			const isSerial = readings.some(({ fields }) => fields.some(isSequence));
+			expect([serial, isSerial || problems.length > 0]).toEqual([serial, true]);
+		}
+	});
 });
 
 describe('the list', () => {

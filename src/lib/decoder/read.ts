@@ -4,7 +4,7 @@ import { readCode } from './code-reading';
 import { readDateAlone } from './date-reading';
 import { normalise, type Characters } from './engine/characters';
 import type { LinedKind, LinedLayout } from './engine/lined-layout';
-import { hasLines } from './engine/lines';
+import { hasLines, isOneToken } from './engine/lines';
 import { textOfFields, type NamedFields } from './engine/named-fields';
 import type { PreparedLayout } from './engine/plan';
 import { foreignLetters } from './engine/problems';
@@ -97,8 +97,22 @@ const SINGLE: Partial<Record<LinedKind, FieldName>> = {
 	engine: 'unit_code',
 	casting: 'casting_number'
 };
+/** Whether a code of the stamp itself has a row, or a part of the car's number: what is only derived from a code does not tell. */
 const tells = (reading: Reading | undefined): boolean =>
-	reading?.fields.some(({ rows }) => rows.length > 0) === true;
+	reading?.fields.some(
+		({ rows, derived_from }) =>
+			rows.length > 0 && (derived_from === undefined || derived_from.includes('partial_serial'))
+	) === true;
+
+/**
+ * Whether a text of no named kind may be such a stamp: half of its fields come to something, of a plate more, since its
+ * short codes can be cut out of nearly anything.
+ */
+function isLikely(kind: LinedKind, reading: Reading | undefined): boolean {
+	const own = (reading?.fields ?? []).filter(({ derived_from }) => derived_from === undefined);
+	const told = own.filter(({ outcome }) => outcome === 'found').length;
+	return tells(reading) && told * 2 > own.length - (kind === 'body_tag' ? 0 : 1);
+}
 
 function asLined(kind: LinedKind, typed: Typed): Read & { readonly whole: boolean } {
 	const lined = readLined(typed.tables, { ...typed, kind });
@@ -134,9 +148,14 @@ function asAny(typed: Typed): Read {
 	const { cells } = characters;
 	const serial = asSerial(typed);
 	if (serial.readings[0]?.state === 'complete') return serial;
-	const parts = (['engine', 'casting', 'body_tag'] as const)
-		.map((kind) => asLined(kind, typed))
-		.filter(({ readings }) => tells(readings[0]));
+	// No plate has all of its codes in one: such a text would be cut up at will.
+	const kinds: readonly LinedKind[] = isOneToken(text)
+		? ['engine', 'casting']
+		: ['engine', 'casting', 'body_tag'];
+	const parts = kinds.flatMap((kind) => {
+		const lined = asLined(kind, typed);
+		return isLikely(kind, lined.readings[0]) ? [lined] : [];
+	});
 	const sure = parts.filter(({ whole }) => whole);
 	const code = cells.length < shortest(layouts) ? asCode(typed) : NO_CODE;
 	const likelyCode = cells.length <= LIKELY_CODE;

@@ -50,6 +50,10 @@ export function tokensOf({ cells, edges }: Line): (readonly [from: number, to: n
 	return tokens;
 }
 
+/** Whether nothing divides a text. */
+export const isOneToken = (text: string): boolean =>
+	linesOf(text, true).lines.every((line) => tokensOf(line).length <= 1);
+
 /** The text of a span of a line, tokens joined by a space. */
 export function spanText({ cells, edges }: Line, from: number, to: number): string {
 	let text = '';
