@@ -25,13 +25,13 @@ const bodyNumber: LineField = {
 const trimAndPaint: LineForm = {
 	label: 'Trim and paint',
 	fields: [
-		{ ...trim, shape: { chars: ANY, length: [2, 4], whole: true } },
+		{ ...trim, shape: { chars: ANY, length: [3, 4], whole: true } },
 		{
 			name: 'paint',
 			label: 'Paint',
 			words: ['PAINT', 'PNT'],
 			wordsAfter: ['PAINT', 'PNT'],
-			shape: { chars: ANY, length: [2, 3] },
+			shape: { chars: [ANY, ANY, DIGITS], fewest: 2 },
 			reads: { by: 'table', table: 'paint' }
 		}
 	]
