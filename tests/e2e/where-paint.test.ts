@@ -11,10 +11,7 @@ describe('where the stamps sit', () => {
 			expect(await page.locator('#maker').inputValue()).toBe('chevrolet');
 			expect(await page.locator('#year').inputValue()).toBe('1969');
 			await expectSound(page, 'where');
-			await page
-				.getByRole('link', { name: /, Firewall|, Cowl/ })
-				.first()
-				.click();
+			await page.getByRole('link', { name: /^\d+, Cowl/ }).press('Enter');
 			expect(await page.locator('li:target').innerText()).toContain('Body tag');
 		});
 	});
@@ -55,6 +52,9 @@ describe('paint codes', () => {
 			async (page) => {
 				const main = await page.locator('main').innerText();
 				expect(main).toContain(paintText.nothing('Lincoln', 1961));
+				await page.goto('/paint?division=Chevrolet&year=1969');
+				const orange = page.getByRole('listitem').filter({ hasText: 'Hugger Orange' }).first();
+				expect(await orange.innerText()).toContain('Monaco Orange');
 				await page.goto('/paint?division=Nobody&year=1970');
 				expect(await page.locator('[aria-invalid="true"]').count()).toBe(1);
 			},

@@ -27,5 +27,8 @@ export const paintText = {
 		by: (name: string): string => `Screen approximation by the name ${name}`,
 		none: 'No color word in the name, so no chip'
 	},
-	open: 'Row and sources'
+	names: (names: number): string => `${counted(names, 'name', 'names')} for one code`,
+	source: (number: number): string => `Source ${number}`,
+	sources: 'Sources of these rows',
+	open: 'Row'
 } as const;

@@ -14,6 +14,8 @@ export const shellText = {
 	],
 	moreNavigation: 'More',
 	more: [
+		{ name: 'Where the stamps sit', address: '/where' },
+		{ name: 'Paint codes', address: '/paint' },
 		{ name: 'Sources', address: '/sources' },
 		{ name: 'Editions', address: '/editions' },
 		{ name: 'Coverage', address: '/coverage' }

@@ -1,27 +1,18 @@
 /** Where stamps, plates and tags sit, by maker and model year. */
 import { counted } from './counts';
 
-/** A place in the drawing of the car. */
-export const CAR_ZONES = [
-	'support',
-	'engine',
-	'fender',
-	'transmission',
-	'firewall',
-	'cowl',
-	'dash',
-	'pillar',
-	'door',
-	'seat',
-	'frame',
-	'axle',
-	'trunk'
-] as const;
-export type CarZone = (typeof CAR_ZONES)[number];
-
-/** A place in the drawing of the engine. */
-export const ENGINE_ZONES = ['front', 'right', 'left', 'top', 'rear'] as const;
-export type EngineZone = (typeof ENGINE_ZONES)[number];
+/** The drawings, and the places that each shows. */
+export const VIEW_ZONES = {
+	car: ['support', 'engine', 'fender', 'transmission', 'seat', 'frame', 'axle', 'trunk'],
+	'engine-front': ['front', 'coil'],
+	'engine-side': ['side-left', 'side-right', 'rail', 'starter'],
+	'engine-top': ['top', 'rear-right', 'rear', 'rear-left'],
+	cowl: ['firewall', 'cowl', 'dash', 'post'],
+	door: ['pillar', 'door', 'lock']
+} as const;
+export type View = keyof typeof VIEW_ZONES;
+export type Zone = (typeof VIEW_ZONES)[View][number];
+export const VIEWS = Object.keys(VIEW_ZONES) as readonly View[];
 
 export const whereText = {
 	title: 'Where the stamps sit',
@@ -39,41 +30,74 @@ export const whereText = {
 	nothing: (maker: string, year: string): string =>
 		`No place is in the tables for ${year === '' ? maker : `${maker} of ${year}`}. That says nothing against a car.`,
 	allYears: 'Show all model years',
-	drawing: {
-		car: (zones: readonly string[]): string =>
-			`A car from above, front to the left. Marked: ${zones.join('; ')}.`,
-		engine: (zones: readonly string[]): string =>
-			`An engine from above, its front to the left, the driver’s side below. Marked: ${zones.join('; ')}.`,
-		carCaption: 'From above, front to the left: the driver’s side is below.',
-		engineCaption: 'The engine from above, its fan to the left.',
-		generic: 'One drawing for all of a maker’s cars: the words beside it decide.'
-	},
+	drawing: (view: string, marked: readonly string[]): string =>
+		`${view}: a drawing. Marked: ${marked.join('; ')}.`,
+	numbers: (first: number, last: number): string =>
+		first === last ? String(first) : `${first}–${last}`,
+	/** Numbers that a further drawing shows. */
+	pointer: (numbers: string, view: string): string =>
+		`${numbers}, in the drawings further down: ${view}`,
+	views: {
+		car: {
+			heading: 'The car',
+			caption: 'From the driver’s side, in the shape of its years and of no particular make.'
+		},
+		'engine-front': {
+			heading: 'Engine, from the front',
+			caption: 'Seen from before the car: the passenger’s side is at the left.'
+		},
+		'engine-side': {
+			heading: 'Engine, from the side',
+			caption: 'One drawing for both sides, fan to the left: the words say which side.'
+		},
+		'engine-top': {
+			heading: 'Engine, from above',
+			caption: 'Fan to the left: the passenger’s side is above.'
+		},
+		cowl: {
+			heading: 'Cowl and windshield',
+			caption: 'Over the engine, from the front: the driver’s side is at the right.'
+		},
+		door: {
+			heading: 'Driver’s door, open',
+			caption: 'Hinge pillar, end of the door and lock pillar; the front is at the left.'
+		}
+	} satisfies Record<View, { heading: string; caption: string }>,
+	onward: 'Follow the numbers to the drawings below.',
+	generic: 'Drawings show the kind of place. Where words and drawing differ, the words hold.',
 	zones: {
 		support: 'Radiator support',
 		engine: 'Engine',
 		fender: 'Inner fender',
 		transmission: 'Transmission',
-		firewall: 'Firewall',
-		cowl: 'Cowl',
-		dash: 'Dash top, at the windshield',
-		pillar: 'Front door pillar',
-		door: 'Door and its lock pillar',
 		seat: 'Under seats and trim',
 		frame: 'Frame',
 		axle: 'Rear axle',
-		trunk: 'Trunk'
-	} satisfies Record<CarZone, string>,
-	engineZones: {
-		front: 'Engine, front',
-		right: 'Engine, passenger’s side',
-		left: 'Engine, driver’s side',
-		top: 'Engine, heads and intake',
-		rear: 'Engine, rear of the block'
-	} satisfies Record<EngineZone, string>,
-	unplaced: 'Not in the drawing',
+		trunk: 'Trunk',
+		front: 'Pad at the front',
+		coil: 'At the coil',
+		'side-left': 'Driver’s side',
+		'side-right': 'Passenger’s side',
+		rail: 'Oil-pan rail',
+		starter: 'Above the starter',
+		top: 'Heads, deck, intake',
+		'rear-right': 'Rear, passenger’s side',
+		rear: 'Rear of the block',
+		'rear-left': 'Rear, driver’s side',
+		firewall: 'Firewall',
+		cowl: 'Cowl',
+		dash: 'Dash top',
+		post: 'Windshield post',
+		pillar: 'Hinge pillar',
+		door: 'Door',
+		lock: 'Lock pillar'
+	} satisfies Record<Zone, string>,
+	unplaced: 'Without a place in the drawings',
+	unplacedNote: 'Their words name no one place that is drawn.',
 	law: 'By federal rule',
 	lawNote: 'For cars of any maker, under the rules named; years stand in the rows.',
-	row: 'Row and sources',
+	row: 'Row',
+	sources: (more: number): string => (more === 0 ? '' : `and ${more} more`),
 	help: 'How to read a plate without harm',
 
 	cautions: {

@@ -1,10 +1,11 @@
 /** What the page of paint codes shows for an address. */
 import { readyOptions } from '$lib/components/form/ready-options';
 import { compareRows, type CompiledRow, type TableSet } from '$lib/decoder';
-import { rowAddress } from '$lib/format/addresses';
+import { rowAddress, sourceAddress } from '$lib/format/addresses';
 import { chipTones } from '$lib/format/paint-chip';
 import { scopeWords } from '$lib/format/scope';
 import { swatchOf } from '$lib/format/values';
+import { yearSpan } from '$lib/format/years';
 import { current, searchRows, tableOf } from '$lib/server/reference';
 import { paintText as text } from '$lib/text/en/paint';
 import { DIVISIONS, MAKER_NAMES, MAKERS, type Maker } from '$lib/types';
@@ -52,28 +53,60 @@ function makesOf(tables: TableSet): readonly PaintMake[] {
 	return makes;
 }
 
-/** Rows of one code: several names where lines of cars differ, or sources do. */
-function chipsOf(rows: readonly CompiledRow[]) {
-	const byCode = new Map<string, CompiledRow[]>();
-	for (const row of rows) byCode.set(row.code, [...(byCode.get(row.code) ?? []), row]);
+/** The works that rows rest on, in the order of the rows, each once. */
+function sourcesOf(rows: readonly CompiledRow[]) {
+	const titles = new Map(
+		rows.flatMap(({ sources }) => sources.map(({ key, title }) => [key, title]))
+	);
+	return [...titles].map(([key, title], index) => ({
+		key,
+		title,
+		number: index + 1,
+		address: sourceAddress(key)
+	}));
+}
+
+/** Where a row holds, when that is less than the make. */
+const narrowed = (row: CompiledRow): string =>
+	row.line.length + row.body.length + row.plant.length + row.market.length === 0
+		? ''
+		: scopeWords({ ...row, division: [row.division[0] ?? MAKER_NAMES[row.maker]] })
+				.split('; ')
+				.slice(1)
+				.join('; ');
+
+/** In the order in which the keys first come. */
+function grouped(
+	rows: readonly CompiledRow[],
+	keyOf: (row: CompiledRow) => string
+): Map<string, CompiledRow[]> {
+	const groups = new Map<string, CompiledRow[]>();
+	for (const row of rows) {
+		const own = groups.get(keyOf(row));
+		if (own === undefined) groups.set(keyOf(row), [row]);
+		else own.push(row);
+	}
+	return groups;
+}
+
+/** Rows in the order of the codes, and under each code by name: one chip for each name that a code had. */
+function chipsOf(rows: readonly CompiledRow[], sources: ReturnType<typeof sourcesOf>) {
+	const byCode = grouped(rows, ({ code }) => code);
 	return [...byCode].map(([code, own]) => ({
 		code,
-		names: own.map((row) => {
-			const measured = swatchOf(row.values);
+		names: [...grouped(own, ({ meaning }) => meaning)].map(([name, named]) => {
+			const measured = named.map(({ values }) => swatchOf(values)).find((hex) => hex !== null);
 			return {
-				key: row.row_key,
-				name: row.meaning,
-				tones: measured === null ? chipTones(row.meaning) : [measured],
-				/** Where it holds, when that is less than the make. */
-				scope:
-					row.line.length + row.body.length + row.plant.length + row.market.length === 0
-						? ''
-						: scopeWords({ ...row, division: [row.division[0] ?? MAKER_NAMES[row.maker]] })
-								.split('; ')
-								.slice(1)
-								.join('; '),
-				strength: row.strength,
-				address: rowAddress(row.row_key)
+				name,
+				tones: measured === undefined ? chipTones(name) : [measured],
+				rows: named.map((row) => ({
+					key: row.row_key,
+					scope: narrowed(row),
+					years: yearSpan(row.years_from, row.years_to),
+					strength: row.strength,
+					sources: sources.filter(({ key }) => row.sources.some((cited) => cited.key === key)),
+					address: rowAddress(row.row_key)
+				}))
 			};
 		})
 	}));
@@ -92,19 +125,18 @@ export function paintPage(parameters: URLSearchParams) {
 		...makes.map(({ division }) => ({ value: division, label: division }))
 	];
 	const isListed = asked.division === '' || make !== undefined;
-	const chips =
+	const rows =
 		make === undefined || year === undefined
-			? null
-			: chipsOf(
-					[
-						...searchRows(tables, '', {
-							table: 'paint',
-							...(filters.maker && { maker: filters.maker }),
-							division: make.division,
-							year
-						}).items
-					].sort(compareRows)
-				);
+			? []
+			: [
+					...searchRows(tables, '', {
+						table: 'paint',
+						...(filters.maker && { maker: filters.maker }),
+						division: make.division,
+						year
+					}).items
+				].sort(compareRows);
+	const sources = sourcesOf(rows);
 	return {
 		edition: head.number,
 		form: {
@@ -120,12 +152,13 @@ export function paintPage(parameters: URLSearchParams) {
 					: [...faults, { field: 'division' as const, message: text.noMake(asked.division) }]
 		},
 		shown:
-			make === undefined || year === undefined || chips === null
+			make === undefined || year === undefined
 				? null
 				: {
 						heading: text.heading(make.division, year),
 						nothing: text.nothing(make.division, year),
-						chips,
+						chips: chipsOf(rows, sources),
+						sources,
 						table: `/tables?table=paint&division=${encodeURIComponent(make.division)}&year=${year}#find`
 					},
 		makes: (make === undefined ? makes : [make]).map((one) => ({

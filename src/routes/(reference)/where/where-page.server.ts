@@ -1,53 +1,53 @@
 /** What the page of places shows for an address. */
 import type { CompiledRow } from '$lib/decoder';
-import { rowAddress } from '$lib/format/addresses';
+import { rowAddress, sourceAddress } from '$lib/format/addresses';
+import { citedAt } from '$lib/format/row-lines';
 import { scopeWords } from '$lib/format/scope';
 import { yearSpan } from '$lib/format/years';
 import { readContext } from '$lib/server/readings';
 import { current, searchRows } from '$lib/server/reference';
-import { whereText as text, type EngineZone } from '$lib/text/en/where';
+import { VIEW_ZONES, VIEWS, whereText as text, type Zone } from '$lib/text/en/where';
 import { MAKER_NAMES, type FieldError, type Maker, type ReadContext } from '$lib/types';
 import { corporationOf, makerChoice, makerOptions, yearOptions } from '../reading/choices';
-import { zoneOf, ZONES, type Zone } from './zones';
-
-const placeView = (row: CompiledRow) => ({
-	key: row.row_key,
-	part: capital(String(row.values['part'])),
-	where: row.meaning,
-	note: row.note,
-	scope: scopeWords(row),
-	years: yearSpan(row.years_from, row.years_to),
-	strength: row.strength,
-	address: rowAddress(row.row_key)
-});
-export type PlaceView = ReturnType<typeof placeView>;
+import { eraOf } from './drawings';
+import { zoneOf, ZONES } from './zones';
 
 const capital = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}`;
 
-/** "Dash top, at the windshield"; "Engine, front". */
-export const zoneName = (zone: Zone): string =>
-	zone.startsWith('engine-')
-		? text.engineZones[zone.slice('engine-'.length) as EngineZone]
-		: text.zones[zone as keyof typeof text.zones];
-
-/** Places in the order of the drawing, numbered from 1; what has no place in it stands last, without a number. */
-function groupsOf(rows: readonly CompiledRow[]) {
-	const zones = rows.map((row) => zoneOf(String(row.values['part']), row.meaning));
-	const of = (zone: Zone | null) => rows.filter((_, index) => zones[index] === zone).map(placeView);
-	const placed = ZONES.map((zone) => ({ zone, places: of(zone) })).filter(
-		({ places }) => places.length > 0
-	);
+function placeView(row: CompiledRow) {
+	const [source] = row.sources;
 	return {
-		groups: placed.map(({ zone, places }, index) => ({
-			zone,
-			number: index + 1,
-			name: zoneName(zone),
-			places
-		})),
-		unplaced: of(null)
+		key: row.row_key,
+		part: capital(String(row.values['part'])),
+		where: row.meaning,
+		note: row.note,
+		scope: scopeWords(row),
+		years: yearSpan(row.years_from, row.years_to),
+		strength: row.strength,
+		source: source && { title: citedAt(source), address: sourceAddress(source.key) },
+		more: text.sources(Math.max(0, row.sources.length - 1)),
+		address: rowAddress(row.row_key)
 	};
 }
-export type PlaceGroup = ReturnType<typeof groupsOf>['groups'][number];
+export type PlaceView = ReturnType<typeof placeView>;
+
+/** Rows by place, numbered from 1 in the order of the drawings. */
+function groupsOf(rows: readonly CompiledRow[], zones: readonly (Zone | null)[]) {
+	return ZONES.filter((zone) => zones.includes(zone)).map((zone, index) => ({
+		zone,
+		number: index + 1,
+		name: text.zones[zone],
+		places: rows.filter((_, at) => zones[at] === zone).map(placeView)
+	}));
+}
+export type PlaceGroup = ReturnType<typeof groupsOf>[number];
+/** Drawings with something to mark, each with its places; the car comes first and points to the others. */
+const viewsOf = (groups: readonly PlaceGroup[]) =>
+	VIEWS.map((view) => {
+		const shown: readonly Zone[] = VIEW_ZONES[view];
+		return { view, groups: groups.filter(({ zone }) => shown.includes(zone)) };
+	}).filter(({ view, groups }) => view === 'car' || groups.length > 0);
+export type PlaceViewGroup = ReturnType<typeof viewsOf>[number];
 
 const rowsOf = (maker: Maker, { division, year }: ReadContext): readonly CompiledRow[] =>
 	searchRows(current().tables, '', {
@@ -72,6 +72,7 @@ export function wherePage(parameters: URLSearchParams, now: Date) {
 	const rows = maker === undefined ? [] : rowsOf(maker, context);
 	const name = context.division ?? (maker === undefined ? '' : MAKER_NAMES[maker]);
 	const year = context.year === undefined ? '' : String(context.year);
+	const zones = rows.map((row) => zoneOf(String(row.values['part']), row.meaning));
 	return {
 		edition: current().head.number,
 		form: {
@@ -89,7 +90,9 @@ export function wherePage(parameters: URLSearchParams, now: Date) {
 						count: rows.length,
 						nothing: text.nothing(name, year),
 						allYears: year === '' ? null : `/where?maker=${encodeURIComponent(asked.maker)}`,
-						...groupsOf(rows)
+						era: eraOf(context.year),
+						views: zones.some(Boolean) ? viewsOf(groupsOf(rows, zones)) : [],
+						unplaced: rows.filter((_, index) => zones[index] === null).map(placeView)
 					},
 		law: rowsOf('other', {}).map(placeView)
 	};

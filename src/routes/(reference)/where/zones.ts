@@ -1,16 +1,18 @@
 /** Which place of the drawings a row speaks of, by its words. */
-import { CAR_ZONES, ENGINE_ZONES, type CarZone, type EngineZone } from '$lib/text/en/where';
+import { VIEW_ZONES, VIEWS, type View, type Zone } from '$lib/text/en/where';
 
-export type Zone = CarZone | `engine-${EngineZone}`;
+/** In the order in which they are numbered: drawing by drawing. */
+export const ZONES: readonly Zone[] = VIEWS.flatMap((view): readonly Zone[] => VIEW_ZONES[view]);
 
-/** In the order in which they stand in lists: along the car, from the front. */
-export const ZONES: readonly Zone[] = CAR_ZONES.flatMap((zone): Zone[] =>
-	zone === 'engine' ? ['engine', ...ENGINE_ZONES.map((own) => `engine-${own}` as const)] : [zone]
+const VIEW_OF = new Map<Zone, View>(
+	VIEWS.flatMap((view) => VIEW_ZONES[view].map((zone: Zone) => [zone, view] as const))
 );
+/** The drawing that shows a place. @example viewOf('lock') // 'door' */
+export const viewOf = (zone: Zone): View => VIEW_OF.get(zone) ?? 'car';
 
 const ENGINE_PART = /\b(engine|block|head|casting date|casting number|part number)\b/;
 const ON_ENGINE = /\b(cylinder|engine) block\b/;
-const CAR: readonly (readonly [RegExp, CarZone])[] = [
+const CAR: readonly (readonly [RegExp, Zone])[] = [
 	[/radiator support/, 'support'],
 	[/trunk/, 'trunk'],
 	[/seat springs|glove box/, 'seat'],
@@ -19,27 +21,44 @@ const CAR: readonly (readonly [RegExp, CarZone])[] = [
 	[/fender/, 'fender'],
 	[/firewall/, 'firewall'],
 	[/\bframe\b/, 'frame'],
-	[/instrument panel|\bdash\b|windshield (?:post|support|pillar)|left pillar/, 'dash'],
-	[/lock pillar|\bdoor\b(?! pillar)/, 'door'],
-	[/(?<!lock )(?<!windshield )(?<!the left )pillar|hinge/, 'pillar'],
+	[/windshield (?:post|support)/, 'post'],
+	[/instrument panel|\bdash\b|left windshield pillar|left pillar/, 'dash'],
+	[/lock pillar/, 'lock'],
+	[/\bdoor\b(?! pillar| jamb)/, 'door'],
+	[/(?<!lock )(?<!windshield )(?<!the left )pillar|hinge|door jamb/, 'pillar'],
 	[/cowl/, 'cowl']
 ];
-const ENGINE: readonly (readonly [RegExp, EngineZone])[] = [
-	[/rear of the (?!engine mount)|at the rear|bell ?housing|rear upper/, 'rear'],
-	[/front|water pump|timing cover|coil/, 'front'],
+const REAR = /rear of the (?!engine mount)|at the rear|bell ?housing|rear upper/;
+const ENGINE: readonly (readonly [RegExp, Zone])[] = [
+	[/oil.pan rail/, 'rail'],
+	[/starter/, 'starter'],
+	[/coil/, 'coil'],
+	[/front|water pump|timing cover/, 'front'],
 	[/rocker|valve cover|intake|\bdeck\b/, 'top'],
-	[/oil.pan rail|right side|passenger side|oil filter/, 'right'],
-	[/left corner|driver.s side/, 'left']
+	[/right side|passenger side|oil filter|on the side of the block/, 'side-right'],
+	[/left corner|driver.s side/, 'side-left']
 ];
 /** Words that name as many places as this are a list of parts, and no one place. */
 const MANY = 4;
 
 /** The zone that is named first; none where nearly all are. */
-function carZone(words: string): CarZone | null {
+function carZone(words: string): Zone | null {
 	const named = CAR.map(([pattern, zone]) => ({ at: words.search(pattern), zone }))
 		.filter(({ at }) => at >= 0)
 		.sort((a, b) => a.at - b.at);
 	return named.length >= MANY ? null : (named[0]?.zone ?? null);
+}
+
+/** The rear of a block has two flanks; the one that is named first counts. */
+function rearZone(words: string): Zone {
+	const side = /\b(left|driver|right|passenger)\b/.exec(words)?.[1];
+	if (side === undefined) return 'rear';
+	return side === 'left' || side === 'driver' ? 'rear-left' : 'rear-right';
+}
+
+function engineZone(words: string): Zone {
+	if (REAR.test(words) && !/starter/.test(words)) return rearZone(words);
+	return ENGINE.find(([pattern]) => pattern.test(words))?.[1] ?? 'engine';
 }
 
 /**
@@ -48,9 +67,6 @@ function carZone(words: string): CarZone | null {
  */
 export function zoneOf(part: string, where: string): Zone | null {
 	const [stamped, words] = [part.toLowerCase(), where.toLowerCase()];
-	if (ENGINE_PART.test(stamped) || ON_ENGINE.test(words)) {
-		const place = ENGINE.find(([pattern]) => pattern.test(words))?.[1];
-		return place === undefined ? 'engine' : `engine-${place}`;
-	}
+	if (ENGINE_PART.test(stamped) || ON_ENGINE.test(words)) return engineZone(words);
 	return carZone(words) ?? carZone(stamped);
 }
