@@ -112,6 +112,8 @@ function chipsOf(rows: readonly CompiledRow[], sources: ReturnType<typeof source
 	}));
 }
 
+export type CodeChips = ReturnType<typeof chipsOf>[number];
+
 /** The page: the form, and either the chips of a make and year or the years that have some. */
 export function paintPage(parameters: URLSearchParams) {
 	const { asked, filters, faults } = readFilters(parameters);

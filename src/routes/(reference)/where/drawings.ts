@@ -8,6 +8,8 @@ type Point = readonly [x: number, y: number];
 export interface Mark {
 	readonly spot: Point;
 	readonly number: Point;
+	/** The pad, plate or tag itself, filled; only where a row speaks of it. Empty for none. */
+	readonly face: string;
 }
 export interface Drawing {
 	readonly width: number;
@@ -18,8 +20,6 @@ export interface Drawing {
 	readonly outline: string;
 	readonly seen: string;
 	readonly hidden: string;
-	/** Machined or plated faces that carry the stamp, filled. */
-	readonly faces: string;
 	readonly marks: Readonly<Partial<Record<Zone, Mark>>>;
 }
 
@@ -28,7 +28,7 @@ export type Era = 'early' | 'middle' | 'late';
 
 const circle = (x: number, y: number, r: number): string =>
 	`M${x - r} ${y}a${r} ${r} 0 1 0 ${2 * r} 0a${r} ${r} 0 1 0 ${-2 * r} 0`;
-const mark = (spot: Point, number: Point): Mark => ({ spot, number });
+const mark = (spot: Point, number: Point, face = ''): Mark => ({ spot, number, face });
 
 /** The shape of the years until 1964, until 1973 and after; the one between where the year is not known. */
 export function eraOf(year: number | undefined): Era {
@@ -74,7 +74,6 @@ export function carDrawing(era: Era): Drawing {
 		outline,
 		seen: `${seen}${WHEELS}M8 185H568`,
 		hidden: WITHIN,
-		faces: '',
 		marks: {
 			support: onCar(74, 112, [26, ABOVE]),
 			engine: onCar(126, 118, [76, ABOVE]),
@@ -101,10 +100,9 @@ const engineFront: Drawing = {
 		'M152 224L140 168L96 122L140 84L186 130H214L260 84L304 122L260 168L248 224ZM96 122L74 98L118 60L140 84ZM304 122L326 98L282 60L260 84Z',
 	seen: `M74 98L58 82C70 62 84 50 102 44L118 60M326 98L342 82C330 62 316 50 298 44L282 60M140 84L160 68H240L260 84M172 68V46H228V68M126 46V26H274V46ZM166 146H234L242 224H158ZM148 224H252L240 256H160Z${circle(200, 206, 26)}${circle(200, 206, 7)}${circle(200, 150, 19)}${circle(200, 150, 6)}M276 112L292 126M124 112L108 126`,
 	hidden: `${circle(200, 150, 62)}`,
-	faces: 'M118 102L138 85L147 94L127 112ZM246 76L258 74V92H246Z',
 	marks: {
-		front: mark([132, 98], [42, 146]),
-		coil: mark([252, 83], [358, 146])
+		front: mark([132, 98], [42, 146], 'M118 102L138 85L147 94L127 112Z'),
+		coil: mark([252, 83], [358, 146], 'M246 76L258 74V92H246Z')
 	}
 };
 const engineSide: Drawing = {
@@ -113,12 +111,11 @@ const engineSide: Drawing = {
 	outline: 'M96 110H304V182H96ZM88 76H302V110H88ZM304 100L346 82V202L304 194Z',
 	seen: `M88 76L98 52H290L302 76M96 118H80V176H96M72 140H80M104 182H312L304 194H246L236 226H142L124 194H104ZM164 52V36H236V52M138 36V20H262V36Z${[146, 200, 254].map((x) => circle(x, 148, 9)).join('')}${[116, 164, 212, 260].map((x) => `M${x} 84H${x + 22}V102H${x}Z`).join('')}M250 186H330V204H250Z`,
 	hidden: 'M62 84V196M70 92V188',
-	faces: 'M100 110H124V122H100ZM184 118H216V132H184ZM262 174H292V182H262Z',
 	marks: {
-		'side-left': mark([112, 116], [30, 60]),
-		'side-right': mark([200, 125], [30, 112]),
+		'side-left': mark([112, 116], [30, 60], 'M100 110H124V122H100Z'),
+		'side-right': mark([200, 125], [30, 112], 'M184 118H216V132H184Z'),
 		starter: mark([296, 166], [374, 128]),
-		rail: mark([277, 178], [330, 232])
+		rail: mark([277, 178], [330, 232], 'M262 174H292V182H262Z')
 	}
 };
 const engineTop: Drawing = {
@@ -127,12 +124,11 @@ const engineTop: Drawing = {
 	outline: 'M78 66H318V170H78ZM318 54L336 48V188L318 182Z',
 	seen: `M92 36H306V70H92ZM92 166H306V200H92ZM78 78L62 88V148L78 158M62 118H44M336 64L366 88V148L336 172M110 78H294V158H110Z${circle(200, 118, 38)}${circle(200, 118, 6)}`,
 	hidden: 'M44 62V174M126 78V158M158 70V166M242 70V166M276 78V158',
-	faces: 'M320 62H334V80H320ZM320 156H334V174H320ZM320 110H334V126H320Z',
 	marks: {
 		top: mark([262, 92], [262, 18]),
-		'rear-right': mark([327, 71], [372, 40]),
-		rear: mark([327, 118], [386, 118]),
-		'rear-left': mark([327, 165], [372, 200])
+		'rear-right': mark([327, 71], [372, 40], 'M320 62H334V80H320Z'),
+		rear: mark([327, 118], [386, 118], 'M320 110H334V126H320Z'),
+		'rear-left': mark([327, 165], [372, 200], 'M320 156H334V174H320Z')
 	}
 };
 /** From over the engine, so that the driver's side is at the right. */
@@ -143,12 +139,11 @@ const cowl: Drawing = {
 		'M52 34C140 22 260 22 348 34L380 118C270 106 130 106 20 118ZM20 124C130 112 270 112 380 124L364 160H36ZM44 160H356V244H250C240 222 160 222 150 244H44Z',
 	seen: `M64 46C146 35 254 35 336 46M88 128H176M224 128H312M84 136H172M228 136H316M136 118L208 96M262 116L330 88${circle(300, 200, 23)}${circle(300, 200, 9)}M78 178H150V226H78ZM90 190H138V214H90ZM226 176H250V190H226Z`,
 	hidden: 'M32 100C130 88 270 88 368 100M250 94C252 62 318 60 330 96M286 74V92',
-	faces: 'M322 98L352 101L354 108L322 105ZM180 140H220V152H180ZM174 174H212V188H174Z',
 	marks: {
 		post: mark([362, 72], [380, 32]),
-		dash: mark([338, 103], [300, 52]),
-		cowl: mark([200, 146], [96, 84]),
-		firewall: mark([193, 181], [200, 262])
+		dash: mark([338, 103], [300, 52], 'M322 98L352 101L354 108L322 105Z'),
+		cowl: mark([200, 146], [96, 84], 'M180 140H220V152H180Z'),
+		firewall: mark([193, 181], [200, 262], 'M174 174H212V188H174Z')
 	}
 };
 /** The driver's door open, seen from outside: front to the left. */
@@ -159,11 +154,10 @@ const door: Drawing = {
 		'M170 84L204 30H326L340 84V236H170ZM152 84H170V236H152ZM170 84L54 70V254L152 232M54 70L34 66V252L54 254',
 	seen: 'M322 34V228H182V88L210 40H322M346 30L372 96V228H340M152 108H166V124H152ZM152 192H166V208H152ZM54 70L70 20L156 54L170 84M66 72L78 34L148 60L158 80M72 154L136 150V164L72 172ZM84 118L108 116V124L84 126ZM38 144H50V164H38ZM324 140H336V156H324ZM204 226C204 190 212 178 236 176L250 118C256 108 280 108 282 120V226',
 	hidden: 'M182 104C196 104 206 110 212 122',
-	faces: 'M37 90H51V126H37ZM155 136H167V166H155ZM325 96H337V126H325Z',
 	marks: {
-		pillar: mark([161, 151], [216, 66]),
-		door: mark([44, 108], [20, 40]),
-		lock: mark([331, 111], [384, 66])
+		pillar: mark([161, 151], [216, 66], 'M155 136H167V166H155Z'),
+		door: mark([44, 108], [20, 40], 'M37 90H51V126H37Z'),
+		lock: mark([331, 111], [384, 66], 'M325 96H337V126H325Z')
 	}
 };
 
