@@ -15,5 +15,6 @@ export * from './readings';
 export * from './rows';
 export * from './tables';
 export * from './contradictions';
+export * from './corrections';
 export * from './tally';
 export * from './values';
