@@ -8,7 +8,7 @@ export {
 	VALUES as CHECK_DIGIT_VALUES,
 	WEIGHTS as CHECK_DIGIT_WEIGHTS
 } from './engine/check-digit';
-export { compareRows, overlaps, saysTheSame } from './engine/compare';
+export { compareRows, overlaps, sameContent, saysTheSame } from './engine/compare';
 export { compile, compileInSteps } from './engine/compile';
 export { scopeText } from './engine/field';
 export type { Layout } from './engine/layout';
