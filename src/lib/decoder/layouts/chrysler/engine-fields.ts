@@ -1,6 +1,6 @@
 /** Fields that several forms of this maker's engine stamps share. */
 import type { LineField } from '../../engine/lined-layout';
-import { ANY, DIGITS } from './signs';
+import { ANY, DIGITS, LETTERS } from './signs';
 
 /** The size in cubic inches, by which the stamp names the engine. */
 export const displacement: LineField = {
@@ -27,6 +27,15 @@ export const marks: readonly LineField[] = [
 		reads: { by: 'table', table: 'unit_code' }
 	}
 ];
+
+/** A letter that may follow the size; what it says is not known. */
+export const letterAfterSize: LineField = {
+	name: 'option',
+	label: 'Letter after the size',
+	optional: true,
+	shape: { chars: LETTERS, length: 1 },
+	reads: { by: 'unknown' }
+};
 
 /** Month and day of assembly, without a year. */
 export const assembled: LineField = {

@@ -1,10 +1,11 @@
 /**
  * The assembly stamp of later engines of Chrysler Corporation: the figure of the model year, the letter of the engine plant,
- * cubic inches, month and day, with HP and other marks. From memory; row `chrysler-engine-pad-figure` of table `layout`
- * says so.
+ * cubic inches, at times a letter, month and day, with HP and other marks.
+ * Source: For C Bodies Only, a 440 of 1977 that reads 7T440T; row `chrysler-engine-pad-figure` of table `layout` cites
+ * all, and says what rests on memory.
  */
 import type { LinedLayout } from '../../engine/lined-layout';
-import { assembled, displacement, marks, partOfSerial } from './engine-fields';
+import { assembled, displacement, letterAfterSize, marks, partOfSerial } from './engine-fields';
 
 const [FIRST, LAST] = [1973, 1980] as const;
 const years = Object.fromEntries(
@@ -20,7 +21,7 @@ export const chryslerEnginePadFigure: LinedLayout = {
 	maker: 'chrysler',
 	title: 'Engine pad, Chrysler Corporation, 1973–80',
 	years: [FIRST, LAST],
-	source: 'From memory',
+	source: 'Odd 440 block (For C Bodies Only), for 7T440T',
 	order: 'down',
 	lines: [
 		{
@@ -39,6 +40,7 @@ export const chryslerEnginePadFigure: LinedLayout = {
 					reads: { by: 'table', table: 'engine_plant' }
 				},
 				displacement,
+				letterAfterSize,
 				...marks,
 				assembled,
 				...marks,

@@ -6,8 +6,7 @@
  * `chrysler-engine-serial` of table `layout` says.
  */
 import type { LinedLayout } from '../../engine/lined-layout';
-import { dayCount, displacement, partOfSerial, unitOfDay } from './engine-fields';
-import { LETTERS } from './signs';
+import { dayCount, displacement, letterAfterSize, partOfSerial, unitOfDay } from './engine-fields';
 
 export const chryslerEngineSerial: LinedLayout = {
 	id: 'chrysler-engine-serial',
@@ -28,13 +27,7 @@ export const chryslerEngineSerial: LinedLayout = {
 					reads: { by: 'table', table: 'engine_plant' }
 				},
 				displacement,
-				{
-					name: 'option',
-					label: 'Letter after the size',
-					optional: true,
-					shape: { chars: LETTERS, length: 1 },
-					reads: { by: 'unknown' }
-				},
+				letterAfterSize,
 				dayCount,
 				unitOfDay,
 				{ ...partOfSerial, optional: true }

@@ -6,6 +6,7 @@
  * registry, the rest on memory. Lynch Road and some other plants differ in 1969.
  */
 import type { LinedLayout } from '../../engine/lined-layout';
+import { trim } from './tag-fields';
 import { ANY, DIGITS, FIRST_OF_DAY, LETTERS, MONTHS } from './signs';
 
 const SERIALS = ['chrysler-1966-1980'] as const;
@@ -16,6 +17,20 @@ const option = {
 	repeats: true,
 	shape: { chars: [LETTERS, DIGITS, DIGITS], whole: true },
 	reads: { by: 'table', table: 'option' }
+} as const;
+/** Axle codes stand among the options, in their order. */
+const axle = {
+	...option,
+	name: 'axle',
+	label: 'Axle',
+	shape: { chars: ['D', '59', DIGITS], whole: true },
+	reads: { by: 'table', table: 'axle' }
+} as const;
+const stripe = {
+	...option,
+	label: 'Stripe',
+	shape: { chars: ['V', '5689', ANY], whole: true },
+	reads: { by: 'table', table: 'stripe' }
 } as const;
 
 export const chryslerFenderTag1969: LinedLayout = {
@@ -67,17 +82,20 @@ export const chryslerFenderTag1969: LinedLayout = {
 					shape: { chars: ANY, length: [2, 3], whole: true },
 					reads: { by: 'table', table: 'paint' }
 				},
+				trim({ chars: ANY, length: [3, 4], whole: true }),
 				{
-					name: 'trim',
-					label: 'Trim',
-					shape: { chars: ANY, length: [3, 4], whole: true },
-					reads: { by: 'table', table: 'trim' }
+					name: 'paint_upper',
+					label: 'Upper door frame',
+					optional: true,
+					shape: { chars: ['0', '0', '0'], whole: true },
+					reads: { by: 'table', table: 'tag_field' }
 				},
 				{
 					name: 'paint_upper',
 					label: 'Upper door frame',
-					shape: { chars: ANY, length: 3, whole: true },
-					reads: { by: 'table', table: 'tag_field' }
+					optional: true,
+					shape: { chars: ANY, length: [2, 3], whole: true },
+					reads: { by: 'table', table: 'paint' }
 				},
 				{
 					name: 'build_date',
@@ -99,6 +117,8 @@ export const chryslerFenderTag1969: LinedLayout = {
 			repeats: true,
 			fields: [
 				option,
+				axle,
+				option,
 				{
 					name: 'roof',
 					label: 'Roof',
@@ -106,6 +126,7 @@ export const chryslerFenderTag1969: LinedLayout = {
 					shape: { chars: ['V', '13', LETTERS], whole: true },
 					reads: { by: 'table', table: 'roof' }
 				},
+				stripe,
 				option,
 				{
 					name: 'option',

@@ -4,7 +4,7 @@ import { chryslerCastingStamp } from './casting';
 import { chryslerEnginePad } from './engine-pad';
 import { chryslerEnginePadFigure } from './engine-pad-figure';
 import { chryslerEngineSerial } from './engine-serial';
-import { chryslerFenderTag1968 } from './fender-tag-1968';
+import { chryslerFenderTag1967, chryslerFenderTag1968 } from './fender-tag-1967-1968';
 import { chryslerFenderTag1969 } from './fender-tag-1969-1974';
 import { chryslerPartialSerial } from './partial-serial';
 import { chryslerAutomaticStamp, chryslerFourSpeedStamp } from './transmission-stamps';
@@ -12,6 +12,7 @@ import { chryslerAutomaticStamp, chryslerFourSpeedStamp } from './transmission-s
 export const CHRYSLER_LINED: readonly LinedLayout[] = [
 	chryslerFenderTag1969,
 	chryslerFenderTag1968,
+	chryslerFenderTag1967,
 	chryslerEnginePad,
 	chryslerEnginePadFigure,
 	chryslerEngineSerial,
