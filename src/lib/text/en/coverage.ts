@@ -93,8 +93,12 @@ export const coverageText = {
 			text: 'No tables.'
 		},
 		{
-			title: 'Body tags of other makers',
-			text: 'Whole tags are read for Chrysler Corporation of 1968 to 1974. The codes of the others stand in the tables and can be looked up one by one. The Chrysler tags of 1965 to 1967, and those of Lynch Road of 1969, have other forms, for which we have no source.'
+			title: 'Body tags of Chrysler Corporation',
+			text: 'Fender tags of 1967 to 1974 are read. Of the punched columns of 1967 and 1968 we know what a few of 1968 mean, from one worked tag; the others are kept as column and figure. The tags of 1965 and 1966, those of Lynch Road of 1969 and those from 1975 on have other forms, for which we have no source.'
+		},
+		{
+			title: 'Engines, transmissions and axles of Chrysler Corporation',
+			text: 'Engine pads of 1965 to 1980 are read by year, size, marks and date, and numbers with a day count from 1968; most of it is from memory, and no dated part was found to check the first day of the count. Pads with two figures for the size, as on sixes and in 1964, are not read. Part numbers of transmissions and tags of axles have no table.'
 		},
 		{
 			title: 'Trim, paint and tops',

@@ -10,20 +10,23 @@ export const displacement: LineField = {
 	reads: { by: 'table', table: 'unit_code' }
 };
 
-/** High performance, low compression and the like: stamped after the size or after the date. */
+/**
+ * High performance, low compression and the like: stamped after the size or after the date. Those without a figure come
+ * first, so that HP 2 10 is not taken for HP2 10.
+ */
 export const marks: readonly LineField[] = [
 	{
 		name: 'option',
 		label: 'Mark',
 		optional: true,
-		shape: { chars: ['H', 'P', '2'] },
+		shape: { chars: 'CEHILMPS', length: [2, 4] },
 		reads: { by: 'table', table: 'unit_code' }
 	},
 	{
 		name: 'option',
 		label: 'Mark',
 		optional: true,
-		shape: { chars: 'CEHILMPS', length: [2, 4] },
+		shape: { chars: ['H', 'P', '2'] },
 		reads: { by: 'table', table: 'unit_code' }
 	}
 ];
