@@ -52,7 +52,8 @@ export const tagText = {
 	},
 	readAs: (title: string): string => `Read as: ${title}.`,
 	whole: 'The whole reading, with its sources',
-	others: (n: number): string => (n === 1 ? 'One other reading fits.' : `${n} other readings fit.`),
+	others: (n: number): string =>
+		n === 1 ? 'One other reading is as likely.' : `${n} other readings are as likely.`,
 	problems: 'Worth a second look',
 	inOrder: 'Take this',
 

@@ -123,7 +123,8 @@ export function tagPage(parameters: URLSearchParams, now: Date) {
 				offers: offered(problem, asked)
 			})),
 		whole: withTag ? readingAddress(query) : null,
-		others: Math.max(0, (tag?.readings.length ?? 0) - 1 + (tag?.more ?? 0)),
+		/** Readings that nothing on the tag sets apart from the one that is shown. */
+		others: (tag?.readings ?? []).slice(1).filter(({ rank }) => rank === reading?.rank).length,
 		serial:
 			serial === undefined
 				? null
