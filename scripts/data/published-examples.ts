@@ -35,9 +35,12 @@ function samples(): Sample[] {
 		...rowsOf(`serials/${maker}.csv`).map((row) => sampleOf(maker, 'serial', row)),
 		...rowsOf(`stamps/${maker}.csv`).map((row) => sampleOf(maker, row['kind'] as StampKind, row))
 	]);
+	const further = rowsOf('stamps/further.csv').map((row) =>
+		sampleOf(row['maker'] ?? '', row['kind'] as StampKind, row)
+	);
 	const dates = rowsOf('dates/dates.csv').map((row) => sampleOf('', 'date', row));
 	const standard = rowsOf('standards.csv').map((row) => sampleOf('', 'serial', row));
-	return [...own, ...dates, ...standard];
+	return [...own, ...further, ...dates, ...standard];
 }
 
 /** Counts by kind, and the known misses. */
