@@ -23,7 +23,8 @@ export const whereText = {
 	show: 'Show',
 	choose: 'Choose a maker',
 	anyYear: 'any',
-	usual: 'The usual places of most American makers. Choose a maker for its own, with sources.',
+	makers: 'Makers with places in the tables',
+	usual: 'The drawing shows what most makers did; their own places come from rows with sources.',
 
 	heading: (maker: string, year: string): string => (year === '' ? maker : `${year} ${maker}`),
 	count: (places: number): string => counted(places, 'place', 'places'),
@@ -63,7 +64,7 @@ export const whereText = {
 			caption: 'Hinge pillar, end of the door and lock pillar; the front is at the left.'
 		}
 	} satisfies Record<View, { heading: string; caption: string }>,
-	onward: 'Follow the numbers to the drawings below.',
+	onward: 'In the drawings further down',
 	generic: 'Drawings show the kind of place. Where words and drawing differ, the words hold.',
 	zones: {
 		support: 'Radiator support',

@@ -39,6 +39,16 @@ function yearsOf(rows: readonly CompiledRow[], division: string): PaintYear[] {
 		.map(([year, own]) => ({ year, codes: own.size, address: addressOf(division, year) }));
 }
 
+/** One entry for each year from the first of all to the last; those without codes have 0. */
+function spread(own: readonly PaintYear[], all: readonly number[]): PaintYear[] {
+	const [first = 0] = all;
+	const length = (all.at(-1) ?? first - 1) - first + 1;
+	return Array.from({ length }, (_, offset) => {
+		const year = first + offset;
+		return own.find((one) => one.year === year) ?? { year, codes: 0, address: '' };
+	});
+}
+
 /** An edition's makes are found once; the page is asked for more often than editions are made. */
 const known = new WeakMap<TableSet, readonly PaintMake[]>();
 
@@ -165,9 +175,10 @@ export function paintPage(parameters: URLSearchParams) {
 					},
 		makes: (make === undefined ? makes : [make]).map((one) => ({
 			...one,
-			years: one.years.filter(
-				(own) => make !== undefined || year === undefined || own.year === year
-			)
+			years:
+				make === undefined && year !== undefined
+					? one.years.filter((own) => own.year === year)
+					: spread(one.years, years)
 		}))
 	};
 }

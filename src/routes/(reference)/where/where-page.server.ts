@@ -1,10 +1,10 @@
 /** What the page of places shows for an address. */
 import type { CompiledRow } from '$lib/decoder';
-import { rowAddress, sourceAddress } from '$lib/format/addresses';
+import { rowAddress, sourceAddress, whereAddress } from '$lib/format/addresses';
 import { citedAt } from '$lib/format/row-lines';
 import { scopeWords } from '$lib/format/scope';
 import { yearSpan } from '$lib/format/years';
-import { readContext } from '$lib/server/readings';
+import { MAKER_LIST, readContext } from '$lib/server/readings';
 import { current, searchRows } from '$lib/server/reference';
 import { VIEW_ZONES, VIEWS, whereText as text, type Zone } from '$lib/text/en/where';
 import { MAKER_NAMES, type FieldError, type Maker, type ReadContext } from '$lib/types';
@@ -57,6 +57,23 @@ const rowsOf = (maker: Maker, { division, year }: ReadContext): readonly Compile
 		...(year !== undefined && { year })
 	}).items;
 
+/** Makers, and divisions with rows of their own, each with how many places its page shows. */
+const makersShown = () =>
+	MAKER_LIST.filter(({ key }) => key !== 'other').flatMap(({ key, name, divisions }) => {
+		const rows = rowsOf(key, {});
+		const own = divisions.filter((division) =>
+			rows.some((row) => row.division.includes(division.name))
+		);
+		return [
+			{ name, count: text.count(rows.length), address: whereAddress(key, null) },
+			...own.map((division) => ({
+				name: division.name,
+				count: text.count(rowsOf(key, { division: division.name }).length),
+				address: whereAddress(division.name, null)
+			}))
+		];
+	});
+
 /** The page: the form, and the places of a maker and model year by where they stand in the drawing. */
 export function wherePage(parameters: URLSearchParams, now: Date) {
 	const asked = {
@@ -94,6 +111,7 @@ export function wherePage(parameters: URLSearchParams, now: Date) {
 						views: zones.some(Boolean) ? viewsOf(groupsOf(rows, zones)) : [],
 						unplaced: rows.filter((_, index) => zones[index] === null).map(placeView)
 					},
+		makers: rows.length > 0 ? [] : makersShown(),
 		law: rowsOf('other', {}).map(placeView)
 	};
 }
