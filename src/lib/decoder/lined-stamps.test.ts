@@ -146,6 +146,10 @@ describe('lines of a stamp', () => {
 		expect(linesOf('  ', true).lines).toEqual([]);
 	});
 
+	it('are not divided within a sign, however long it is in bytes', () => {
+		expect(linesOf('\u{2C00}\u{20000}\u01F1 1').normalised).toBe('??DZ 1');
+	});
+
 	it('are the same when they are split again, whatever was typed', () => {
 		fc.assert(
 			fc.property(fc.string({ unit: 'binary', maxLength: 80 }), (text) => {

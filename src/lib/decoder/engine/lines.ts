@@ -34,7 +34,8 @@ function edgesOf(text: string, origins: readonly number[]): boolean[] {
 		if (index === 0) return true;
 		const before = origins[index - 1] as number;
 		const bracket = text.charAt(before) === '[' ? text.indexOf(']', before) : before;
-		return DIVIDER.test(text.slice(bracket + 1, origin));
+		// A sign may be two code units long: what is its second half divides nothing.
+		return origin > bracket + 1 && DIVIDER.test(text.slice(bracket, origin).replace(/^./su, ''));
 	});
 	return [...edges, true];
 }
