@@ -29,6 +29,7 @@ const places = fc.uniqueArray(fc.nat(16), { maxLength: 8 });
 const mark = (text: string, at: readonly number[]): string =>
 	[...text].map((own, index) => (at.includes(index) ? '?' : own)).join('');
 
+const SERIALS: ReadonlySet<string> = new Set(LAYOUTS.map(({ id }) => id));
 const names = (text: string): string[] =>
 	candidatesOf(normalise(text).cells).flatMap(({ prepared, years }) =>
 		years.map((year) => `${prepared.layout.id} ${year}`)
@@ -45,6 +46,8 @@ describe('tens of thousands of texts against the released tables', () => {
 				(text) => {
 					const { readings, more } = read(released, { text });
 					for (const reading of readings) {
+						// Tags and other stamps hold their dividers too: what they hold is told of beside.
+						if (!SERIALS.has(reading.layout ?? '')) continue;
 						const own = reading.fields
 							.filter((field) => field.derived_from === undefined)
 							.flatMap(({ from, to }) => Array.from({ length: to - from + 1 }, (_, n) => from + n));
