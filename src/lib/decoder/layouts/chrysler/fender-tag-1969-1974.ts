@@ -18,6 +18,11 @@ const option = {
 	shape: { chars: [LETTERS, DIGITS, DIGITS], whole: true },
 	reads: { by: 'table', table: 'option' }
 } as const;
+/** Packages, brakes and seats: what stands before the axle, so that the axle is not taken for one of them. */
+const beforeAxle = {
+	...option,
+	shape: { chars: ['ABC', DIGITS, DIGITS], whole: true }
+} as const;
 /** Axle codes stand among the options, in their order. */
 const axle = {
 	...option,
@@ -116,7 +121,7 @@ export const chryslerFenderTag1969: LinedLayout = {
 			optional: true,
 			repeats: true,
 			fields: [
-				option,
+				beforeAxle,
 				axle,
 				option,
 				{

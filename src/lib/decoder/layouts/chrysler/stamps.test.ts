@@ -130,6 +130,13 @@ describe('a tag of 1969 to 1974', () => {
 		expect(reading?.fields.find(({ code }) => code === 'V6X')?.outcome).toBe('found');
 	});
 
+	it('may have its axle first on a line', () => {
+		expect(told(tag('D91 G11', 'EV2 H6X9 000 B30 E12345')).slice(0, 2)).toEqual([
+			'axle D91',
+			'option G11'
+		]);
+	});
+
 	it('has a color where the upper door frame is painted', () => {
 		const upper = tag('C16', 'EV2 H6X9 TX9 B30 E12345')?.fields.find(
 			({ name }) => name === 'paint_upper'
