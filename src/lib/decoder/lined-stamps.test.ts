@@ -269,6 +269,9 @@ describe('a body tag', () => {
 			model_year: 1970
 		});
 		expect(codes(result)).toContain('serial_of_other_maker');
+		const given = ask('B7 TX9 00 / E86 D32', { context: { maker: 'gm' } });
+		expect(codes(given)).toContain('other_maker_given');
+		expect(codes(given)).not.toContain('serial_of_other_maker');
 	});
 
 	it('can be given by named fields', () => {

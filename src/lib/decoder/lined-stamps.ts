@@ -107,7 +107,7 @@ export function readLined(tables: TableSet, request: LinedRequest): LinedResult 
 	const problems = [
 		...general,
 		...(fields === undefined ? lineProblems(match, own) : []),
-		...otherMaker(match.layout.maker, car.maker)
+		...otherMaker(match.layout.maker, car, context.maker)
 	];
 	return {
 		normalised,

@@ -114,10 +114,18 @@ function isLikely(kind: LinedKind, reading: Reading | undefined): boolean {
 	return tells(reading) && told * 2 > own.length - (kind === 'body_tag' ? 0 : 1);
 }
 
+/** Whether a form of one division's engines reads what was given as another's. */
+function isOfOther({ lined, context: { division } }: Typed, reading: Reading | undefined): boolean {
+	const own = lined.find(({ id }) => id === reading?.layout)?.divisions;
+	return own !== undefined && division !== undefined && !own.includes(division);
+}
+
 function asLined(kind: LinedKind, typed: Typed): Read & { readonly whole: boolean } {
 	const lined = readLined(typed.tables, { ...typed, kind });
 	const single = SINGLE[kind];
-	if (single === undefined || (lined.whole && tells(lined.readings[0]))) return { kind, ...lined };
+	const [first] = lined.readings;
+	const isSure = lined.whole && tells(first) && !isOfOther(typed, first);
+	if (single === undefined || isSure) return { kind, ...lined };
 	// A pad or casting may be worn down to one code, or be one of which no form is known.
 	const code = asCode(typed, single);
 	if (code.readings.length === 0) return { kind, ...lined };

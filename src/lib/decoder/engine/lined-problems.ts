@@ -105,13 +105,16 @@ export function lineProblems(match: LinedMatch, layouts: readonly LinedLayout[])
 }
 
 /** A serial of another maker stands beside the stamp. */
-export const otherMaker = (stamp: Maker, serial: Maker | undefined): Problem[] =>
-	serial === undefined || serial === stamp
-		? []
-		: [
-				{
-					code: 'serial_of_other_maker',
-					message: text.otherMaker(MAKER_NAMES[stamp], MAKER_NAMES[serial]),
-					offers: []
-				}
-			];
+export const otherMaker = (
+	stamp: Maker,
+	{ maker }: { readonly maker?: Maker },
+	given: Maker | undefined
+): Problem[] => {
+	if (maker === undefined || maker === stamp) return [];
+	const [own, other] = [MAKER_NAMES[stamp], MAKER_NAMES[maker]];
+	return [
+		given === maker
+			? { code: 'other_maker_given', message: text.otherGiven(own, other), offers: [] }
+			: { code: 'serial_of_other_maker', message: text.otherMaker(own, other), offers: [] }
+	];
+};

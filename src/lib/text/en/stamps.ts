@@ -52,6 +52,8 @@ export const stampsText = {
 		onePlate: (title: string) => `As ${title}`,
 		otherMaker: (stamp: string, serial: string) =>
 			`This reads as a stamp of ${stamp}; the serial beside it is one of ${serial}. Either stands for another car, or one of them is misread.`,
+		otherGiven: (stamp: string, maker: string) =>
+			`This reads as a stamp of ${stamp}, and you gave ${maker} as the maker. No form of ${maker} that we know takes it.`,
 		tooManyLines: (most: number, beyond: number) =>
 			`No stamp has more than ${most} lines. The last ${beyond === 1 ? 'line is' : `${beyond} lines are`} not read.`,
 		tooLong: (most: number, beyond: number) =>

@@ -86,3 +86,18 @@ describe('what a tag holds beyond its form', () => {
 		expect(line?.possible.map(({ meaning }) => meaning)).toContain('Monte Carlo');
 	});
 });
+
+describe('the letters of an engine alone', () => {
+	it('are those of the division that was given, before those of another', () => {
+		const first = (division?: string) =>
+			read(tables, {
+				text: 'JE',
+				kind: 'engine',
+				context: { maker: 'gm', year: 1967, ...(division === undefined ? {} : { division }) }
+			}).readings[0];
+		expect(first('Chevrolet')).toMatchObject({ layout: null });
+		expect(first('Chevrolet')?.fields[0]).toMatchObject({ code: 'JE', outcome: 'found' });
+		expect(first('Pontiac')?.layout).toBe('pontiac-engine-stamp');
+		expect(first()?.layout).toBe('pontiac-engine-stamp');
+	});
+});
