@@ -70,13 +70,18 @@ export const REJECTED_COLUMNS = [
 	'reason'
 ] as const;
 
+export const EXCEPTION_COLUMNS = ['check', 'rows', 'digest', 'source', 'reason'] as const;
+
 export const SOURCES_FILE = 'sources.csv';
 export const CLAIMS_FILE = 'claims.csv';
 export const MAPPING_FILE = 'mapping.csv';
 export const CANDIDATES_FILE = 'candidates.csv';
 export const REJECTED_FILE = 'REJECTED.csv';
 
-/** The files beside the makers' folders. Each of them has to be there. */
+/** Questions that are closed; a folder without any goes without the file. */
+export const EXCEPTIONS_FILE = 'exceptions.csv';
+
+/** The other files beside the makers' folders. Each of them has to be there. */
 export const ROOT_FILES = [
 	SOURCES_FILE,
 	CLAIMS_FILE,

@@ -6,7 +6,7 @@ import { writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { contentOf, readData } from './read';
-import { collectedFiles, editionFiles } from './write';
+import { collectedFiles, editionFiles, exceptionFiles } from './write';
 
 const root = process.argv[2] ?? fileURLToPath(new URL('../../data', import.meta.url));
 const data = readData(root);
@@ -18,7 +18,8 @@ const canonical = new Map([
 		mapping: data.mapping.map(({ value }) => value),
 		candidates: data.candidates.map(({ value }) => value),
 		rejected: data.rejected.map(({ value }) => value)
-	})
+	}),
+	...exceptionFiles(data.exceptions.map(({ value }) => value))
 ]);
 for (const [file, text] of canonical) {
 	if (broken.has(file) || !data.files.has(file) || data.files.get(file) === text) continue;

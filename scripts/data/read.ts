@@ -25,6 +25,7 @@ import {
 	type Rejected
 } from './collected';
 import * as columns from './columns';
+import { exceptionSchema, type Exception } from './exceptions';
 import type { Finding, Placed } from './finding';
 import { listOf, numberOf, readRecords, textOrNull, valuesOf } from './records';
 
@@ -36,6 +37,7 @@ export interface Data {
 	readonly citations: readonly Placed<Citation>[];
 	readonly sources: readonly Placed<Source>[];
 	readonly claims: readonly Placed<Claim>[];
+	readonly exceptions: readonly Placed<Exception>[];
 	readonly mapping: readonly Placed<Mapping>[];
 	readonly candidates: readonly Placed<Candidate>[];
 	readonly rejected: readonly Placed<Rejected>[];
@@ -109,6 +111,12 @@ export function parseData(files: ReadonlyMap<string, string>): Data {
 			years_from: numberOf(cells.years_from),
 			years_to: numberOf(cells.years_to)
 		})),
+		exceptions: read(
+			columns.EXCEPTIONS_FILE,
+			columns.EXCEPTION_COLUMNS,
+			exceptionSchema,
+			(cells) => ({ ...cells, rows: listOf(cells.rows) })
+		),
 		mapping: read(columns.MAPPING_FILE, columns.MAPPING_COLUMNS, mappingSchema),
 		candidates: read(
 			columns.CANDIDATES_FILE,

@@ -11,6 +11,7 @@ import {
 } from '../../src/lib/types';
 import { compareCandidates, type Collected } from './collected';
 import * as columns from './columns';
+import { questionKey, type Exception } from './exceptions';
 
 const byUnit = (a: string, b: string): number => (a < b ? -1 : a > b ? 1 : 0);
 const by =
@@ -130,4 +131,13 @@ export function collectedFiles(collected: Collected): Map<string, string> {
 		[columns.CANDIDATES_FILE, csv(columns.CANDIDATE_COLUMNS, candidates)],
 		[columns.REJECTED_FILE, csv(columns.REJECTED_COLUMNS, rejected)]
 	]);
+}
+
+/** The canonical file of the closed questions; none where nothing is closed. */
+export function exceptionFiles(exceptions: readonly Exception[]): Map<string, string> {
+	if (exceptions.length === 0) return new Map();
+	const lines = [...exceptions]
+		.sort(by(questionKey))
+		.map(({ check, rows, digest, source, reason }) => [check, list(rows), digest, source, reason]);
+	return new Map([[columns.EXCEPTIONS_FILE, csv(columns.EXCEPTION_COLUMNS, lines)]]);
 }

@@ -1,6 +1,6 @@
 import type { Finding } from '../finding';
 import { contentOf, type Data } from '../read';
-import { collectedFiles, editionFiles } from '../write';
+import { collectedFiles, editionFiles, exceptionFiles } from '../write';
 
 export const name = 'canonical';
 
@@ -15,7 +15,8 @@ export function check(data: Data): Finding[] {
 			mapping: values(data.mapping),
 			candidates: values(data.candidates),
 			rejected: values(data.rejected)
-		})
+		}),
+		...exceptionFiles(values(data.exceptions))
 	]);
 	const unreadable = new Set(data.unreadable.map(({ file }) => file));
 	const findings: Finding[] = [];

@@ -6,6 +6,7 @@ import * as citations from './citations';
 import * as claims from './claims';
 import * as codes from './codes';
 import * as colors from './colors';
+import * as exceptions from './exceptions';
 import * as mapping from './mapping';
 import * as memory from './memory';
 import * as overlap from './overlap';
@@ -39,6 +40,7 @@ export const CHECKS: readonly Check[] = [
 	overlap,
 	colors,
 	claims,
+	exceptions,
 	mapping,
 	candidates,
 	services,

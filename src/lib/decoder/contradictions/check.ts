@@ -2,8 +2,11 @@
 import { FIRST_YEAR, LAST_YEAR, type Contradiction, type ReferenceRow } from '../../types';
 import type { CompiledRow, TableSet } from '../engine/table-set';
 
+/** What a check finds: `sources` are those that are asked about themselves; check, rows and sources tell hits apart. */
+export type Hit = Pick<Contradiction, 'check' | 'rows' | 'sources' | 'message'>;
+
 /** Finds what one question is asked of. Pure; says the same of the same rows, in whatever order they come. */
-export type Check = (tables: TableSet) => Contradiction[];
+export type Check = (tables: TableSet) => Hit[];
 
 /** First and last model year of a row; all years where it names none. */
 export const spanOf = ({

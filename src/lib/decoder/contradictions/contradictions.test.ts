@@ -8,8 +8,16 @@ import {
 } from '../../../../tests/fixtures/builders';
 import { INVENTED } from '../../../../tests/fixtures/invented';
 import { readContent } from '../../../../scripts/data/read';
-import { CONTRADICTIONS, type EditionContent, type ReferenceRow } from '../../types';
+import {
+	CONTRADICTIONS,
+	contradictionSchema,
+	MAKERS,
+	TABLE_NAMES,
+	type EditionContent,
+	type ReferenceRow
+} from '../../types';
 import { compile } from '../index';
+import { digestOf } from './digest';
 import { contradictionsAfter, contradictionsOf } from './index';
 
 const book = buildSource('marsh-book');
@@ -144,6 +152,18 @@ describe('a paint outside the years of its line', () => {
 		['without years', paint('Heron')],
 		['of a line that no table has', paint('Curlew', [1970, 1971])]
 	])('is not, %s', (_, one) => expect(hits([heron([1965, 1967]), one])).toEqual([]));
+
+	it('is asked about once, with all the lines', () => {
+		const tern = buildRow('gm', 'line', 'T', 'Tern', {
+			values: { line: 'Tern' },
+			years: [1965, 1966]
+		});
+		const both = { ...paint('Tern', [1970, 1971]), line: ['Tern', 'Heron'] };
+		const found = contradictionsOf(compile(content([heron([1965, 1967]), tern, both])));
+		expect(found.map(({ message }) => message)).toEqual([
+			'A paint is listed for Heron and Tern of 1970–1971, and no table has such a line in any of these years.'
+		]);
+	});
 });
 
 describe('an engine', () => {
@@ -206,6 +226,19 @@ describe('a rule', () => {
 		expect(asked(constraint({ attribute: 'line' }))).toEqual([]);
 	});
 
+	it('whose facts are not those of a rule is left to the check of the shapes', () => {
+		for (const table of ['rule', 'constraint'] as const)
+			expect(asked(buildRow('gm', table, '', 'Says nothing', { values: { when: 1 } }))).toEqual([]);
+	});
+
+	it('does not take a list of facts for a value', () => {
+		const odd = buildRow('gm', 'engine', 'W', 'Odd', {
+			values: { displacement_cuin: { of: 999 } }
+		});
+		const row = constraint({ attribute: 'displacement_cuin', any_of: ['999'] });
+		expect(hits([engine, odd, row])).toEqual([['rule_without_rows', 'gm.constraint.x.1']]);
+	});
+
 	it('is looked at on both its sides', () => {
 		const rule = (when: object[], then: object[]) =>
 			buildRow('gm', 'rule', '', 'When one, then the other', { values: { when, then } });
@@ -262,10 +295,125 @@ describe('all of them', () => {
 		expect(mended.map(({ check }) => check)).toEqual(['two_meanings']);
 	});
 
+	it('stay the same question while the same rows are asked about', () => {
+		const one = buildRow('gm', 'paint', 'W', 'Marsh Green');
+		const two = buildRow('gm', 'paint', 'W', 'Reed Green', { n: 2 });
+		const [before, after] = [one, { ...one, meaning: 'Moss Green' }].map((row) =>
+			compile(content([row, two]))
+		) as [ReturnType<typeof compile>, ReturnType<typeof compile>];
+		expect(contradictionsAfter(before, after)).toEqual({ brought: [], mended: [] });
+		const only = ['gap'] as const;
+		const none = compile(content([two]));
+		expect(contradictionsAfter(before, none, { only })).toEqual({ brought: [], mended: [] });
+		expect(contradictionsAfter(before, none).mended).toHaveLength(1);
+	});
+
+	it('can be asked one at a time', () => {
+		const tables = compile(INVENTED);
+		const each = CONTRADICTIONS.flatMap((name) => contradictionsOf(tables, { only: [name] }));
+		expect(each).toEqual(contradictionsOf(tables));
+	});
+
+	it('stand whatever the rows say, as long as they compile', () => {
+		const some = <T>(...values: T[]) => fc.constantFrom(...values);
+		const cell = fc.subarray(['Heron', 'Marsh', 'B', 'V', 'constructor']);
+		const year = fc.option(fc.integer({ min: 1955, max: 1985 }), { nil: null });
+		const anyRow = fc.record({
+			maker: some(...MAKERS),
+			table: some(...TABLE_NAMES),
+			...{ division: cell, line: cell, body: cell, engine: cell, plant: cell, market: cell },
+			...{ years_from: year, years_to: year },
+			code: some('', 'B', 'V', 'H'),
+			meaning: some('One', 'Another'),
+			values: fc.dictionary(
+				some(
+					'line',
+					'left',
+					'right',
+					'when',
+					'then',
+					'units_built',
+					'first_sequence',
+					'last_sequence'
+				),
+				fc.oneof(
+					fc.jsonValue(),
+					fc.integer(),
+					fc.record({ attribute: some('line', '__proto__', 'engine'), any_of: some(['V'], ['Z']) })
+				)
+			),
+			note: some('', 'A remark')
+		});
+		fc.assert(
+			fc.property(fc.array(anyRow, { maxLength: 30 }), (parts) => {
+				const rows = parts.map((row, at) => ({
+					...row,
+					row_key: `${row.maker}.${row.table}.x.${at}`
+				}));
+				const found = contradictionsOf(compile(content(rows)));
+				for (const hit of found) expect(contradictionSchema.parse(hit)).toEqual(hit);
+				const named = found.map(({ check, rows: keys, sources }) =>
+					[check, ...keys, ...(keys.length > 0 ? [] : sources)].join(' ')
+				);
+				expect(new Set(named).size).toBe(named.length);
+			}),
+			{ numRuns: 200 }
+		);
+	});
+
 	it('are asked of the released tables, each by rows that are there', () => {
 		const tables = compile(readContent('data'));
 		const found = contradictionsOf(tables);
 		expect(found.flatMap(({ rows }) => rows).filter((key) => !tables.rows.has(key))).toEqual([]);
 		expect(found.filter(({ check }) => check === 'engine_in_no_line')).toEqual([]);
+	});
+});
+
+describe('the digest of a hit', () => {
+	const green = buildRow('gm', 'paint', 'W', 'Marsh Green', { line: ['Heron', 'Curlew'] });
+	const reed = buildRow('gm', 'paint', 'W', 'Reed Green', { line: ['Heron'], n: 2 });
+	const of = (rows: readonly ReferenceRow[], parts: Partial<EditionContent> = {}) =>
+		contradictionsOf(compile(content(rows, parts)), { only: ['two_meanings'] })[0]?.digest;
+	const asked = of([green, reed]);
+
+	it('names the sources of the rows and how much the question weighs', () => {
+		expect(contradictionsOf(compile(content([green, reed])))[0]).toMatchObject({
+			weight: 'heavy',
+			sources: [book.key],
+			digest: asked
+		});
+	});
+
+	it.each([
+		['the order of rows', of([reed, green])],
+		['the order within a scope', of([{ ...green, line: ['Curlew', 'Heron'] }, reed])],
+		['another row', of([green, reed, heron([1965, 1967])])],
+		['another work', of([green, reed], { sources: [book, other] })]
+	])('stays through %s', (_, digest) => expect(digest).toBe(asked));
+
+	it.each([
+		['a row', of([{ ...green, note: 'Seen on a car.' }, reed])],
+		['a work', of([green, reed], { sources: [{ ...book, year: 1971 }] })],
+		[
+			'a citation',
+			of([green, reed], {
+				citations: [
+					buildCitation(green.row_key, book.key, { locator: 'page 12' }),
+					buildCitation(reed.row_key, book.key)
+				]
+			})
+		]
+	])('changes with %s', (_, digest) => {
+		expect(digest).toMatch(/^[0-9a-f]{16}$/);
+		expect(digest).not.toBe(asked);
+	});
+
+	it('is that of the published algorithm', () => {
+		// Known values of FNV-1a with 64 bits.
+		expect(['', 'a', 'foobar'].map(digestOf)).toEqual([
+			'cbf29ce484222325',
+			'af63dc4c8601ec8c',
+			'85944171f73967e8'
+		]);
 	});
 });

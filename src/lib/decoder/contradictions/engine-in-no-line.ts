@@ -14,7 +14,7 @@ export const engineInNoLine: Check = (tables) => {
 						check: 'engine_in_no_line' as const,
 						rows: [row.row_key],
 						sources: [],
-						message: text.engine_in_no_line(unknown)
+						message: text.engine_in_no_line(unknown.sort())
 					}
 				];
 	});

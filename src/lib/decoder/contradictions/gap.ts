@@ -1,7 +1,7 @@
 import { contradictionText as text } from '../../text/en/contradictions';
-import { FIRST_YEAR, SCOPE_COLUMNS, tableDefinition, type Contradiction } from '../../types';
+import { FIRST_YEAR, SCOPE_COLUMNS, tableDefinition } from '../../types';
 import type { CompiledRow } from '../engine/table-set';
-import type { Check } from './check';
+import type { Check, Hit } from './check';
 
 /** A gap of more years than this is another use of the code, and no question. */
 const LONGEST = 3;
@@ -10,7 +10,7 @@ const scopeKey = (row: CompiledRow): string =>
 	JSON.stringify([row.meaning, SCOPE_COLUMNS.map((column) => [...row[column]].sort())]);
 
 /** A code that meant the same before and after some years, with no row of any meaning for the years between. */
-function gapsOf(rows: readonly CompiledRow[], listed: (year: number) => boolean): Contradiction[] {
+function gapsOf(rows: readonly CompiledRow[], listed: (year: number) => boolean): Hit[] {
 	const dated = rows
 		.flatMap((row) =>
 			row.years_from === null || row.years_to === null

@@ -4,7 +4,8 @@
  */
 import { CONTRADICTIONS, type Contradiction, type ContradictionName } from '../../types';
 import type { TableSet } from '../engine/table-set';
-import type { Check } from './check';
+import type { Check, Hit } from './check';
+import { completed } from './completed';
 import { crossingScopes } from './crossing-scopes';
 import { engineInNoLine } from './engine-in-no-line';
 import { gap } from './gap';
@@ -27,20 +28,33 @@ const CHECKS: Readonly<Record<ContradictionName, Check>> = {
 	source_without_rows: sourceWithoutRows
 };
 
-/** One text for one hit, whatever was found before it. */
-const keyOf = ({ check, rows, sources, message }: Contradiction): string =>
-	JSON.stringify([CONTRADICTIONS.indexOf(check), rows, sources, message]);
+const byUnit = (a: string, b: string): number => Number(a > b) - Number(a < b);
 
-/** Every hit in an edition, by check, then by row. @param only the checks to run; all when left out */
+/** Hits by a text that is each one's own, in the order in which they are told: by check, then by row. */
+function hitsOf(tables: TableSet, only: readonly ContradictionName[]): ReadonlyMap<string, Hit> {
+	const keyed = only
+		.flatMap((name) => CHECKS[name](tables))
+		.map((hit): [string, Hit] => [
+			JSON.stringify([CONTRADICTIONS.indexOf(hit.check), hit.rows, hit.sources]),
+			hit
+		]);
+	return new Map(keyed.sort(([a], [b]) => byUnit(a, b)));
+}
+
+export interface ContradictionOptions {
+	/** The checks to run; all when left out. */
+	readonly only?: readonly ContradictionName[];
+}
+
+/**
+ * Every hit in an edition, by check, then by row.
+ * @example contradictionsOf(tables, { only: ['gap'] })[0]?.rows // ['gm.trim.402.1', 'gm.trim.402.2']
+ */
 export function contradictionsOf(
 	tables: TableSet,
-	only: readonly ContradictionName[] = CONTRADICTIONS
+	{ only = CONTRADICTIONS }: ContradictionOptions = {}
 ): Contradiction[] {
-	const hits = only.flatMap((name) => CHECKS[name](tables));
-	return hits
-		.map((hit) => ({ hit, key: keyOf(hit) }))
-		.sort((a, b) => Number(a.key > b.key) - Number(a.key < b.key))
-		.map(({ hit }) => hit);
+	return [...hitsOf(tables, only).values()].map((hit) => completed(tables, hit));
 }
 
 /** What a change brings and what it mends. */
@@ -49,12 +63,17 @@ export interface ChangedContradictions {
 	readonly mended: readonly Contradiction[];
 }
 
-/** The hits that one edition has and the one before it has not, and the other way around. */
-export function contradictionsAfter(before: TableSet, after: TableSet): ChangedContradictions {
-	const [old, now] = [contradictionsOf(before), contradictionsOf(after)];
-	const [oldKeys, nowKeys] = [new Set(old.map(keyOf)), new Set(now.map(keyOf))];
-	return {
-		brought: now.filter((hit) => !oldKeys.has(keyOf(hit))),
-		mended: old.filter((hit) => !nowKeys.has(keyOf(hit)))
-	};
+/**
+ * The hits that one edition has and the one before it has not, and the other way around. A hit stays the same while
+ * its check asks of the same rows, whatever else those say now.
+ */
+export function contradictionsAfter(
+	before: TableSet,
+	after: TableSet,
+	{ only = CONTRADICTIONS }: ContradictionOptions = {}
+): ChangedContradictions {
+	const [old, now] = [hitsOf(before, only), hitsOf(after, only)];
+	const without = (hits: typeof old, others: typeof old, tables: TableSet) =>
+		[...hits].filter(([key]) => !others.has(key)).map(([, hit]) => completed(tables, hit));
+	return { brought: without(now, old, after), mended: without(old, now, before) };
 }

@@ -9,7 +9,9 @@ const SETTING = ['line', 'series', 'body_serial'] as const;
 export function linesOf(tables: TableSet): ReadonlyMap<string, readonly CompiledRow[]> {
 	const lines = new Map<string, CompiledRow[]>();
 	for (const row of SETTING.flatMap((table) => rowsNamed(tables, table))) {
-		const key = lineKey(row.maker, String(row.values.line));
+		const { line } = row.values;
+		if (typeof line !== 'string') continue;
+		const key = lineKey(row.maker, line);
 		lines.set(key, [...(lines.get(key) ?? []), row]);
 	}
 	return lines;

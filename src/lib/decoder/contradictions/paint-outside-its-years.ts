@@ -7,18 +7,19 @@ export const paintOutsideItsYears: Check = (tables) => {
 	const lines = linesOf(tables);
 	return rowsNamed(tables, 'paint')
 		.filter(({ years_from }) => years_from !== null)
-		.flatMap((row) =>
-			row.line.flatMap((name) => {
+		.flatMap((row) => {
+			const outside = row.line.filter((name) => {
 				const own = lines.get(lineKey(row.maker, name)) ?? [];
-				if (own.length === 0 || own.some((line) => yearsMeet(line, row))) return [];
-				return [
-					{
-						check: 'paint_outside_its_years' as const,
-						rows: [row.row_key],
-						sources: [],
-						message: text.paint_outside_its_years(name, ...spanOf(row))
-					}
-				];
-			})
-		);
+				return own.length > 0 && !own.some((line) => yearsMeet(line, row));
+			});
+			if (outside.length === 0) return [];
+			return [
+				{
+					check: 'paint_outside_its_years' as const,
+					rows: [row.row_key],
+					sources: [],
+					message: text.paint_outside_its_years(outside.sort(), ...spanOf(row))
+				}
+			];
+		});
 };

@@ -111,7 +111,8 @@ function steadySources(
 	return new Set(previous === undefined ? [] : [...sources.keys()].filter((key) => !changed(key)));
 }
 
-const ROW_KEYS = [
+/** What a row says, without what an edition makes of it. */
+export const ROW_KEYS = [
 	'row_key',
 	'maker',
 	'table',

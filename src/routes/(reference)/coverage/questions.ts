@@ -10,6 +10,8 @@ const SHOWN = 4;
 
 export interface QuestionGroup {
 	readonly name: string;
+	/** What an open question of the kind may mean for a reading. */
+	readonly weight: string;
 	readonly count: number;
 	readonly shown: readonly {
 		readonly message: string;
@@ -25,17 +27,18 @@ export function questionsOf(tables: TableSet): readonly QuestionGroup[] {
 	const found = known.get(tables);
 	if (found) return found;
 	const all = contradictionsOf(tables);
-	const groups = CONTRADICTIONS.map((check) => {
+	const groups = CONTRADICTIONS.flatMap((check) => {
 		const own = all.filter((hit) => hit.check === check);
-		return {
+		return own.slice(0, 1).map(({ weight }) => ({
 			name: text.names[check],
+			weight: text.weights[weight],
 			count: own.length,
 			shown: own.slice(0, SHOWN).map(({ message, rows }) => ({
 				message,
 				rows: rows.map((key) => ({ key, address: rowAddress(key) }))
 			}))
-		};
-	}).filter(({ count }) => count > 0);
+		}));
+	});
 	known.set(tables, groups);
 	return groups;
 }
