@@ -15,6 +15,7 @@ export * from './readings';
 export * from './rows';
 export * from './tables';
 export * from './contradictions';
+export * from './correction-parts';
 export * from './corrections';
 export * from './tally';
 export * from './values';

@@ -16,6 +16,9 @@ function inOrder(value: unknown): unknown {
 	return Object.fromEntries(entries.map(([key, inner]) => [key, inOrder(inner)]));
 }
 
+/** One value, whatever the order of its keys. */
+export const valueText = (value: unknown): string => JSON.stringify(inOrder(value) ?? null);
+
 const sorted = (values: readonly string[]): readonly string[] =>
 	values.length < 2 ? values : [...values].sort();
 

@@ -21,6 +21,7 @@ import { NoTablesYetError, UnknownRowError } from './errors';
 import examples from './published-examples.json';
 
 export type { RowEntry, RowVersion } from '../db/repositories';
+export { claimText, entryText, sourceText, valueText } from './canonical';
 export type { CompiledEdition } from './compiled-editions';
 export { coverage, type Coverage, type CoverageCell, type DivisionCoverage } from './coverage';
 export type { ReferenceStatus, WatchEvent, WatchOptions } from './current';
@@ -34,7 +35,9 @@ export {
 	UnknownRowError,
 	UnknownSourceError
 } from './errors';
+export type { Entries } from './entries';
 export { loadRelease, type LoadReport } from './load';
+export type { Changes, ContentChanges } from './merge';
 export { searchRows, tablesInOrder, type RowFilters, type RowPage } from './search';
 export {
 	sourcesList,

@@ -1,5 +1,5 @@
 /** Corrections of the tables: how they stand, and why something cannot be done with one. */
-import type { CorrectionState } from '../../types';
+import type { CorrectionState, PartKind } from '../../types';
 
 export const correctionsText = {
 	states: {
@@ -12,6 +12,36 @@ export const correctionsText = {
 		withdrawn: 'taken back',
 		superseded: 'overtaken'
 	} satisfies Record<CorrectionState, string>,
+	parts: {
+		add_row: 'a row is added',
+		change_row: 'a row is changed',
+		retire_row: 'a row is retired',
+		add_source: 'a source is added',
+		correct_source: 'a source is corrected',
+		repeat_source: 'a source is marked as repeating another',
+		withdraw_source: 'a source is withdrawn',
+		add_claim: 'a claim of completeness is added',
+		change_claim: 'a claim of completeness is changed',
+		retire_claim: 'a claim of completeness is retired'
+	} satisfies Record<PartKind, string>,
+	/** What is wrong with one part. */
+	faults: {
+		address: 'An address begins with https:// or http://.',
+		quotation_long: 'Quote at most 400 characters; a photograph of the page can hold more.',
+		years_order: 'The last year is before the first.',
+		values: 'A fact does not have the form that this table asks for.',
+		citation_elsewhere: 'A citation here belongs to another row.',
+		same_as_today: 'That is what the tables say today.',
+		already_there: 'The tables have an entry under this key. Change that one instead.',
+		said_elsewhere: 'Another row says the same of the same cars. Add your source to that one.',
+		not_there: 'The tables have no such entry any more.',
+		other_table: 'A row stays in its table. Retire this one, and add another.',
+		twice: 'Two parts of this correction speak of the same entry.',
+		unknown_source: 'It cites a source that the tables do not have. Add the source as well.',
+		repeats_itself: 'A source cannot repeat itself, by way of others neither.',
+		still_repeated: 'Another source repeats this one. Withdraw that one as well, or correct it.',
+		claim_from_memory: 'A claim of completeness rests on a work that lists every code.'
+	},
 	refusals: {
 		ended:
 			'This correction is decided, and nothing more can be done with it. A new one can be made.',
