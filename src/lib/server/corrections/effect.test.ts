@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { buildCitation, buildRow } from '../../../../tests/fixtures/builders';
+import { buildCitation, buildClaim, buildRow } from '../../../../tests/fixtures/builders';
 import { readContent } from '../../../../scripts/data/read';
 import { compile, read, type TableSet } from '../../decoder';
 import type { EditionContent, ReferenceRow } from '../../types';
@@ -77,6 +77,22 @@ describe('the effect of a change', () => {
 		expect(changed[0]?.fields.map(({ old, now }) => [old?.outcome, now?.outcome])).toEqual([
 			['not_listed', 'found']
 		]);
+	});
+
+	it('on what looked for a code in vain is what a claim answers, too', () => {
+		const miss = saved('4', 'RM23O0Gxxxxxx', 'ann');
+		const claim = buildClaim('chrysler.engine.test', 'chrysler', 'engine', 'memory');
+		const after = compile({ ...content, claims: [...content.claims, claim] });
+		for (const [from, to, outcomes] of [
+			[before, after, ['not_listed', 'not_used']],
+			[after, before, ['not_used', 'not_listed']]
+		] as const) {
+			const { changed } = effectOf(from, to, [miss, mine]);
+			expect(changed.map(({ id }) => id)).toEqual(['4']);
+			expect(changed[0]?.fields.map(({ old, now }) => [old?.outcome, now?.outcome])).toEqual([
+				outcomes
+			]);
+		}
 	});
 
 	it('of a row that is retired is a field that is not listed', () => {

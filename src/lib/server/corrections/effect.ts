@@ -71,10 +71,12 @@ const NO_FLIPS: TallyFlips = () => [];
 interface Touched {
 	readonly rows: ReadonlySet<string>;
 	readonly codes: ReadonlySet<string>;
+	/** Tables of which a claim is otherwise: what is not listed in one may be not used. */
+	readonly claimed: ReadonlySet<string>;
 }
 const codeKey = (table: string, code: string): string => `${table}\n${code}`;
 
-/** Rows that say something else, or are there on one side only, and the codes that they are found under. */
+/** Rows and claims that say something else, or are there on one side only, and the codes that rows are found under. */
 function touchedBy(before: TableSet, after: TableSet): Touched {
 	const rows = new Set<string>();
 	const codes = new Set<string>();
@@ -87,13 +89,21 @@ function touchedBy(before: TableSet, after: TableSet): Touched {
 			codes.add(codeKey(row.table, row.code));
 		}
 	}
-	return { rows, codes };
+	const claims = sides.map((side) => new Map(side.claims.map((claim) => [claim.claim_key, claim])));
+	const claimed = new Set(
+		sides.flatMap((side, index) =>
+			side.claims
+				.filter((claim) => !sameContent(claim, claims[1 - index]?.get(claim.claim_key)))
+				.map(({ table }) => table)
+		)
+	);
+	return { rows, codes, claimed };
 }
 
-const looksAt = ({ uses }: SavedForEffect, { rows, codes }: Touched): boolean =>
+const looksAt = ({ uses }: SavedForEffect, { rows, codes, claimed }: Touched): boolean =>
 	uses.some(
 		({ table, code, row_key }) =>
-			(row_key !== null && rows.has(row_key)) || codes.has(codeKey(table, code))
+			(row_key === null ? claimed.has(table) : rows.has(row_key)) || codes.has(codeKey(table, code))
 	);
 
 const firstReading = (
