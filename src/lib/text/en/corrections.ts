@@ -42,6 +42,14 @@ export const correctionsText = {
 		still_repeated: 'Another source repeats this one. Withdraw that one as well, or correct it.',
 		claim_from_memory: 'A claim of completeness rests on a work that lists every code.'
 	},
+	/** Why two moderators decide. */
+	secondReader: {
+		flips: 'It changes how a car tallies.',
+		many: 'It changes more than 25 saved readings.',
+		retires: 'It retires a row.',
+		contested: 'Sources differ about the row.',
+		own_car: 'It changes the reading of a car that its author has saved.'
+	},
 	refusals: {
 		ended:
 			'This correction is decided, and nothing more can be done with it. A new one can be made.',
