@@ -39,7 +39,8 @@ describe('makers and layouts', () => {
 		const { items } = await get('/layouts', api.layoutsAnswerSchema);
 		expect(items.map(({ id }) => id)).toEqual([...LAYOUTS, ...LINED_LAYOUTS].map(({ id }) => id));
 		const tag = items.find(({ id }) => id === 'chrysler-fender-tag-1969-1974');
-		expect(tag).toMatchObject({ kind: 'body_tag', length: null, order: 'up', derived: [] });
+		expect(tag).toMatchObject({ kind: 'body_tag', length: null, order: 'up' });
+		expect(tag?.derived.map((own) => own.derived_from)).toContainEqual(['trim']);
 		expect(tag?.lines.map(({ repeats }) => repeats)).toEqual([false, false, true]);
 		expect(tag?.fields[0]).toEqual({
 			name: 'engine',
