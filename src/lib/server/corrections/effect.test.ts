@@ -127,11 +127,15 @@ describe('the effect of a change', () => {
 		const after = edition((rows) => rows.filter(({ row_key }) => row_key !== engineKey));
 		const sheet = effectOf(before, after, [mine, other, saved('5', PLYMOUTH, null)]);
 		const shown = shownTo(sheet, 'ann');
-		expect(shown.map(({ text }) => text)).toEqual([PLYMOUTH, null, null]);
+		expect(shown.map(({ own }) => own?.text)).toEqual([PLYMOUTH, undefined, undefined]);
+		expect(shown.map(({ fields }) => fields)).toEqual(
+			sheet.changed.map((one) => one.fields.length)
+		);
 		expect(shown.map(({ division, model_year }) => [division, model_year])).toEqual(
 			shown.map(() => ['Plymouth', 1970])
 		);
-		expect(JSON.stringify(shown.slice(1))).not.toContain('bob');
-		expect(shownTo(sheet, null).map(({ text }) => text)).toEqual([null, null, null]);
+		for (const hidden of ['bob', 'RM23', '383'])
+			expect(JSON.stringify(shown.slice(1))).not.toContain(hidden);
+		expect(shownTo(sheet, null).map(({ own }) => own)).toEqual([null, null, null]);
 	});
 });

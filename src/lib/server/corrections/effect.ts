@@ -172,15 +172,25 @@ export function effectOf(
 	};
 }
 
-/** What of an effect somebody may see: of readings that are not their own, division, year and plant, and no stamp. */
-export type ShownEffect = Omit<ReadingEffect, 'text' | 'owner' | 'id'> & {
-	/** The stamp; null where the reading is somebody else's. */
-	readonly text: string | null;
-};
+/** What of an effect somebody may see: of readings that are not their own how much changes, division, year and plant. */
+export interface ShownEffect {
+	readonly division: string | null;
+	readonly model_year: number | null;
+	readonly assembly_plant: string | null;
+	/** How many fields change, and how many tallies come out otherwise. */
+	readonly fields: number;
+	readonly flips: number;
+	/** The stamp and what changes; null where the reading is somebody else's. */
+	readonly own: Pick<ReadingEffect, 'text' | 'fields' | 'flips'> | null;
+}
 
 /** The sheet as `viewer` sees it, contributor and moderator alike. @param viewer an id; null for nobody signed in */
-export const shownTo = (sheet: EffectSheet, viewer: string | null): readonly ShownEffect[] =>
-	sheet.changed.map(({ id: _, owner, text, ...shown }) => ({
-		...shown,
-		text: owner !== null && owner === viewer ? text : null
+export const shownTo = ({ changed }: EffectSheet, viewer: string | null): readonly ShownEffect[] =>
+	changed.map(({ owner, text, division, model_year, assembly_plant, fields, flips }) => ({
+		division,
+		model_year,
+		assembly_plant,
+		fields: fields.length,
+		flips: flips.length,
+		own: owner !== null && owner === viewer ? { text, fields, flips } : null
 	}));
