@@ -102,12 +102,19 @@ function pairLines(
 	tables: TableSet,
 	company: Company
 ): TallyLine[] {
+	const repeats = ([first]: readonly Statement[]): number => Number((first as Statement).repeated);
+	const lines = inVoices(ones)
+		.flatMap((one) =>
+			inVoices(others).map((other) => ({
+				line: bestLine(one, other, tables, company),
+				repeated: repeats(one) + repeats(other)
+			}))
+		)
+		.map((pair) => ({ ...pair, key: lineKey(pair.line) }))
+		// A code of its own goes before the number; among alike ones the order of the stamps says nothing.
+		.sort((a, b) => a.repeated - b.repeated || order(a.key, b.key));
 	const byResult = new Map<TallyLine['result'], TallyLine>();
-	for (const one of inVoices(ones))
-		for (const other of inVoices(others)) {
-			const line = bestLine(one, other, tables, company);
-			if (!byResult.has(line.result)) byResult.set(line.result, line);
-		}
+	for (const { line } of lines) if (!byResult.has(line.result)) byResult.set(line.result, line);
 	return [...byResult.values()];
 }
 
