@@ -79,6 +79,21 @@ describe('two statements of an engine', () => {
 		expect(lines('CX1')).toEqual([['tallies', 'CX1']]);
 	});
 
+	it('on two stamps that both repeat the number stand in one line for each result, in either order', () => {
+		const repeated = (code: string) =>
+			engine(code, `gm.engine.${code.toLowerCase()}.1`, { derived_from: ['partial_serial'] });
+		const stamps = [pad(unit('CX1'), repeated('V')), pad(unit('CX3'), repeated('V'))];
+		const lines = (list: readonly TallyStamp[]) =>
+			tallyStamps(tables, list)
+				.filter(({ attribute }) => attribute === 'engine')
+				.map(({ result, left, right }) => [result, ...[left.code, right?.code].sort()]);
+		expect(lines(stamps)).toEqual([
+			['does_not_tally', 'CX1', 'CX3'],
+			['tallies', 'CX1', 'V']
+		]);
+		expect(lines([...stamps].reverse())).toEqual(lines(stamps));
+	});
+
 	it('cannot be told where we have no row, and a near code is offered', () => {
 		const line = only([V(), pad(fieldOf('unit_code', 'CX7', unlisted))], 'engine');
 		expect(line).toMatchObject({ result: 'cannot_be_told' });
