@@ -38,32 +38,6 @@ const stripe = {
 	reads: { by: 'table', table: 'stripe' }
 } as const;
 
-const roof = {
-	name: 'roof',
-	label: 'Roof',
-	optional: true,
-	shape: { chars: ['V', '13', LETTERS], whole: true },
-	reads: { by: 'table', table: 'roof' }
-} as const;
-/** Tags that are printed whole open the options with the color above the belt line, or the roof, and a letter alone. */
-const opening = [
-	{
-		name: 'paint_upper',
-		label: 'Upper color',
-		optional: true,
-		shape: { chars: [LETTERS, LETTERS, DIGITS], whole: true },
-		reads: { by: 'table', table: 'paint' }
-	},
-	roof,
-	{
-		name: 'unknown',
-		label: 'Letter before the options',
-		optional: true,
-		shape: { chars: ['U'], whole: true },
-		reads: { by: 'unknown' }
-	}
-] as const;
-
 export const chryslerFenderTag1969: LinedLayout = {
 	id: 'chrysler-fender-tag-1969-1974',
 	kind: 'body_tag',
@@ -147,11 +121,16 @@ export const chryslerFenderTag1969: LinedLayout = {
 			optional: true,
 			repeats: true,
 			fields: [
-				...opening,
 				beforeAxle,
 				axle,
 				option,
-				roof,
+				{
+					name: 'roof',
+					label: 'Roof',
+					optional: true,
+					shape: { chars: ['V', '13', LETTERS], whole: true },
+					reads: { by: 'table', table: 'roof' }
+				},
 				stripe,
 				option,
 				{
